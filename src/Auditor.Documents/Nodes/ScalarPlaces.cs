@@ -1,0 +1,78 @@
+namespace Auditor.Documents;
+
+/// <summary>Walks a scalar as written alongside its text, to find where each character of the text stands.</summary>
+internal static class ScalarPlaces
+{
+    public static int OffsetOf(ScalarNode scalar, int index)
+    {
+        var written = scalar.Span.Source.Text.AsSpan(scalar.Span.Start, scalar.Span.Length);
+        if (written.SequenceEqual(scalar.Text))
+        {
+            return scalar.Span.Start + index;
+        }
+
+        var properties = ScalarTags.PropertiesLength(written);
+        var quote = properties < written.Length ? written[properties] : '\0';
+        var at = properties + StartOfContent(written[properties..]);
+        for (var i = 0; i < index; i++)
+        {
+            at = After(written, At(written, scalar.Text, i, at), quote);
+        }
+
+        return scalar.Span.Start + (index < scalar.Text.Length ? At(written, scalar.Text, index, at) : at);
+    }
+
+    private static int StartOfContent(ReadOnlySpan<char> written)
+    {
+        if (written.IsEmpty || written[0] is not ('|' or '>'))
+        {
+            return !written.IsEmpty && written[0] is '"' or '\'' ? 1 : 0;
+        }
+
+        var lineEnd = written.IndexOfAny('\r', '\n');
+        return lineEnd < 0 ? written.Length : AfterBreak(written, lineEnd);
+    }
+
+    /// <summary>Steps over indentation and line breaks to the character itself; a blank or break of the text matches the first one met.</summary>
+    private static int At(ReadOnlySpan<char> written, string text, int index, int at)
+    {
+        if (char.IsWhiteSpace(text[index]))
+        {
+            return at;
+        }
+
+        while (at < written.Length && written[at] != text[index] && char.IsWhiteSpace(written[at]))
+        {
+            at++;
+        }
+
+        return at;
+    }
+
+    private static int After(ReadOnlySpan<char> written, int at, char quote)
+    {
+        if (at >= written.Length)
+        {
+            return written.Length;
+        }
+
+        return (quote, written[at]) switch
+        {
+            ('"', '\\') => Math.Min(written.Length, at + EscapeLength(written, at)),
+            ('\'', '\'') => Math.Min(written.Length, at + 2),
+            (_, '\r' or '\n') => AfterBreak(written, at),
+            _ => at + 1,
+        };
+    }
+
+    private static int EscapeLength(ReadOnlySpan<char> written, int at) => (at + 1 < written.Length ? written[at + 1] : '\0') switch
+    {
+        'x' => 4,
+        'u' => 6,
+        'U' => 10,
+        _ => 2,
+    };
+
+    private static int AfterBreak(ReadOnlySpan<char> written, int at)
+        => at + (written[at] == '\r' && at + 1 < written.Length && written[at + 1] == '\n' ? 2 : 1);
+}

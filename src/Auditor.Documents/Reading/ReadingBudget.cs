@@ -1,0 +1,20 @@
+namespace Auditor.Documents;
+
+/// <summary>What is left of the limits while a document and its includes are read.</summary>
+/// <param name="limits">The limits to keep.</param>
+internal sealed class ReadingBudget(ReadingLimits limits)
+{
+    private long _bytes = limits.Bytes;
+    private int _values = limits.Values;
+    private int _files = limits.Files;
+
+    public ReadingLimits Limits { get; } = limits;
+
+    public long BytesLeft => _bytes;
+
+    public void SpendBytes(long count) => _bytes -= count;
+
+    public bool TrySpendValue() => _values-- > 0;
+
+    public bool TrySpendFile() => _files-- > 0;
+}

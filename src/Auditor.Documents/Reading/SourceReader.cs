@@ -1,0 +1,94 @@
+using System.Buffers;
+using System.Security.Cryptography;
+using System.Text;
+using System.Text.Unicode;
+
+namespace Auditor.Documents;
+
+/// <summary>Reads text files that may be hostile: of any size, in any encoding, with any content.</summary>
+public static class SourceReader
+{
+    /// <summary>Reads a UTF-8 file, with or without a byte order mark, with any line breaks.</summary>
+    /// <param name="fullPath">Where the file lies.</param>
+    /// <param name="displayPath">The path to show.</param>
+    /// <param name="problems">Receives whatever is wrong; never throws for a bad file.</param>
+    /// <param name="limits">How large the file may be; null for the default limits.</param>
+    /// <returns>The text, or null when it could not be read.</returns>
+    public static SourceText? Read(string fullPath, string displayPath, Problems problems, ReadingLimits? limits = null)
+        => Read(fullPath, displayPath, problems, new ReadingBudget(limits ?? ReadingLimits.Default))?.Text;
+
+    internal static SourceFile? Read(string fullPath, string displayPath, Problems problems, ReadingBudget budget)
+    {
+        var nowhere = new SourceText(displayPath, "").WholeSpan();
+        try
+        {
+            if (Directory.Exists(fullPath))
+            {
+                problems.Add(FileProblems.IsFolder(nowhere));
+                return null;
+            }
+
+            var bytes = ReadBytes(new FileInfo(fullPath), budget.BytesLeft);
+            if (bytes is null)
+            {
+                problems.Add(FileProblems.TooLarge(nowhere, budget.Limits.Bytes));
+                return null;
+            }
+
+            budget.SpendBytes(bytes.Length);
+            return Decode(bytes, displayPath, problems) is { } text ? new SourceFile(text, Convert.ToHexStringLower(SHA256.HashData(bytes))) : null;
+        }
+        catch (Exception fault) when (fault is FileNotFoundException or DirectoryNotFoundException)
+        {
+            problems.Add(FileProblems.Missing(nowhere));
+        }
+        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException or NotSupportedException or ArgumentException)
+        {
+            problems.Add(FileProblems.Unreadable(nowhere));
+        }
+
+        return null;
+    }
+
+    /// <summary>Reads all bytes, or returns null when there are more than allowed.</summary>
+    private static byte[]? ReadBytes(FileInfo file, long limit)
+    {
+        // Pipes and devices report no length. They are not opened at all: opening one may wait for ever.
+        if (file.Length == 0)
+        {
+            return [];
+        }
+
+        if (file.Length > limit)
+        {
+            return null;
+        }
+
+        using var stream = file.OpenRead();
+        var bytes = new byte[file.Length];
+        var read = stream.ReadAtLeast(bytes, bytes.Length, throwOnEndOfStream: false);
+        return read == bytes.Length ? bytes : bytes[..read];
+    }
+
+    private static SourceText? Decode(ReadOnlySpan<byte> bytes, string displayPath, Problems problems)
+    {
+        if (bytes.StartsWith<byte>([0xFF, 0xFE]) || bytes.StartsWith<byte>([0xFE, 0xFF]))
+        {
+            problems.Add(FileProblems.IsUtf16(new SourceText(displayPath, "").WholeSpan()));
+            return null;
+        }
+
+        var content = bytes.StartsWith<byte>([0xEF, 0xBB, 0xBF]) ? bytes[3..] : bytes;
+        var buffer = new char[content.Length];
+        var status = Utf8.ToUtf16(content, buffer, out var read, out var written, replaceInvalidSequences: false);
+        if (status != OperationStatus.Done)
+        {
+            var shown = new SourceText(displayPath, Encoding.UTF8.GetString(content));
+            problems.Add(FileProblems.NotUtf8(new SourceSpan(shown, written, written + 1), content[read]));
+            return null;
+        }
+
+        var source = new SourceText(displayPath, new string(buffer, 0, written));
+        return ForbiddenCharacters.Report(source, problems) ? null : source;
+    }
+}

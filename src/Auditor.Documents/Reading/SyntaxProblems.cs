@@ -1,0 +1,64 @@
+using YamlDotNet.Core;
+
+namespace Auditor.Documents;
+
+/// <summary>Puts faults of YAML syntax in our own words, by what the parser's message holds.</summary>
+internal static class SyntaxProblems
+{
+    private const string Code = "yaml-syntax";
+
+    private static readonly (string Holds, string Message, string Help)[] Wordings =
+    [
+        ("invalid mapping", "a second key on the same line, or a key that is indented too far",
+            "indent the key like its neighbours; put quotes around a value that holds `: `"),
+        ("Mapping values are not allowed", "a colon where no value can follow", "put quotes around a text that holds `: `, and indent keys alike"),
+        ("Mapping keys are not allowed", "a `?` where no key can start", "put quotes around a text that starts with `?`"),
+        ("Block sequence entries are not allowed", "a dash where no list item can start",
+            "start the list on the next line, or put quotes around a text that starts with `- `"),
+        ("expected key", "a `key: value` line is expected here", "indent the line like the keys above it, and look for a missing colon or quote"),
+        ("expected '-' indicator", "a list item is expected here", "start the line with `- `, indented like the items above it"),
+        ("could not find expected ':'", "a key without its colon", "write `key: value`; a key stands on one line"),
+        ("expected ',' or '}'", "a comma or `}` is expected here", "separate the entries by commas and close the brace"),
+        ("expected ',' or ']'", "a comma or `]` is expected here", "separate the items by commas and close the bracket"),
+        ("expected node content", "a value is expected here", "write the value, or close what was opened before"),
+        ("end of stream", "the quoted text that starts here is not closed", "add the closing quote"),
+        ("unexpected document indicator", "the quoted text is not closed before the document ends", "add the closing quote"),
+        ("unknown escape", "an escape that means nothing", "write `\\\\` for a backslash, or use single quotes"),
+        ("hexadecimal", "an escape without its hexadecimal digits", "write `\\\\` for a backslash, or use single quotes"),
+        ("Unicode", "an escape that names no character", "write `\\\\` for a backslash, or use single quotes"),
+        ("tab", "a tab where only spaces may indent", "replace it by spaces"),
+        ("cannot start any token", "a character that no value can start with", "put quotes around the value"),
+        ("block scalar", "the text block does not start or indent as it should", "put nothing after `|` or `>`, and indent all its lines alike"),
+        ("wrong indentation", "a quoted text that goes on to the left of its key", "indent its further lines"),
+        ("comment", "a comment that does not stand apart", "put a blank before the `#`"),
+        ("anchor", "an anchor or alias that cannot be read", "anchors and aliases are not used here: write the value out"),
+        ("alias", "an anchor or alias that cannot be read", "anchors and aliases are not used here: write the value out"),
+        ("tag", "a tag that cannot be read", "tags are not used here: put quotes around a value that starts with `!`"),
+        ("directive", "a directive that cannot be read", "directives are not used here: remove the line"),
+        ("YAML document", "a directive that cannot be read", "directives are not used here: remove the line"),
+        ("<document start>", "something is left over after the end of the value", "indent it as part of the value, or remove it"),
+        ("<document end>", "something is left over after the end of the value", "indent it as part of the value, or remove it"),
+        ("content after '...'", "something is left over after the end of the document", "remove it"),
+    ];
+
+    /// <summary>Words a fault that the parser has placed.</summary>
+    /// <param name="source">The text.</param>
+    /// <param name="fault">What the parser says.</param>
+    /// <param name="openBracket">The innermost bracket still open, if any.</param>
+    public static Problem Word(SourceText source, YamlException fault, SourceSpan? openBracket)
+    {
+        var start = (int)Math.Clamp(fault.Start.Index, 0, source.Text.Length);
+        var end = (int)Math.Clamp(fault.End.Index, start, source.Text.Length);
+        var (_, message, help) = Array.Find(Wordings, wording => fault.Message.Contains(wording.Holds, StringComparison.Ordinal));
+        return Make(message ?? "the text is not YAML from here on", new SourceSpan(source, start, end),
+            help ?? "look for a missing quote, bracket or colon, or for uneven indentation", openBracket);
+    }
+
+    /// <summary>Words a fault that is known only to lie after a place.</summary>
+    public static Problem Unplaced(SourceText source, int after, SourceSpan? openBracket)
+        => Make("the text is not YAML from here on", new SourceSpan(source, after, after),
+            "look for a bracket that is not closed, or for an escape that names no character", openBracket);
+
+    private static Problem Make(string message, SourceSpan span, string help, SourceSpan? openBracket)
+        => Problem.Error(Code, message, span, help, openBracket is { } bracket ? [new ProblemLabel(bracket, "this bracket is still open")] : []);
+}

@@ -46,6 +46,10 @@ public sealed record Tolerance(double Below, double Above)
         unit.Dimension == quantity
         || (quantity.IsTemperature ? unit.Dimension == Dimension.TemperatureDifference : unit.Equals(UnitDefinitions.Percent));
 
+    /// <summary>The unit in which to write an absolute tolerance of a value in a unit.</summary>
+    internal static Unit UnitFor(Unit value) =>
+        value.Dimension.IsTemperature ? UnitDefinitions.Kelvin : value.Equals(UnitDefinitions.Percent) ? Unit.One : value;
+
     private static double Checked(double side, string name) =>
         double.IsFinite(side) && side >= 0
             ? side

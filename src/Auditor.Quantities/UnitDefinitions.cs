@@ -36,8 +36,8 @@ internal static class UnitDefinitions
         Simple("mm", Dimension.Length, 1, 1000),
         Simple("cm", Dimension.Length, 1, 100),
 
-        new("m²", "m2", Dimension.Area, 1, 1, "m^2"),
-        new("mm²", "mm2", Dimension.Area, 1, 1e6, "mm^2"),
+        new("m²", "m2", Dimension.Area, 1, 1),
+        new("mm²", "mm2", Dimension.Area, 1, 1e6),
 
         Simple("s", Dimension.Time),
         Simple("ms", Dimension.Time, 1, 1000),
@@ -46,7 +46,7 @@ internal static class UnitDefinitions
 
         new("°C", "degC", Dimension.Temperature, 1, 1),
         Kelvin,
-        new("1/K", "per_K", Dimension.TemperatureCoefficient, 1, 1, "/K", "K⁻¹"),
+        new("1/K", "per_K", Dimension.TemperatureCoefficient, 1, 1, "/K"),
 
         Simple("W", Dimension.Power),
         Simple("kW", Dimension.Power, 1e3),
@@ -69,11 +69,11 @@ internal static class UnitDefinitions
         Ohmic("Ω/km", "ohm_per_km", Dimension.ResistancePerLength, 1, 1000, "ohm/km"),
         new("mV/A/m", "mV_per_A_m", Dimension.ResistancePerLength, 1, 1000, "mV/(A·m)"),
 
-        new("A²s", "A2s", Dimension.JouleIntegral, 1, 1, "A²·s", "A^2·s", "A^2*s"),
-        new("kA²s", "kA2s", Dimension.JouleIntegral, 1e6, 1, "kA²·s", "kA^2·s", "kA^2*s"),
+        new("A²s", "A2s", Dimension.JouleIntegral, 1, 1, "A²·s"),
+        new("kA²s", "kA2s", Dimension.JouleIntegral, 1e6, 1, "kA²·s"),
 
-        new("K·m/W", "K_m_per_W", Dimension.ThermalResistivity, 1, 1, "m·K/W", "K*m/W", "K.m/W", "K m/W"),
-        new("A·s^½/mm²", "A_rt_s_per_mm2", Dimension.AdiabaticFactor, 1e6, 1, "A·√s/mm²", "A√s/mm²", "A*s^0.5/mm^2"),
+        new("K·m/W", "K_m_per_W", Dimension.ThermalResistivity, 1, 1, "m·K/W", "K.m/W", "K m/W"),
+        new("A·s^½/mm²", "A_rt_s_per_mm2", Dimension.AdiabaticFactor, 1e6, 1, "A√s/mm²"),
     ];
 
     private static Unit Simple(string symbol, Dimension dimension, double multiplier = 1, double divisor = 1) =>

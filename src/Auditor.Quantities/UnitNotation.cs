@@ -8,7 +8,8 @@ namespace Auditor.Quantities;
 /// </summary>
 internal static class UnitNotation
 {
-    private const string Superscripts = "⁰¹²³⁴⁵⁶⁷⁸⁹";
+    /// <summary>The superscript digits, in order.</summary>
+    internal const string Superscripts = "⁰¹²³⁴⁵⁶⁷⁸⁹";
 
     /// <summary><c>A·s^½/mm²</c>; <c>1</c> for an empty product.</summary>
     internal static string Symbol(ReadOnlySpan<(string Name, int Doubled)> factors)

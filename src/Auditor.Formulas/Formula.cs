@@ -1,0 +1,24 @@
+using Auditor.Documents;
+using Auditor.Formulas.Binding;
+using Auditor.Formulas.Subjects;
+using Auditor.Formulas.Terms;
+using Auditor.Formulas.Types;
+using Auditor.Formulas.Values;
+
+namespace Auditor.Formulas;
+
+/// <summary>A formula of a rule file, checked against what its subject has and ready to be evaluated.</summary>
+/// <param name="Source">The scalar that holds it in the rule file.</param>
+/// <param name="Root">The bound expression.</param>
+/// <param name="References">The quantities that it reads, each once per direction.</param>
+public sealed record Formula(ScalarNode Source, Term Root, IReadOnlyList<Reference> References)
+{
+    /// <summary>The formula as written.</summary>
+    public string Text => Source.Text;
+
+    /// <summary>What it gives.</summary>
+    public FormulaType Type => Root.Type;
+
+    /// <summary>Its value in a scope; missing where it cannot be computed.</summary>
+    public Value Evaluate(Scope scope) => Root.Evaluate(scope);
+}

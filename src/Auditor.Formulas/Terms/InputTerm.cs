@@ -1,0 +1,16 @@
+using Auditor.Documents;
+using Auditor.Formulas.Subjects;
+using Auditor.Formulas.Values;
+
+namespace Auditor.Formulas.Terms;
+
+/// <summary>An input of the subject.</summary>
+internal sealed class InputTerm(SourceSpan span, InputSlot slot) : Term(slot.Type, span)
+{
+    public override Value Evaluate(Scope scope)
+    {
+        var value = scope.Subject.Input(slot.Index);
+        scope.Trace?.Read(Span, scope.Subject, slot, value);
+        return value;
+    }
+}

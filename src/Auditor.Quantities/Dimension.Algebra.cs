@@ -29,21 +29,15 @@ public readonly partial record struct Dimension
     /// </summary>
     public bool TryPower(double exponent, out Dimension result)
     {
-        result = this;
         if (IsTemperature)
         {
+            result = this;
             return exponent == 1;
         }
 
-        return Fits(_volt * exponent) && Fits(_ampere * exponent) && Fits(_metre * exponent)
-            && Fits(_second * exponent) && Fits(_kelvin * exponent)
-            && TryMake(
-                (int)(_volt * exponent),
-                (int)(_ampere * exponent),
-                (int)(_metre * exponent),
-                (int)(_second * exponent),
-                (int)(_kelvin * exponent),
-                out result);
+        (double volt, double ampere, double metre, double second, double kelvin) =
+            (_volt * exponent, _ampere * exponent, _metre * exponent, _second * exponent, _kelvin * exponent);
+        return TryMake(volt, ampere, metre, second, kelvin, out result);
     }
 
     /// <summary>
@@ -52,10 +46,11 @@ public readonly partial record struct Dimension
     /// </summary>
     public bool TryPlus(Dimension other, out Dimension sum)
     {
-        sum = IsTemperature ? this : other;
-        return IsTemperature || other.IsTemperature
+        bool exists = IsTemperature || other.IsTemperature
             ? this == TemperatureDifference || other == TemperatureDifference
             : this == other;
+        sum = IsTemperature ? this : other;
+        return exists;
     }
 
     /// <summary>
@@ -64,16 +59,17 @@ public readonly partial record struct Dimension
     /// </summary>
     public bool TryMinus(Dimension other, out Dimension difference)
     {
+        bool exists = this == other || (IsTemperature && other == TemperatureDifference);
         difference = IsTemperature && other.IsTemperature ? TemperatureDifference : this;
-        return this == other || (IsTemperature && other == TemperatureDifference);
+        return exists;
     }
 
     private static bool Fits(double doubled) => double.IsInteger(doubled) && doubled is >= sbyte.MinValue and <= sbyte.MaxValue;
 
-    private static bool TryMake(int volt, int ampere, int metre, int second, int kelvin, out Dimension result)
+    private static bool TryMake(double volt, double ampere, double metre, double second, double kelvin, out Dimension result)
     {
         bool fits = Fits(volt) && Fits(ampere) && Fits(metre) && Fits(second) && Fits(kelvin);
-        result = fits ? new Dimension(volt, ampere, metre, second, kelvin, isTemperature: false) : None;
+        result = fits ? new Dimension((int)volt, (int)ampere, (int)metre, (int)second, (int)kelvin, isTemperature: false) : None;
         return fits;
     }
 
@@ -82,8 +78,13 @@ public readonly partial record struct Dimension
 
     private bool TryCombine(Dimension other, int sign, out Dimension result)
     {
-        result = None;
-        return !IsTemperature && !other.IsTemperature && TryMake(
+        if (IsTemperature || other.IsTemperature)
+        {
+            result = None;
+            return false;
+        }
+
+        return TryMake(
             _volt + (sign * other._volt),
             _ampere + (sign * other._ampere),
             _metre + (sign * other._metre),

@@ -6,7 +6,8 @@ namespace Auditor.Quantities;
 /// <remarks>
 /// Volt and ampere stand in for mass, because every quantity of an electrical installation reduces to them: an ohm is V/A, a watt
 /// V·A, a joule V·A·s (IEC 80000-6). Half exponents occur in practice: the factor k of a conductor is in A·s^½/mm² (IEC 60364-5-54).
-/// A point on the Celsius scale is a dimension of its own, because it can neither be scaled nor multiplied; see <see cref="IsTemperature"/>.
+/// A point on the Celsius scale is a dimension of its own, because it can be neither scaled nor multiplied:
+/// see <see cref="IsTemperature"/>.
 /// The default value is <see cref="None"/>.
 /// </remarks>
 public readonly partial record struct Dimension
@@ -38,7 +39,9 @@ public readonly partial record struct Dimension
     public static Dimension Of(int volt, int ampere, int metre, int second, int kelvin) =>
         checked(new(2 * volt, 2 * ampere, 2 * metre, 2 * second, 2 * kelvin, isTemperature: false));
 
-    /// <summary>The dimension in base units: <c>V/A</c>, <c>A·s^½/m²</c>, <c>1</c> for a pure number, <c>°C</c> for a temperature.</summary>
+    /// <summary>
+    /// The dimension in base units: <c>V/A</c>, <c>A·s^½/m²</c>, <c>1</c> for a pure number, <c>°C</c> for a temperature.
+    /// </summary>
     public override string ToString() => IsTemperature
         ? "°C"
         : UnitNotation.Symbol([("V", _volt), ("A", _ampere), ("m", _metre), ("s", _second), ("K", _kelvin)]);

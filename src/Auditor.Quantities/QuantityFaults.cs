@@ -20,13 +20,25 @@ internal static class QuantityFaults
         new(start, length, "a comma stands inside the number", "write a decimal point, `2.5`, and nothing between thousands, `1000`");
 
     internal static QuantityFault SecondNumber(int start, ReadOnlySpan<char> found) =>
-        new(start, found.Length, $"a number is followed by a second one, {Quote(found)}", "write one number, with nothing between thousands, and then its unit");
+        new(
+            start,
+            found.Length,
+            $"a number is followed by a second one, {Quote(found)}",
+            "write one number, with nothing between thousands, and then its unit");
 
     internal static QuantityFault TooLarge(int start, int length) =>
-        new(start, length, "the number is beyond any sense: above 1e15, as written or in base units", "check the number of digits, the exponent and the unit");
+        new(
+            start,
+            length,
+            "the number is beyond any sense: above 1e15, as written or in base units",
+            "check the number of digits, the exponent and the unit");
 
     internal static QuantityFault TooSmall(int start, int length) =>
-        new(start, length, "the number is beyond any sense: below 1e-15 but not zero, as written or in base units", "check the exponent and the unit, or write 0");
+        new(
+            start,
+            length,
+            "the number is beyond any sense: below 1e-15 but not zero, as written or in base units",
+            "check the exponent and the unit, or write 0");
 
     internal static QuantityFault BelowAbsoluteZero(int start, int length) =>
         new(start, length, "the temperature lies below absolute zero, -273.15 °C", "check the number and its sign");
@@ -40,22 +52,42 @@ internal static class QuantityFaults
     }
 
     internal static QuantityFault ToleranceNumberMissing(int start, ReadOnlySpan<char> found) =>
-        new(start, found.Length, "the tolerance lacks its number", "write for example `± 10 %`, `± 2 m` or `+3 m -1 m`; the sign stands before the number and nowhere else");
+        new(
+            start,
+            found.Length,
+            "the tolerance lacks its number",
+            "write for example `± 10 %`, `± 2 m` or `+3 m -1 m`; the sign stands before the number and nowhere else");
 
     internal static QuantityFault ValueUnitMissing(int start, int length, Unit unit) =>
-        new(start, length, $"the tolerance is in `{unit}`, the value has no unit", $"write the unit after both numbers, for example `18 {unit} ± 2 {unit}`, also where you mean a range");
+        new(
+            start,
+            length,
+            $"the tolerance is in `{unit}`, the value has no unit",
+            $"write the unit after both numbers, for example `18 {unit} ± 2 {unit}`, also where you mean a range");
 
     internal static QuantityFault ToleranceUnitMissing(int start, Unit unit) =>
         new(start, 0, "the tolerance lacks its unit", $"write it in per cent, `%`, or in {ToleranceUnit(unit)}");
 
     internal static QuantityFault ToleranceUnitUnfit(int start, int length, Unit tolerance, Unit unit) =>
-        new(start, length, $"a tolerance in `{tolerance}` does not fit a value in `{unit}`", $"write it in per cent, `%`, or in {ToleranceUnit(unit)}");
+        new(
+            start,
+            length,
+            $"a tolerance in `{tolerance}` does not fit a value in `{unit}`",
+            $"write it in per cent, `%`, or in {ToleranceUnit(unit)}");
 
     internal static QuantityFault ToleranceOfTemperature(int start, int length, Unit tolerance) =>
-        new(start, length, $"a tolerance in `{tolerance}` does not fit a temperature, whose zero is arbitrary", "write it in kelvins, for example `± 5 K`");
+        new(
+            start,
+            length,
+            $"a tolerance in `{tolerance}` does not fit a temperature, whose zero is arbitrary",
+            "write it in kelvins, for example `± 5 K`");
 
     internal static QuantityFault ToleranceSideMissing(int start, char other) =>
-        new(start, 0, $"the tolerance has one side only: the one with `{other}` is missing", "write both, for example `+3 m -0 m`, or one for both, `± 3 m`");
+        new(
+            start,
+            0,
+            $"the tolerance has one side only: the one with `{other}` is missing",
+            "write both, for example `+3 m -0 m`, or one for both, `± 3 m`");
 
     internal static QuantityFault ToleranceUnitsDiffer(int start, int length, Unit first, Unit second) =>
         new(start, length, $"the sides of the tolerance are in different units, `{first}` and `{second}`", $"write both in `{first}`");
@@ -67,9 +99,14 @@ internal static class QuantityFaults
         new(start, found.Length, $"{Quote(found)} does not say how the value is known", StandingHelp);
 
     internal static QuantityFault Surplus(int start, ReadOnlySpan<char> found) =>
-        new(start, found.Length, $"{Quote(found)} follows a quantity that is complete", "write one number with its unit, at most one tolerance, and at most one word after a comma");
+        new(
+            start,
+            found.Length,
+            $"{Quote(found)} follows a quantity that is complete",
+            "write one number with its unit, at most one tolerance, and at most one word after a comma");
 
-    private static string StandingHelp => "write `assumed`, `declared` or `measured`, in small letters, or end before the comma for a designed value";
+    private static string StandingHelp =>
+        "write `assumed`, `declared` or `measured`, in small letters, or end before the comma for a designed value";
 
     private static string ToleranceUnit(Unit unit) =>
         unit.Equals(UnitDefinitions.Percent) || unit.Equals(Unit.One) ? "plain numbers" : $"`{unit}`";

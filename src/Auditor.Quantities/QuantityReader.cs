@@ -37,7 +37,9 @@ internal ref partial struct QuantityReader
         }
 
         var quantity = Quantity.Of(number, unit);
-        if (!CheckValue(quantity, start) || !ReadTolerance(unit, quantity, out Tolerance? tolerance) || !ReadStanding(out Standing standing))
+        if (!CheckValue(quantity, start)
+            || !ReadTolerance(unit, quantity, out Tolerance? tolerance)
+            || !ReadStanding(out Standing standing))
         {
             return null;
         }

@@ -41,7 +41,8 @@ public static class QuantityText
     }
 
     /// <summary>
-    /// A coherent value for people, in a unit: <c>1.37 Ω</c>, <c>5 %</c>, <c>30 °C</c>; no unit for a pure number. See <see cref="ShowNumber"/>.
+    /// A coherent value for people, in a unit: <c>1.37 Ω</c>, <c>5 %</c>, <c>30 °C</c>; no unit for a pure number.
+    /// See <see cref="ShowNumber"/>.
     /// </summary>
     public static string Show(double coherent, Unit unit) => WithUnit(ShowNumber(coherent, unit), unit);
 

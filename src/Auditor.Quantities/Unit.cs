@@ -28,7 +28,7 @@ public sealed class Unit : IEquatable<Unit>
     /// <summary>The preferred spelling, for people: <c>mm²</c>, <c>Ω</c>, <c>mΩ/m</c>, <c>%</c>, <c>°C</c>.</summary>
     public string Symbol { get; }
 
-    /// <summary>The spelling that is an identifier, for formulas: <c>mm2</c>, <c>ohm</c>, <c>mohm_per_m</c>, <c>percent</c>, <c>degC</c>.</summary>
+    /// <summary>The spelling that is an identifier, for formulas: <c>mm2</c>, <c>ohm</c>, <c>mohm_per_m</c>, <c>percent</c>.</summary>
     public string Identifier { get; }
 
     /// <summary>The dimension of quantities in this unit.</summary>

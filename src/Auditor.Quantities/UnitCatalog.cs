@@ -26,7 +26,8 @@ public static class UnitCatalog
 
     /// <summary>
     /// The unit so spelled, or null when it is none: a catalogued spelling, or a compound of catalogued units (<c>kW/h</c>,
-    /// <c>Ω·mm²/m</c>, <c>A·√s/mm²</c>, <c>m^-1</c>) with exponents up to 9 in steps of one half. °C stands in no compound: K does.
+    /// <c>Ω·mm²/m</c>, <c>A·√s/mm²</c>, <c>m^-1</c>) with exponents up to 9½ in steps of one half and free
+    /// space about the signs. °C stands in no compound: K does.
     /// </summary>
     public static Unit? Find(string spelling) => Find(spelling.AsSpan());
 

@@ -79,7 +79,7 @@ internal static class UnitDefinitions
     private static Unit Simple(string symbol, Dimension dimension, double multiplier = 1, double divisor = 1) =>
         new(symbol, symbol, dimension, multiplier, divisor);
 
-    /// <summary>A unit with an omega, which is also accepted as the ohm sign, U+2126, that some keyboards and word processors yield.</summary>
+    /// <summary>A unit with an omega, which is also accepted as the ohm sign, U+2126, that some keyboards yield.</summary>
     private static Unit Ohmic(
         string symbol, string identifier, Dimension dimension, double multiplier = 1, double divisor = 1, params string[] spellings) =>
         new(symbol, identifier, dimension, multiplier, divisor, [.. spellings, symbol.Replace('Ω', '\u2126')]);

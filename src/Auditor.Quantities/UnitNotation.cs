@@ -35,7 +35,9 @@ internal static class UnitNotation
         return text.ToString();
     }
 
-    /// <summary><c>A_rt_s_per_mm2</c>: factors joined by <c>_</c>, <c>rt_</c> before a square root, all divisors after one <c>per_</c>.</summary>
+    /// <summary>
+    /// <c>A_rt_s_per_mm2</c>: factors joined by <c>_</c>, <c>rt_</c> before a square root, all divisors after one <c>per_</c>.
+    /// </summary>
     internal static string Identifier(ReadOnlySpan<(string Name, int Doubled)> factors)
     {
         var words = new List<string>();

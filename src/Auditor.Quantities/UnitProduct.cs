@@ -1,6 +1,6 @@
 namespace Auditor.Quantities;
 
-/// <summary>A product of powers of catalogued units on its way to becoming one unit. Exponents are doubled, so that one half is 1.</summary>
+/// <summary>A product of powers of catalogued units on its way to one unit. Exponents are doubled, so that one half is 1.</summary>
 internal sealed class UnitProduct
 {
     /// <summary>The largest whole exponent of a factor; with a half on top it may be this and a half.</summary>
@@ -35,19 +35,24 @@ internal sealed class UnitProduct
     /// </summary>
     internal Unit? ToUnit()
     {
-        _factors.RemoveAll(factor => factor.Doubled == 0);
-        if (_factors.Count == 0)
+        // In the order of the symbol, so that the scale is rounded in the same way however the product was written.
+        (Unit Unit, int Doubled)[] factors =
+        [
+            .. _factors.Where(factor => factor.Doubled > 0),
+            .. _factors.Where(factor => factor.Doubled < 0),
+        ];
+        if (factors.Length == 0)
         {
             return Unit.One;
         }
 
-        if (_factors.Count > MostFactors || _factors.Exists(factor => Math.Abs(factor.Doubled) > (2 * LargestExponent) + 1))
+        if (factors.Length > MostFactors || Array.Exists(factors, factor => Math.Abs(factor.Doubled) > (2 * LargestExponent) + 1))
         {
             return null;
         }
 
-        string symbol = UnitNotation.Symbol([.. _factors.Select(factor => (factor.Unit.Symbol, factor.Doubled))]);
-        return UnitCatalog.Catalogued(symbol) ?? Compound(symbol);
+        string symbol = UnitNotation.Symbol([.. factors.Select(factor => (factor.Unit.Symbol, factor.Doubled))]);
+        return UnitCatalog.Catalogued(symbol) ?? Compound(factors, symbol);
     }
 
     private static double Power(double number, int doubled)
@@ -61,11 +66,11 @@ internal sealed class UnitProduct
         return power;
     }
 
-    private Unit? Compound(string symbol)
+    private static Unit? Compound((Unit Unit, int Doubled)[] factors, string symbol)
     {
         (double multiplier, double divisor) = (1, 1);
         Dimension dimension = Dimension.None;
-        foreach ((Unit unit, int doubled) in _factors)
+        foreach ((Unit unit, int doubled) in factors)
         {
             if (!unit.Dimension.TryPower(doubled / 2.0, out Dimension power) || !dimension.TryTimes(power, out dimension))
             {
@@ -78,7 +83,7 @@ internal sealed class UnitProduct
         }
 
         double scale = multiplier / divisor;
-        string identifier = UnitNotation.Identifier([.. _factors.Select(factor => (factor.Unit.Identifier, factor.Doubled))]);
+        string identifier = UnitNotation.Identifier([.. factors.Select(factor => (factor.Unit.Identifier, factor.Doubled))]);
         return double.IsNormal(scale) && double.IsNormal(1 / scale)
             ? new Unit(symbol, identifier, dimension, multiplier, divisor)
             : null;

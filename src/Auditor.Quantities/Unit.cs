@@ -2,7 +2,7 @@ namespace Auditor.Quantities;
 
 /// <summary>
 /// A unit of measurement: a dimension, a scale to the coherent unit of that dimension, and the ways to write it. Units come from
-/// <see cref="UnitCatalog"/>. Two units are equal when they agree in symbol, dimension and scale.
+/// <see cref="UnitCatalog"/>. Units are equal when their symbols are: a symbol is made of catalogued names only, so it settles the rest.
 /// </summary>
 /// <remarks>
 /// Coherent units are V, A, m, s, K and their products; a temperature is coherent in °C, so degree Celsius has scale 1 and no
@@ -51,9 +51,7 @@ public sealed class Unit : IEquatable<Unit>
     public double FromCoherent(double coherent) => coherent * _divisor / _multiplier;
 
     /// <inheritdoc/>
-    public bool Equals(Unit? other) =>
-        ReferenceEquals(this, other)
-        || (other is not null && Symbol == other.Symbol && Dimension == other.Dimension && Scale == other.Scale);
+    public bool Equals(Unit? other) => Symbol == other?.Symbol;
 
     /// <inheritdoc/>
     public override bool Equals(object? obj) => Equals(obj as Unit);

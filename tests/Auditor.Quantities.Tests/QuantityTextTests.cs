@@ -84,6 +84,8 @@ public class QuantityTextTests
     [InlineData("20 m", "20 m")]
     [InlineData("0.3 mm", "0.3 mm")]
     [InlineData("7 mA", "7 mA")]
+    [InlineData("0.49 mm", "0.49 mm")]
+    [InlineData("3.92 mV", "3.92 mV")]
     [InlineData("0.1 min", "0.1 min")]
     [InlineData("-0 m", "0 m")]
     [InlineData("20m+-10%", "20 m ± 10 %")]
@@ -99,6 +101,10 @@ public class QuantityTextTests
         Assert.Equal(written, QuantityText.Write(Read(text)));
         Assert.Equal(written, Read(text).ToString());
     }
+
+    [Fact]
+    public void A_zero_has_no_sign() =>
+        Assert.False(double.IsNegative(Read("-0 m").Quantity.Value));
 
     [Theory]
     [InlineData("20 m", 0.5, 0.5, "20 m ± 0.5 m")]

@@ -1,1 +1,3 @@
-Console.WriteLine();
+using Auditor.Cli;
+
+return AuditorProgram.Run(args, Console.Out, Console.Error);

@@ -4,6 +4,7 @@ using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Terms;
 using Auditor.Formulas.Types;
 using Auditor.Formulas.Values;
+using Auditor.Quantities;
 
 namespace Auditor.Formulas;
 
@@ -19,6 +20,15 @@ public sealed record Formula(ScalarNode Source, Term Root, IReadOnlyList<Referen
     /// <summary>What it gives.</summary>
     public FormulaType Type => Root.Type;
 
+    /// <summary>Unit in which people read it; null for anything but a quantity.</summary>
+    public Unit? Unit => Type.Kind == FormulaKind.Quantity ? Root.Unit ?? Coherent(Type.Dimension) : null;
+
     /// <summary>Its value in a scope; missing where it cannot be computed.</summary>
     public Value Evaluate(Scope scope) => Root.Evaluate(scope);
+
+    private static Unit? Coherent(Dimension dimension)
+    {
+        var units = UnitCatalog.Of(dimension);
+        return units.FirstOrDefault(unit => unit.Scale == 1) ?? units.FirstOrDefault() ?? UnitCatalog.Find(dimension.ToString());
+    }
 }

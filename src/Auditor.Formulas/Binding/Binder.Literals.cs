@@ -73,6 +73,6 @@ internal sealed partial class Binder
         }
 
         var quantity = Quantity.Of(negative ? -number : number, unit);
-        return new LiteralTerm(FormulaType.Of(quantity.Dimension), SpanOf(pair), Value.Of(quantity.Value));
+        return new LiteralTerm(FormulaType.Of(quantity.Dimension), SpanOf(pair), Value.Of(quantity.Value), unit);
     }
 }

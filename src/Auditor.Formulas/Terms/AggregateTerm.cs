@@ -2,6 +2,7 @@ using Auditor.Documents;
 using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Types;
 using Auditor.Formulas.Values;
+using Auditor.Quantities;
 
 namespace Auditor.Formulas.Terms;
 
@@ -13,6 +14,8 @@ namespace Auditor.Formulas.Terms;
 internal sealed class AggregateTerm(
     FormulaType type, SourceSpan span, Aggregate how, SubjectList collection, Term item, bool usesOuter) : Term(type, span)
 {
+    public override Unit? Unit => item.Unit;
+
     public override Value Evaluate(Scope scope)
     {
         var items = scope.Subject.Collection(collection.Index);

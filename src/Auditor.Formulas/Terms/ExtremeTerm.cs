@@ -2,12 +2,15 @@ using Auditor.Documents;
 using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Types;
 using Auditor.Formulas.Values;
+using Auditor.Quantities;
 
 namespace Auditor.Formulas.Terms;
 
 /// <summary>The least or the greatest of several quantities; missing when any of them is.</summary>
 internal sealed class ExtremeTerm(FormulaType type, SourceSpan span, bool least, IReadOnlyList<Term> operands) : Term(type, span)
 {
+    public override Unit? Unit => operands[0].Unit;
+
     public override Value Evaluate(Scope scope)
     {
         var result = operands[0].Evaluate(scope);

@@ -9,6 +9,8 @@ namespace Auditor.Formulas.Terms;
 /// <summary>The next size or rating of a series.</summary>
 internal sealed class RoundUpTerm(SourceSpan span, Lookup series, Term operand) : Term(operand.Type, span)
 {
+    public override Unit? Unit => series.Keys[0].Unit;
+
     public override Value Evaluate(Scope scope)
     {
         var value = operand.Evaluate(scope);

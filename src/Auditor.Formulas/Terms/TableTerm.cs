@@ -3,12 +3,15 @@ using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Tables;
 using Auditor.Formulas.Types;
 using Auditor.Formulas.Values;
+using Auditor.Quantities;
 
 namespace Auditor.Formulas.Terms;
 
 /// <summary>A figure of a table.</summary>
 internal sealed class TableTerm(FormulaType type, SourceSpan span, Lookup lookup, IReadOnlyList<Term> keys) : Term(type, span)
 {
+    public override Unit? Unit => lookup.Unit;
+
     public override Value Evaluate(Scope scope)
     {
         Span<Value> arguments = new Value[keys.Count];

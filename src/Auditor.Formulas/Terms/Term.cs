@@ -2,6 +2,7 @@ using Auditor.Documents;
 using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Types;
 using Auditor.Formulas.Values;
+using Auditor.Quantities;
 
 namespace Auditor.Formulas.Terms;
 
@@ -15,6 +16,9 @@ public abstract class Term(FormulaType type, SourceSpan span)
 
     /// <summary>Where it stands in the rule file.</summary>
     public SourceSpan Span { get; } = span;
+
+    /// <summary>Unit in which people read it, where it follows from what it is made of; null where it does not.</summary>
+    public virtual Unit? Unit => null;
 
     /// <summary>Its value in a scope. Never throws; what cannot be computed is missing.</summary>
     public abstract Value Evaluate(Scope scope);

@@ -2,6 +2,7 @@ using Auditor.Documents;
 using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Types;
 using Auditor.Formulas.Values;
+using Auditor.Quantities;
 
 namespace Auditor.Formulas.Terms;
 
@@ -10,6 +11,8 @@ namespace Auditor.Formulas.Terms;
 /// </summary>
 internal sealed class WayTerm(FormulaType type, SourceSpan span, Way way, IReadOnlyDictionary<SubjectShape, Term> byShape) : Term(type, span)
 {
+    public override Unit? Unit => byShape.Values.First().Unit;
+
     public override Value Evaluate(Scope scope)
     {
         var subject = scope.Subject.Go(way.Index);

@@ -1,0 +1,31 @@
+using System.CommandLine;
+using Auditor.Cli.Commands;
+
+namespace Auditor.Cli;
+
+/// <summary>The program: takes the command line apart and runs one command.</summary>
+internal static class AuditorProgram
+{
+    /// <summary>Runs a command line.</summary>
+    /// <returns>The exit code.</returns>
+    public static int Run(string[] args, TextWriter output, TextWriter error)
+    {
+        var terminal = new Terminal(output, error);
+        var root = new RootCommand("Audits low-voltage electrical installations against wiring rules kept as data.")
+        {
+            RulesCommand.Make(terminal),
+        };
+        var parsed = root.Parse(args);
+        if (parsed.Errors.Count > 0)
+        {
+            foreach (var fault in parsed.Errors)
+            {
+                error.WriteLine(fault.Message);
+            }
+
+            return ExitCode.Problems;
+        }
+
+        return parsed.Invoke(new InvocationConfiguration { Output = output, Error = error, EnableDefaultExceptionHandler = false });
+    }
+}

@@ -1,0 +1,13 @@
+using System.CommandLine;
+
+namespace Auditor.Cli.Commands;
+
+/// <summary><c>rules</c>: looks into rule sets and checks them.</summary>
+internal static class RulesCommand
+{
+    public static Command Make(Terminal terminal) => new("rules", "Look into the rule set in force, and check and test rule files.")
+    {
+        RulesCheckCommand.Make(terminal),
+        RulesTestCommand.Make(terminal),
+    };
+}

@@ -1,0 +1,21 @@
+using Auditor.Engine.RuleSets;
+using Auditor.Formulas.Subjects;
+using Auditor.Formulas.Values;
+
+namespace Auditor.Engine.Evaluation;
+
+/// <summary>Computes the quantities of a rule set for any subject; each subject keeps its own results.</summary>
+/// <param name="rules">The rule set.</param>
+public sealed class Evaluator(RuleSet rules)
+{
+    private readonly Value[] _parameters = [.. rules.Parameters.Select(parameter => parameter.Value)];
+
+    /// <summary>The rule set.</summary>
+    public RuleSet Rules { get; } = rules;
+
+    /// <summary>Value of a parameter.</summary>
+    public Value Parameter(int slot) => _parameters[slot];
+
+    /// <summary>Computes a quantity in a scope of its subject; what it reads is taken from the subjects.</summary>
+    public Value Compute(SubjectShape shape, int slot, Scope scope) => Rules.Quantity(shape, slot).Formula.Evaluate(scope);
+}

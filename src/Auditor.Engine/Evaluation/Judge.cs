@@ -1,0 +1,76 @@
+using Auditor.Engine.Findings;
+using Auditor.Engine.RuleSets;
+using Auditor.Formulas.Subjects;
+using Auditor.Formulas.Values;
+
+namespace Auditor.Engine.Evaluation;
+
+/// <summary>Decides one rule on one subject. A condition, value or limit that is missing makes the verdict undetermined.</summary>
+public static class Judge
+{
+    private static readonly Judgement NotApplicable = new(null, default, [], null, null, Marks.None);
+
+    /// <summary>Judges a rule.</summary>
+    public static Judgement Decide(Rule rule, Scope scope)
+    {
+        var when = rule.When?.Evaluate(scope) ?? Value.Of(true);
+        if (when.IsFalse)
+        {
+            return NotApplicable;
+        }
+
+        if (when.IsMissing)
+        {
+            return new Judgement(Verdict.Undetermined, when, [], null, when.Absences, when.Marks);
+        }
+
+        var value = rule.Check.Value.Evaluate(scope);
+        var limits = new Value[rule.Check.Limits.Count];
+        var missing = value.IsMissing ? value.Absences : null;
+        var marks = when.Marks | value.Marks;
+        for (var i = 0; i < limits.Length; i++)
+        {
+            limits[i] = rule.Check.Limits[i].Evaluate(scope);
+            marks |= limits[i].Marks;
+            if (limits[i].IsMissing)
+            {
+                missing = missing?.And(limits[i].Absences) ?? limits[i].Absences;
+            }
+        }
+
+        if (missing is not null)
+        {
+            return new Judgement(Verdict.Undetermined, value, limits, null, missing, marks);
+        }
+
+        var (keeps, margin) = Compare(rule.Check.How, value, limits);
+        return new Judgement(keeps ? Verdict.Conforms : Verdict.Nonconforming, value, limits, margin, null, marks);
+    }
+
+    private static (bool Keeps, Margin? Margin) Compare(CheckKind how, in Value value, Value[] limits)
+    {
+        switch (how)
+        {
+            case CheckKind.AtMost:
+                return (Comparison.AtMost(value.Number, limits[0].Number), MarginOf(limits[0].Number - value.Number, limits[0].Number));
+            case CheckKind.AtLeast:
+                return (Comparison.AtLeast(value.Number, limits[0].Number), MarginOf(value.Number - limits[0].Number, limits[0].Number));
+            case CheckKind.Within:
+                var (low, high) = (limits[0].Number, limits[1].Number);
+                var below = MarginOf(value.Number - low, low);
+                var above = MarginOf(high - value.Number, high);
+                return (Comparison.AtLeast(value.Number, low) && Comparison.AtMost(value.Number, high), below.Absolute <= above.Absolute ? below : above);
+            case CheckKind.Equal:
+                return (Same(value, limits[0]), null);
+            case CheckKind.OneOf:
+                var sought = value;
+                return (Array.Exists(limits, limit => Same(sought, limit)), null);
+            default:
+                return (value.Flag, null);
+        }
+    }
+
+    private static bool Same(in Value a, in Value b) => a.Kind == ValueKind.Text ? a.Text == b.Text : Comparison.Same(a.Number, b.Number);
+
+    private static Margin MarginOf(double distance, double limit) => new(distance, limit == 0 ? null : distance / Math.Abs(limit));
+}

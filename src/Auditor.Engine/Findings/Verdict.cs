@@ -1,0 +1,14 @@
+namespace Auditor.Engine.Findings;
+
+/// <summary>What a rule says of a subject.</summary>
+public enum Verdict
+{
+    /// <summary>The requirement or recommendation is kept.</summary>
+    Conforms,
+
+    /// <summary>It is not kept.</summary>
+    Nonconforming,
+
+    /// <summary>Something needed to tell is missing; never counted as kept.</summary>
+    Undetermined,
+}

@@ -1,0 +1,33 @@
+using Auditor.Documents;
+
+namespace Auditor.Engine.Installation;
+
+/// <summary>A design file as read, with everything that it includes.</summary>
+/// <param name="Path">Display path.</param>
+/// <param name="Root">Its root mapping.</param>
+/// <param name="Inputs">The files that were read.</param>
+public sealed record DesignFile(string Path, MappingNode Root, IReadOnlyList<InputFile> Inputs)
+{
+    /// <summary>Reads a design file and its includes; null, with problems added, when it is not a YAML mapping.</summary>
+    /// <param name="fullPath">Path to read.</param>
+    /// <param name="displayPath">Path to show in problems and reports.</param>
+    /// <param name="problems">Receives what is wrong.</param>
+    public static DesignFile? Read(string fullPath, string displayPath, Problems problems)
+    {
+        if (DocumentLoader.Load(fullPath, displayPath, problems) is not { } document)
+        {
+            return null;
+        }
+
+        if (document.Root is MappingNode root)
+        {
+            return new DesignFile(displayPath, root, document.Inputs);
+        }
+
+        problems.Add(DesignMessages.NotMapping(document.Root.Span));
+        return null;
+    }
+
+    /// <summary>The rule set that the design asks for; null where it leaves the choice open.</summary>
+    public ScalarNode? RuleSet => Root.Scalar("rule-set");
+}

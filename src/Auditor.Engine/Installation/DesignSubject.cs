@@ -1,0 +1,107 @@
+using Auditor.Documents;
+using Auditor.Engine.Evaluation;
+using Auditor.Formulas.Subjects;
+using Auditor.Formulas.Values;
+
+namespace Auditor.Engine.Installation;
+
+/// <summary>A subject of a design: its place in the tree, its mapping in the design file, and what has been computed for it.</summary>
+public sealed class DesignSubject : ISubject
+{
+    private readonly Design _design;
+    private readonly Value[] _quantities;
+    private readonly bool[] _known;
+    private readonly bool[] _open;
+    private readonly Value[] _inputs;
+    private readonly bool[] _read;
+
+    internal DesignSubject(Design design, SubjectShape shape, string key, MappingNode node, Evaluator evaluator)
+    {
+        _design = design;
+        Shape = shape;
+        Key = key;
+        Node = node;
+        Evaluator = evaluator;
+        Scope = new Scope(this, null, null);
+        _quantities = new Value[shape.Quantities.Count];
+        _known = new bool[shape.Quantities.Count];
+        _open = new bool[shape.Quantities.Count];
+        _inputs = new Value[shape.Inputs.Count];
+        _read = new bool[shape.Inputs.Count];
+    }
+
+    /// <inheritdoc/>
+    public SubjectShape Shape { get; }
+
+    /// <inheritdoc/>
+    public string Key { get; }
+
+    /// <summary>The mapping that describes it.</summary>
+    public MappingNode Node { get; }
+
+    /// <inheritdoc/>
+    public Scope Scope { get; }
+
+    /// <summary>The subject on the side of the origin; null for the installation.</summary>
+    public DesignSubject? Parent { get; internal set; }
+
+    /// <summary>The board that a circuit feeds, if any.</summary>
+    public DesignSubject? FedBoard { get; internal set; }
+
+    internal Evaluator Evaluator { get; }
+
+    internal DesignSubject Installation => _design.Installation;
+
+    internal List<IReadOnlyList<DesignSubject>> Collections { get; } = [];
+
+    /// <inheritdoc/>
+    public Value Input(int slot)
+    {
+        if (!_read[slot])
+        {
+            _inputs[slot] = _design.ReadInput(this, Shape.Inputs[slot]);
+            _read[slot] = true;
+        }
+
+        return _inputs[slot];
+    }
+
+    /// <inheritdoc/>
+    public Value Quantity(int slot)
+    {
+        if (_known[slot])
+        {
+            return _quantities[slot];
+        }
+
+        if (_open[slot])
+        {
+            return Value.Missing(new Absence(AbsenceKind.NotFinite, Key, Shape.Quantities[slot].Symbol, "the calculation runs in a circle", ""));
+        }
+
+        _open[slot] = true;
+        _quantities[slot] = Evaluator.Compute(Shape, slot, Scope);
+        _known[slot] = true;
+        return _quantities[slot];
+    }
+
+    /// <inheritdoc/>
+    public Value Parameter(int slot) => Evaluator.Parameter(slot);
+
+    /// <inheritdoc/>
+    public ISubject? Go(int way) => way switch
+    {
+        Shapes.Up => Parent,
+        Shapes.Origin => _design.Installation,
+        _ => FedBoard,
+    };
+
+    /// <inheritdoc/>
+    public IReadOnlyList<ISubject> Collection(int index) => Collections[index];
+
+    /// <summary>The mappings of this subject whose <c>type</c> names an entry of <c>types</c>, with the list that it is in.</summary>
+    internal IEnumerable<(MappingNode Holder, string List)> NamedHolders() => _design.NamedHolders(this);
+
+    /// <summary>The scalar in the design file that gives an input, wherever it stands; null when the design does not give it.</summary>
+    public ScalarNode? Source(InputSlot slot) => _design.Find(this, slot) as ScalarNode;
+}

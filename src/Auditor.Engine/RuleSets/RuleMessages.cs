@@ -1,0 +1,52 @@
+using Auditor.Documents;
+using Auditor.Formulas.Types;
+
+namespace Auditor.Engine.RuleSets;
+
+/// <summary>All wordings of the stage that puts a rule set together.</summary>
+internal static class RuleMessages
+{
+    public static Problem UnknownSet(SourceSpan? span, string name, string? nearest, IEnumerable<string> known) => Problem.Error(
+        "unknown-rule-set", $"there is no shipped rule set `{name}`", span,
+        (nearest is null ? "" : $"did you mean `{nearest}`? ") + "shipped sets: " + string.Join(", ", known) + "; or give the path of a set file");
+
+    public static Problem NotMapping(SourceSpan span) => Problem.Error("rule-file-not-mapping", "a rule file holds keys and values", span, null);
+
+    public static Problem UnknownKind(SourceSpan span, string key, IEnumerable<string> known) => Problem.Error(
+        "unknown-rule-file", $"`{key}` does not say what this file is", span, "the first key of a rule file is one of: " + string.Join(", ", known));
+
+    public static Problem OutsideRoot(SourceSpan span, string path) => Problem.Error(
+        "rules-outside-folder", $"`{path}` lies outside the folder of this set", span, "a set uses only files of its own folder; build on others with `extends`");
+
+    public static Problem NoSuchPath(SourceSpan span, string path) => Problem.Error("rules-not-found", $"there is no `{path}`", span, "paths are relative to the folder of the set's rule data");
+
+    public static Problem ExtendsCircle(SourceSpan span, string name) => Problem.Error("extends-in-a-circle", $"set `{name}` extends itself", span, null);
+
+    public static Problem SecondSymbol(SourceSpan span, string symbol, string shape, string other) => Problem.Error(
+        "duplicate-symbol", $"a {shape} has a `{symbol}` already", span, $"it is {other}; choose another symbol");
+
+    public static Problem SecondRule(SourceSpan span, string id, string otherPath) => Problem.Error(
+        "duplicate-rule", $"there is a rule `{id}` already", span, $"it stands in {otherPath}; a house set may replace a rule, a set may not have it twice");
+
+    public static Problem UnitOrGives(SourceSpan span) => Problem.Error(
+        "unit-or-gives", "a quantity has either a `unit` or `gives: text` or `gives: flag`", span, null);
+
+    public static Problem UnknownUnit(SourceSpan span, string unit) => Problem.Error("unknown-unit", $"`{unit}` is not a unit", span, "a pure number has the unit 1");
+
+    public static Problem Circle(SourceSpan span, string loop) => Problem.Error(
+        "formulas-in-a-circle", $"these quantities need one another: {loop}", span, "one of them must be computed from something else");
+
+    public static Problem Compare(SourceSpan span, string how, FormulaType value, FormulaType limit) => Problem.Error(
+        "unit-mismatch", $"`{how}` cannot compare {value} with {limit}", span, "value and limit need the same kind of value and the same unit");
+
+    public static Problem NotOrdered(SourceSpan span, string how, FormulaType value) => Problem.Error(
+        "wrong-type", $"`{how}` compares quantities, and this is {value}", span, "use `equals` or `one-of` for words, `require` for flags");
+
+    public static Problem CompareOnce(SourceSpan span) => Problem.Error(
+        "compare-once", "`compare` has a `value` and exactly one of at-most, at-least, within, equals, one-of", span, null);
+
+    public static Problem OpenBraces(SourceSpan span) => Problem.Error("open-braces", "`{{` is not closed by `}}`", span, "write a formula between double braces");
+
+    public static Problem NameIsNotFile(SourceSpan span, string id, string file) => Problem.Warning(
+        "rule-name", $"rule `{id}` stands in a file called `{file}`", span, $"call the file `{id}.yaml`");
+}

@@ -1,0 +1,56 @@
+using Auditor.Documents;
+using Auditor.Engine.Installation;
+using Auditor.Formulas.Binding;
+using Auditor.Formulas.Subjects;
+
+namespace Auditor.Engine.RuleSets;
+
+/// <summary>A rule set in force: everything that the chain of set files brings together, bound and ready.</summary>
+public sealed class RuleSet
+{
+    private readonly QuantityDefinition[][] _quantities;
+    private readonly Rule[][] _rulesByShape;
+
+    internal RuleSet(RuleSetTitle title, DesignSchema schema, FormulaWorld world, IReadOnlyList<Parameter> parameters,
+        QuantityDefinition[][] quantities, IReadOnlyList<Rule> rules, IReadOnlyList<InputFile> files)
+    {
+        Title = title;
+        Schema = schema;
+        World = world;
+        Parameters = parameters;
+        Rules = rules;
+        Files = files;
+        _quantities = quantities;
+        _rulesByShape = [.. schema.Shapes.All.Select(shape => rules.Where(rule => rule.Shape == shape).ToArray())];
+    }
+
+    /// <summary>Name, edition and notice.</summary>
+    public RuleSetTitle Title { get; }
+
+    /// <summary>What a design may say.</summary>
+    public DesignSchema Schema { get; }
+
+    /// <summary>Tables, curves and parameters.</summary>
+    public FormulaWorld World { get; }
+
+    /// <summary>Parameters, by slot number.</summary>
+    public IReadOnlyList<Parameter> Parameters { get; }
+
+    /// <summary>All rules, by id.</summary>
+    public IReadOnlyList<Rule> Rules { get; }
+
+    /// <summary>The files that it was read from.</summary>
+    public IReadOnlyList<InputFile> Files { get; }
+
+    /// <summary>All quantities, by kind of subject, then by slot number.</summary>
+    public IEnumerable<QuantityDefinition> Quantities => _quantities.SelectMany(list => list);
+
+    /// <summary>The rules of one kind of subject, by id.</summary>
+    public IReadOnlyList<Rule> RulesOf(SubjectShape shape) => _rulesByShape[shape.Index];
+
+    /// <summary>The definition of a quantity.</summary>
+    public QuantityDefinition Quantity(SubjectShape shape, int slot) => _quantities[shape.Index][slot];
+
+    /// <summary>The rule of that id, present or former; null when there is none.</summary>
+    public Rule? Rule(string id) => Rules.FirstOrDefault(rule => rule.Id == id) ?? Rules.FirstOrDefault(rule => rule.Formerly.Contains(id));
+}

@@ -20,7 +20,7 @@ public static class Golden
     public static void Match(string text, string path, string extension = "txt")
     {
         var full = Repository.PathOf(path);
-        Approvals.Verify(new ApprovalTextWriter(text, extension), new Namer(full), QuietReporter.Instance);
+        Approvals.Verify(new PlainWriter(text, extension), new Namer(full), QuietReporter.Instance);
     }
 
     /// <summary>
@@ -49,6 +49,20 @@ public static class Golden
         public string SourcePath { get; } = Path.GetDirectoryName(path)!;
 
         public string Name { get; } = Path.GetFileName(path);
+    }
+
+    /// <summary>Writes the text as it is: no byte order mark, no change of line breaks.</summary>
+    private sealed class PlainWriter(string text, string extension) : IApprovalWriter
+    {
+        public string GetApprovalFilename(string basename) => basename + Approved + extension;
+
+        public string GetReceivedFilename(string basename) => basename + Received + extension;
+
+        public string WriteReceivedFile(string received)
+        {
+            File.WriteAllText(received, text);
+            return received;
+        }
     }
 
     /// <summary>Opens no viewer: the failure of the test says which files to compare.</summary>

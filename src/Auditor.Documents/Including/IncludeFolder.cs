@@ -57,7 +57,7 @@ internal sealed class IncludeFolder
     /// <summary>The path to show for a file in the folder.</summary>
     public string DisplayPathOf(string file) => _displayRoot + Path.GetRelativePath(_root, file).Replace('\\', '/');
 
-    private bool IsInside(string file) => file.StartsWith(_root.TrimEnd(Path.DirectorySeparatorChar) + Path.DirectorySeparatorChar, StringComparison.Ordinal);
+    private bool IsInside(string path) => path == _root || path.StartsWith(_root.TrimEnd(Path.DirectorySeparatorChar) + Path.DirectorySeparatorChar, StringComparison.Ordinal);
 
     /// <summary>Follows every link on the way to a file; null when the links never end or one cannot be followed.</summary>
     private static string? RealPath(string path)

@@ -11,7 +11,8 @@ internal static class ScalarTags
 
     private static readonly SearchValues<char> EndOfProperty = SearchValues.Create(" \t\r\n,]}");
 
-    public static ScalarNode Resolve(Scalar scalar, SourceSpan span, Problems problems)
+    /// <summary>Makes the node of a scalar; null when its tag does not fit it.</summary>
+    public static ScalarNode? Resolve(Scalar scalar, SourceSpan span, Problems problems)
     {
         if (scalar.Style == ScalarStyle.DoubleQuoted && ForbiddenCharacters.FirstIn(scalar.Value) is var at and >= 0)
         {
@@ -31,14 +32,19 @@ internal static class ScalarTags
         {
             problems.Add(ReadingProblems.ForeignTag(PropertiesOf(span)));
         }
-        else if (kind != ScalarKind.Text && kind != plain)
+
+        if (kind is null or ScalarKind.Text)
         {
-            problems.Add(ReadingProblems.TagDoesNotFit(PropertiesOf(span)));
+            return new ScalarNode(span, scalar.Value, ScalarKind.Text);
         }
 
-        return kind is null or ScalarKind.Text || kind != plain
-            ? new ScalarNode(span, scalar.Value, ScalarKind.Text)
-            : new ScalarNode(span, scalar.Value, plain, number);
+        if (kind == plain)
+        {
+            return new ScalarNode(span, scalar.Value, plain, number);
+        }
+
+        problems.Add(ReadingProblems.TagDoesNotFit(PropertiesOf(span)));
+        return null;
     }
 
     public static void CheckCollection(NodeEvent start, SourceSpan span, Problems problems)
@@ -62,8 +68,8 @@ internal static class ScalarTags
     public static SourceSpan PropertiesOf(SourceSpan value)
     {
         var rest = value.Source.Text.AsSpan(value.Start);
-        var length = rest.IndexOfAny(EndOfProperty);
-        return value with { End = value.Start + (length < 0 ? rest.Length : Math.Max(1, length)) };
+        var length = rest.StartsWith("!<") ? rest.IndexOf('>') + 1 : rest.IndexOfAny(EndOfProperty);
+        return value with { End = value.Start + (length < 0 ? rest.Length : Math.Max(Math.Min(1, rest.Length), length)) };
     }
 
     /// <summary>How much of a value as written is taken by anchors and tags before its content.</summary>

@@ -7,7 +7,7 @@ public static class NearestWord
 
     /// <summary>
     /// Returns the allowed word nearest to a wrong one, or null when none is near enough: at most one slip for every three
-    /// letters, and at least one. Letter case counts for nothing; of words equally near, the first is taken.
+    /// letters. Letter case counts for nothing; of words equally near, the first is taken.
     /// </summary>
     /// <param name="word">The word as written.</param>
     /// <param name="allowed">The words that would have been right.</param>
@@ -19,7 +19,7 @@ public static class NearestWord
         }
 
         string? nearest = null;
-        var fewest = Math.Max(1, word.Length / 3) + 1;
+        var fewest = (word.Length / 3) + 1;
         foreach (var candidate in allowed.Where(candidate => candidate.Length <= LongestWord))
         {
             var slips = Slips(word.ToLowerInvariant(), candidate.ToLowerInvariant());

@@ -29,7 +29,8 @@ internal static class ExpectedValue
     {
         JTokenType.Object => "a mapping of keys",
         JTokenType.Array => "a list",
-        JTokenType.Integer or JTokenType.Float => "a number",
+        JTokenType.Integer => "a number",
+        JTokenType.Float => double.IsInteger(token.Value<double>()) ? "a number" : "a number with decimals",
         JTokenType.Boolean => "a `true` or `false`",
         JTokenType.Null => "nothing",
         _ => "a text",
@@ -46,7 +47,7 @@ internal static class ExpectedValue
         var schema = property.ActualSchema;
         var text = KindOf(schema) is { } kind
             ? $"add `{key}`, for example `{key}: {kind.Example}`"
-            : schema.Enumeration.Count > 0 ? $"add `{key}` with one of: {List(Words(schema))}" : $"add `{key}`";
+            : schema.Enumeration.Count > 0 ? $"add `{key}` with {(schema.Enumeration.Count == 1 ? "the value" : "one of:")} {List(Words(schema))}" : $"add `{key}`";
         return (property.Description ?? schema.Description) is { } description ? $"{text} ({Sentence(description)})" : text;
     }
 
@@ -64,7 +65,7 @@ internal static class ExpectedValue
     {
         var end = description.IndexOf(". ", StringComparison.Ordinal);
         var first = (end < 0 ? description : description[..end]).TrimEnd('.', ' ');
-        return first.Length > 1 && char.IsLower(first[1]) ? char.ToLowerInvariant(first[0]) + first[1..] : first;
+        return first.Length > 1 && (char.IsLower(first[1]) || first[1] == ' ') ? char.ToLowerInvariant(first[0]) + first[1..] : first;
     }
 
     private static IEnumerable<string> Parts(JsonSchema written, int depth)
@@ -77,7 +78,7 @@ internal static class ExpectedValue
 
         if (schema.Enumeration.Count > 0)
         {
-            return [$"one of the words {List(Words(schema))}"];
+            return [schema.Enumeration.Count == 1 ? $"`{Words(schema)[0]}`" : $"one of the words {List(Words(schema))}"];
         }
 
         var choices = schema.OneOf.Concat(schema.AnyOf).ToList();

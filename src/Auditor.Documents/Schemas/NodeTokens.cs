@@ -5,8 +5,7 @@ namespace Auditor.Documents;
 /// <summary>Gives a tree the form that the schema validator takes, each token keeping the node that it was made from.</summary>
 internal static class NodeTokens
 {
-    /// <summary>Whole numbers up to this size are exact in a double.</summary>
-    private const double ExactWhole = 9007199254740992;
+    private const double LargestWhole = 9e18;
 
     public static JToken From(Node node)
     {
@@ -26,8 +25,13 @@ internal static class NodeTokens
     /// <summary>Returns the node that a token was made from.</summary>
     public static Node NodeOf(JToken token) => token.Annotation<Node>() ?? throw new ArgumentException("the token was made from no node", nameof(token));
 
-    private static JValue Number(double number)
-        => Math.Abs(number) <= ExactWhole && double.IsInteger(number) ? new JValue((long)number) : new JValue(number);
+    /// <summary>
+    /// By the standard a number is whole by its value, however it is written and however large it is. Whole numbers too large for the
+    /// validator become the largest that it takes; no limit of a schema lies beyond.
+    /// </summary>
+    private static JValue Number(double number) => double.IsInteger(number)
+        ? new JValue((long)Math.Clamp(number, -LargestWhole, LargestWhole))
+        : new JValue(number);
 
     /// <summary>
     /// An array that does not look for the index of an item when the path of the item is asked for. The validator asks for the path

@@ -5,8 +5,8 @@ using NJsonSchema.Validation;
 namespace Auditor.Documents;
 
 /// <summary>
-/// The schema validator with what the project adds to it and what the standard asks beyond it: quantities, words told apart from
-/// numbers and flags of the same spelling, and no missing keys where keys could merely not be read.
+/// The schema validator with what the project adds to it and what the standard asks beyond it: quantities, dates in one form only,
+/// and words told apart from numbers and flags of the same spelling.
 /// </summary>
 /// <param name="ruleOf">Returns the quantity rule of a schema, or null.</param>
 internal sealed class NodeValidator(Func<JsonSchema, QuantityRule?> ruleOf) : JsonSchemaValidator
@@ -32,15 +32,18 @@ internal sealed class NodeValidator(Func<JsonSchema, QuantityRule?> ruleOf) : Js
             return [new ValidationError(ValidationErrorKind.NotInEnumeration, propertyName, propertyPath, token, schema)];
         }
 
-        return errors.Count == 0 ? errors : [.. errors.Where(error => !ReferenceEquals(error.Token, token) || !IsMoot(error.Kind, token))];
+        if (schema.Format == "date" && token.Type == JTokenType.String && !IsDate(token.Value<string>()!))
+        {
+            errors = [.. errors, new ValidationError(ValidationErrorKind.DateExpected, propertyName, propertyPath, token, schema)];
+        }
+
+        // By the standard, required keys are asked of mappings only.
+        return errors.Count == 0 || token is JObject
+            ? errors
+            : [.. errors.Where(error => error.Kind != ValidationErrorKind.PropertyRequired || !ReferenceEquals(error.Token, token))];
     }
 
-    private static bool IsMoot(ValidationErrorKind kind, JToken token) => kind switch
-    {
-        ValidationErrorKind.PropertyRequired => token is not JObject || NodeTokens.NodeOf(token).IsPartial,
-        ValidationErrorKind.TooFewProperties or ValidationErrorKind.TooFewItems => NodeTokens.NodeOf(token).IsPartial,
-        _ => false,
-    };
+    private static bool IsDate(string text) => DateOnly.TryParseExact(text, "yyyy-MM-dd", out _);
 
     private static bool IsListed(JToken token, JsonSchema schema) => schema.Enumeration.Count == 0 || schema.Enumeration.Any(word => (word, token.Type) switch
     {

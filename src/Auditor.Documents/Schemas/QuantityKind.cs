@@ -31,7 +31,7 @@ public sealed record QuantityKind(string Name, string Noun, Dimension Dimension,
         new("resistance-per-length", "a resistance per length", Dimension.ResistancePerLength, "7.41 mΩ/m"),
     ];
 
-    /// <summary>The units to name to people, the most usual first.</summary>
+    /// <summary>The units to name to people.</summary>
     public IReadOnlyList<string> AcceptedUnits => UnitSymbols.Count > 0 ? UnitSymbols : [.. UnitCatalog.Of(Dimension).Select(unit => unit.Symbol)];
 
     /// <summary>Returns the kind of a name, or null when there is none.</summary>

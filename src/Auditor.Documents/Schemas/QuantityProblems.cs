@@ -6,7 +6,12 @@ namespace Auditor.Documents;
 internal static class QuantityProblems
 {
     public static Problem Unreadable(QuantityKind kind, ScalarNode scalar, QuantityFault fault)
-        => Problem.Error("unreadable-quantity", $"{kind.Noun} is due here, but {fault.Message}", scalar.SpanOf(fault.Start, fault.Length), fault.Help);
+    {
+        var isNoUnit = fault.Message.EndsWith("is not a unit", StringComparison.Ordinal);
+        var hasGuess = fault.Help.StartsWith("did you mean", StringComparison.Ordinal);
+        return Problem.Error("unreadable-quantity", $"{kind.Noun} is due here, but {fault.Message}", scalar.SpanOf(fault.Start, fault.Length),
+            isNoUnit ? $"{(hasGuess ? fault.Help : $"write for example `{kind.Example}`")}; {Accepted(kind)}" : fault.Help);
+    }
 
     public static Problem NeedsUnit(QuantityKind kind, ScalarNode scalar)
         => Problem.Error("unit-missing", $"{kind.Noun} needs its unit", scalar.Span, $"write for example `{kind.Example}`; {Accepted(kind)}");

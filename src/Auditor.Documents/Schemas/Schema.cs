@@ -48,7 +48,7 @@ public sealed class Schema
     /// </param>
     public void Validate(Node root, Problems problems)
     {
-        foreach (var error in _validator.Validate(NodeTokens.From(root), _schema).SelectMany(ErrorUnfolding.Unfold))
+        foreach (var error in ErrorUnfolding.Unfold(_validator.Validate(NodeTokens.From(root), _schema)))
         {
             problems.Add(SchemaProblems.Word(error));
         }

@@ -26,6 +26,11 @@ internal static class SchemaKeywords
             throw Fault(keywords, $"the keyword `{unsupported}` is not supported");
         }
 
+        if (keywords["format"] is JValue format && format.Value as string != "date")
+        {
+            throw Fault(keywords, "`format` knows `date` only");
+        }
+
         if (keywords["enum"] is JArray words && words.Any(word => word is JContainer))
         {
             throw Fault(keywords, "`enum` lists single values only");

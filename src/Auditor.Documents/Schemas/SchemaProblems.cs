@@ -31,19 +31,22 @@ internal static class SchemaProblems
 
     private static Problem UnknownKey(JProperty property, JsonSchema schema)
     {
-        var mapping = (JObject)property.Parent!;
-        var allowed = schema.Properties.Keys.ToList();
-        var nearest = NearestWord.Find(property.Name, allowed.Where(key => !mapping.ContainsKey(key)));
-        return Problem.Error("unknown-key", $"{ProblemText.Quote(property.Name)} is not a key of {SchemaPlaces.NameOf(mapping)}", SchemaPlaces.SpanOf(property),
-            Suggest(nearest, "allowed keys", allowed));
+        var allowed = schema.Properties.Keys.Concat(schema.PatternProperties.Keys.Select(pattern => $"any like `{pattern}`")).ToList();
+        var suggestion = Suggest(KeySuggestion.For(property, schema), "allowed keys", allowed);
+        var isCutOff = property.Value.Type == JTokenType.Null && NodeTokens.NodeOf(property.Value).Span.Length == 0 && property.Previous is not null;
+        return Problem.Error("unknown-key", $"{ProblemText.Quote(property.Name)} is not a key of {SchemaPlaces.NameOf(property.Parent!)}", SchemaPlaces.SpanOf(property),
+            isCutOff ? $"if it belongs to the value before it, put quotes around that: inside braces a comma ends a value. {Capital(suggestion)}" : suggestion);
     }
 
     private static Problem UnknownWord(ValidationError error)
     {
         var written = ((ScalarNode)NodeTokens.NodeOf(error.Token!)).Text;
         var words = ExpectedValue.Words(error.Schema);
-        var what = error.Schema.Title is { Length: > 0 } title ? $"{Article(title)} {title}" : $"a word for {SchemaPlaces.NameOf(error.Token!)}";
-        return Make("unknown-word", $"{ProblemText.Quote(written)} is not {what}", error, Suggest(NearestWord.Find(written, words), "allowed", words));
+        var what = error.Schema.Title is { Length: > 0 } title ? WithArticle(ExpectedValue.Sentence(title)) : $"a word for {SchemaPlaces.NameOf(error.Token!)}";
+        var help = words.Contains(written, StringComparer.Ordinal)
+            ? error.Token!.Type == JTokenType.String ? "write it without quotes" : "put quotes around it"
+            : Suggest(NearestWord.Find(written, words), "allowed", words);
+        return Make("unknown-word", $"{ProblemText.Quote(written)} is not {what}", error, help);
     }
 
     private static Problem WrongType(ValidationError error)
@@ -123,7 +126,7 @@ internal static class SchemaProblems
             ValidationErrorKind.TooManyItems or ValidationErrorKind.TooManyItemsInTuple => ("too-many", $"{name} must have at most {Count(schema.MaxItems, "item")}"),
             ValidationErrorKind.TooFewProperties => ("too-few", $"{name} must have at least {Count(schema.MinProperties, "key")}"),
             ValidationErrorKind.TooManyProperties => ("too-many", $"{name} must have at most {Count(schema.MaxProperties, "key")}"),
-            _ => ("wrong-form", $"{name} does not have the form `{schema.Format}`"),
+            _ => ("wrong-form", $"{name} does not fit the schema"),
         };
         return Make(code, message, error, error.Kind == ValidationErrorKind.PatternMismatch ? ToMatch(schema) : Describe(schema));
     }
@@ -139,8 +142,8 @@ internal static class SchemaProblems
 
     private static string Suggest(string? nearest, string label, IReadOnlyList<string> allowed)
     {
-        var list = allowed.Count == 0 ? "nothing can be said here" : $"{label}: {ExpectedValue.List(allowed)}";
-        return nearest is null ? list : $"did you mean `{nearest}`? {char.ToUpperInvariant(list[0])}{list[1..]}";
+        var list = allowed.Count == 0 ? "no key can be said here" : $"{label}: {ExpectedValue.List(allowed)}";
+        return nearest is null ? list : $"did you mean `{nearest}`? {Capital(list)}";
     }
 
     private static string? Describe(JsonSchema schema) => schema.Description is { Length: > 0 } description ? ExpectedValue.Sentence(description) : null;
@@ -149,7 +152,9 @@ internal static class SchemaProblems
 
     private static string Count(int? count, string noun) => count == 1 ? $"1 {noun}" : $"{count} {noun}s";
 
-    private static string Article(string noun) => "aeiou".Contains(char.ToLowerInvariant(noun[0])) ? "an" : "a";
+    private static string Capital(string text) => char.ToUpperInvariant(text[0]) + text[1..];
+
+    private static string WithArticle(string noun) => $"{("aeiou".Contains(char.ToLowerInvariant(noun[0])) ? "an" : "a")} {noun}";
 
     private static Problem Make(string code, string message, ValidationError error, string? help)
         => Problem.Error(code, message, SchemaPlaces.SpanOf(error.Token!), help);

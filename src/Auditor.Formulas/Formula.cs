@@ -29,6 +29,6 @@ public sealed record Formula(ScalarNode Source, Term Root, IReadOnlyList<Referen
     private static Unit? Coherent(Dimension dimension)
     {
         var units = UnitCatalog.Of(dimension);
-        return units.FirstOrDefault(unit => unit.Scale == 1) ?? units.FirstOrDefault() ?? UnitCatalog.Find(dimension.ToString());
+        return units.Count > 0 ? units[0] : UnitCatalog.Find(dimension.ToString());
     }
 }

@@ -50,6 +50,9 @@ public sealed class DesignSubject : ISubject
 
     internal Evaluator Evaluator { get; }
 
+    /// <summary>The legs of a circuit's cable run; empty for any other subject.</summary>
+    public IReadOnlyList<DesignSubject> Legs => Shape.Collection("legs") is { } legs ? Collections[legs.Index] : [];
+
     internal DesignSubject Installation => _design.Installation;
 
     internal List<IReadOnlyList<DesignSubject>> Collections { get; } = [];

@@ -95,7 +95,7 @@ internal sealed class SchemaInputs(JsonElement root, SubjectShape shape, List<In
     {
         if (schema.TryGetProperty("quantity", out var quantity) && QuantityKind.Find(quantity.GetString()!) is { } kind)
         {
-            return QuantityText.TryParse(kind.Example, out var example, out _) ? (FormulaType.Of(kind.Dimension), example!.Unit) : null;
+            return (FormulaType.Of(kind.Dimension), ShownIn(schema) ?? UsualUnit(kind));
         }
 
         var word = type.ValueKind == JsonValueKind.Array ? type.EnumerateArray().First().GetString() : type.GetString();
@@ -108,6 +108,13 @@ internal sealed class SchemaInputs(JsonElement root, SubjectShape shape, List<In
             _ => null,
         };
     }
+
+    /// <summary>The unit that the schema asks to show the input in, where the usual one of its kind would read badly (30 mA).</summary>
+    private static Unit? ShownIn(JsonElement schema) =>
+        schema.TryGetProperty("shown-in", out var unit) ? UnitCatalog.Find(unit.GetString()!) : null;
+
+    private static Unit UsualUnit(QuantityKind kind) =>
+        QuantityText.TryParse(kind.Example, out var example, out _) ? example.Unit : UnitCatalog.Of(kind.Dimension)[0];
 
     private FormulaType? ListType(JsonElement schema)
     {

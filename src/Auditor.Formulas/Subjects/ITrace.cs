@@ -2,6 +2,7 @@ using Auditor.Documents;
 using Auditor.Formulas.Curves;
 using Auditor.Formulas.Tables;
 using Auditor.Formulas.Values;
+using Auditor.Quantities;
 
 namespace Auditor.Formulas.Subjects;
 
@@ -21,8 +22,8 @@ public interface ITrace
     void Read(SourceSpan term, Lookup lookup, IReadOnlyList<TableCell> cells, in Value value);
 
     /// <summary>A curve was read.</summary>
-    void Read(SourceSpan term, Curve curve, string reading, in Value value);
+    void Read(SourceSpan term, Curve curve, string reading, in Value value, Unit unit);
 
     /// <summary>A way led nowhere, or a call gave its value as a whole.</summary>
-    void Whole(SourceSpan term, in Value value);
+    void Whole(SourceSpan term, in Value value, Unit? unit);
 }

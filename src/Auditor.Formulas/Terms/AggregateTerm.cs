@@ -20,7 +20,7 @@ internal sealed class AggregateTerm(
     {
         var items = scope.Subject.Collection(collection.Index);
         var value = how is Aggregate.All or Aggregate.Any ? Judge(scope, items) : Gather(scope, items);
-        scope.Trace?.Whole(Span, value);
+        scope.Trace?.Whole(Span, value, Unit);
         return value;
     }
 

@@ -3,6 +3,7 @@ using Auditor.Formulas.Curves;
 using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Types;
 using Auditor.Formulas.Values;
+using Auditor.Quantities;
 
 namespace Auditor.Formulas.Terms;
 
@@ -11,6 +12,8 @@ namespace Auditor.Formulas.Terms;
 /// </summary>
 internal sealed class CurveTerm(FormulaType type, SourceSpan span, CurveSet curves, bool givesCurrent, IReadOnlyList<Term> arguments) : Term(type, span)
 {
+    public override Unit? Unit { get; } = UnitCatalog.Of(type.Dimension)[0];
+
     public override Value Evaluate(Scope scope)
     {
         var standard = arguments[0].Evaluate(scope);
@@ -31,7 +34,7 @@ internal sealed class CurveTerm(FormulaType type, SourceSpan span, CurveSet curv
         }
 
         var value = (givesCurrent ? curve.TripCurrent(rating.Number, given.Number) : curve.TripTime(rating.Number, given.Number)).With(marks);
-        scope.Trace?.Read(Span, curve, givesCurrent ? "current for a time" : "time for a current", value);
+        scope.Trace?.Read(Span, curve, givesCurrent ? "current for a time" : "time for a current", value, Unit!);
         return value;
     }
 

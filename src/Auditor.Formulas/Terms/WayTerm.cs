@@ -19,7 +19,7 @@ internal sealed class WayTerm(FormulaType type, SourceSpan span, Way way, IReadO
         if (subject is null)
         {
             var missing = Value.Missing(new Absence(AbsenceKind.Subject, scope.Subject.Key, way.Name, way.WhenNone, ""));
-            scope.Trace?.Whole(Span, missing);
+            scope.Trace?.Whole(Span, missing, null);
             return missing;
         }
 

@@ -1,0 +1,23 @@
+using Auditor.Engine.Installation;
+using Auditor.Engine.RuleSets;
+
+namespace Auditor.Engine.Findings;
+
+/// <summary>Everything that one audit found.</summary>
+/// <param name="Design">The design.</param>
+/// <param name="Rules">The rule set.</param>
+/// <param name="Findings">All findings: subjects in the order of the design, then rules by id.</param>
+/// <param name="NotApplied">Rules that applied to no subject, by id.</param>
+public sealed record AuditResult(Design Design, RuleSet Rules, IReadOnlyList<Finding> Findings, IReadOnlyList<Rule> NotApplied)
+{
+    /// <summary>How many findings have a verdict.</summary>
+    public int Count(Verdict verdict) => Findings.Count(finding => finding.Verdict == verdict);
+
+    /// <summary>The finding of that key, present or former rule id; null when there is none.</summary>
+    public Finding? Find(string key)
+    {
+        var colon = key.IndexOf(':');
+        var rule = colon > 0 ? Rules.Rule(key[..colon]) : null;
+        return rule is null ? null : Findings.FirstOrDefault(finding => finding.Rule == rule && finding.Subject.Key == key[(colon + 1)..]);
+    }
+}

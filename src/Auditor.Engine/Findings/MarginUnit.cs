@@ -1,0 +1,11 @@
+using Auditor.Quantities;
+
+namespace Auditor.Engine.Findings;
+
+/// <summary>The unit of a distance: that of the value, but for temperatures, whose distance is in kelvin.</summary>
+internal static class MarginUnit
+{
+    private static readonly Unit Kelvin = UnitCatalog.Find("K")!;
+
+    public static Unit Of(Unit unit) => unit.Dimension.IsTemperature ? Kelvin : unit;
+}

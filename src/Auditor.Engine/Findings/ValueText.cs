@@ -1,0 +1,28 @@
+using Auditor.Formulas.Values;
+using Auditor.Quantities;
+
+namespace Auditor.Engine.Findings;
+
+/// <summary>The one way in which values are shown to people.</summary>
+public static class ValueText
+{
+    /// <summary>What stands for a value that is missing.</summary>
+    public const string Unknown = "not known";
+
+    /// <summary>A value with its unit.</summary>
+    public static string Show(in Value value, Unit? unit) => value.Kind switch
+    {
+        ValueKind.Missing => Unknown,
+        ValueKind.Quantity => ShowNumber(value.Number, unit!),
+        ValueKind.Flag => value.Flag ? "yes" : "no",
+        ValueKind.Words => string.Join(", ", value.Words),
+        _ => value.Text,
+    };
+
+    /// <summary>A relative margin, as a percentage with its sign.</summary>
+    public static string ShowMargin(double relative) => $"{(relative > 0 ? "+" : "")}{Math.Round(relative * 100, 1, MidpointRounding.AwayFromZero):0.0} %";
+
+    /// <summary>A number with its unit; a pure number stands alone.</summary>
+    public static string ShowNumber(double number, Unit unit) =>
+        unit.Equals(Unit.One) ? QuantityText.ShowNumber(number, unit) : QuantityText.Show(number, unit);
+}

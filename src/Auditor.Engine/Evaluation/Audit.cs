@@ -1,3 +1,5 @@
+using Auditor.Documents;
+using Auditor.Engine.Departures;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Installation;
 using Auditor.Engine.RuleSets;
@@ -8,7 +10,10 @@ namespace Auditor.Engine.Evaluation;
 public static class Audit
 {
     /// <summary>Runs the audit.</summary>
-    public static AuditResult Run(Design design)
+    /// <param name="design">The design.</param>
+    /// <param name="asOf">The day on which departures are judged to be in force.</param>
+    /// <param name="problems">Receives departures that cannot be read.</param>
+    public static AuditResult Run(Design design, DateOnly asOf, Problems problems)
     {
         var rules = design.Evaluator.Rules;
         var findings = new List<Finding>();
@@ -26,6 +31,31 @@ public static class Audit
             }
         }
 
-        return new AuditResult(design, rules, findings, [.. rules.Rules.Where(rule => !applied.Contains(rule))]);
+        var departures = Depart(design, findings, asOf, problems);
+        return new AuditResult(
+            design, rules, findings, departures, departures.Count > 0 ? asOf : null, [.. rules.Rules.Where(rule => !applied.Contains(rule))]);
+    }
+
+    private static IReadOnlyList<Departure> Depart(Design design, List<Finding> findings, DateOnly asOf, Problems problems)
+    {
+        if (!design.File.Root.Mappings("departures").Any())
+        {
+            return [];
+        }
+
+        var reader = new DepartureReader(design.Evaluator.Rules, asOf, problems);
+        var departures = reader.Read(design.File, findings.ToDictionary(finding => finding.Key));
+        var inForce = departures.Where(departure => departure.State == DepartureState.InForce)
+            .DistinctBy(departure => reader.KeyOf(departure.Rule, departure.Subject))
+            .ToDictionary(departure => reader.KeyOf(departure.Rule, departure.Subject)!);
+        for (var i = 0; i < findings.Count; i++)
+        {
+            if (inForce.TryGetValue(findings[i].Key, out var departure))
+            {
+                findings[i] = new Finding(findings[i].Rule, findings[i].Subject, findings[i].Judgement, departure);
+            }
+        }
+
+        return departures;
     }
 }

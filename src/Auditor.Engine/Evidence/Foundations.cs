@@ -30,7 +30,7 @@ public sealed class Foundations(AuditResult result)
             Collect(formula, finding.Subject, found);
         }
 
-        return [.. found.OrderBy(item => item.Kind).ThenBy(item => item.Name, StringComparer.Ordinal)];
+        return [.. found.OrderBy(item => item.Kind).ThenBy(item => item.Subject, StringComparer.Ordinal).ThenBy(item => item.Name, StringComparer.Ordinal)];
     }
 
     private void Collect(Formula formula, ISubject subject, HashSet<Foundation> found)
@@ -52,21 +52,21 @@ public sealed class Foundations(AuditResult result)
         else if (reading is { Input: { } input, Subject: DesignSubject holder } && reading.Value.Marks.HasFlag(Marks.Assumed))
         {
             var source = holder.Source(input)!;
-            found.Add(new Foundation(FoundationKind.AssumedInput, $"{holder.Key} {input.Path}", source.Text, source.Span.ToString()));
+            found.Add(new Foundation(FoundationKind.AssumedInput, holder.Key, input.Path, source.Text, source.Span));
         }
         else if (reading.Parameter is { } slot && reading.Value.Marks != Marks.None)
         {
             var parameter = result.Rules.Parameters[slot.Index];
-            found.Add(new Foundation(FoundationKind.FigureFromMemory, "param." + slot.Name, parameter.Text, parameter.Span.ToString()));
+            found.Add(new Foundation(FoundationKind.FigureFromMemory, null, "param." + slot.Name, parameter.Text, parameter.Span));
         }
         else if (reading.Curve is { } curve && reading.Value.Marks != Marks.None)
         {
-            found.Add(new Foundation(FoundationKind.FigureFromMemory, curve.Source.Title, "", curve.Source.Path));
+            found.Add(new Foundation(FoundationKind.FigureFromMemory, null, curve.Source.Title, "", null));
         }
 
         foreach (var cell in reading.Cells.Where(cell => cell.Trust.Mark() != Marks.None))
         {
-            found.Add(new Foundation(FoundationKind.FigureFromMemory, cell.Table.Title, "", cell.Table.Path));
+            found.Add(new Foundation(FoundationKind.FigureFromMemory, null, cell.Table.Title, "", null));
         }
     }
 

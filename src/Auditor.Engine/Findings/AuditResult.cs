@@ -1,3 +1,4 @@
+using Auditor.Engine.Departures;
 using Auditor.Engine.Installation;
 using Auditor.Engine.RuleSets;
 
@@ -7,8 +8,12 @@ namespace Auditor.Engine.Findings;
 /// <param name="Design">The design.</param>
 /// <param name="Rules">The rule set.</param>
 /// <param name="Findings">All findings: subjects in the order of the design, then rules by id.</param>
+/// <param name="Departures">The departures that the design records, in its order.</param>
+/// <param name="AsOf">The day of the audit; null where it made no difference.</param>
 /// <param name="NotApplied">Rules that applied to no subject, by id.</param>
-public sealed record AuditResult(Design Design, RuleSet Rules, IReadOnlyList<Finding> Findings, IReadOnlyList<Rule> NotApplied)
+public sealed record AuditResult(
+    Design Design, RuleSet Rules, IReadOnlyList<Finding> Findings, IReadOnlyList<Departure> Departures, DateOnly? AsOf,
+    IReadOnlyList<Rule> NotApplied)
 {
     /// <summary>How many findings have a verdict.</summary>
     public int Count(Verdict verdict) => Findings.Count(finding => finding.Verdict == verdict);

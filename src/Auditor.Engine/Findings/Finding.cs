@@ -1,4 +1,5 @@
 using Auditor.Documents;
+using Auditor.Engine.Departures;
 using Auditor.Engine.Installation;
 using Auditor.Engine.RuleSets;
 using Auditor.Formulas.Values;
@@ -10,12 +11,13 @@ public sealed class Finding
 {
     private string? _message;
 
-    internal Finding(Rule rule, DesignSubject subject, Judgement judgement)
+    internal Finding(Rule rule, DesignSubject subject, Judgement judgement, Departure? departure = null)
     {
         Rule = rule;
         Subject = subject;
         Judgement = judgement;
-        Verdict = judgement.Verdict!.Value;
+        Departure = departure;
+        Verdict = departure is null ? judgement.Verdict!.Value : Verdict.Departed;
     }
 
     /// <summary>The rule.</summary>
@@ -26,6 +28,9 @@ public sealed class Finding
 
     /// <summary>Value, limits, margin and what is missing.</summary>
     public Judgement Judgement { get; }
+
+    /// <summary>The departure in force that accepts it; null for none.</summary>
+    public Departure? Departure { get; }
 
     /// <summary>The verdict.</summary>
     public Verdict Verdict { get; }

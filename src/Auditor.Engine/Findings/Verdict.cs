@@ -9,6 +9,9 @@ public enum Verdict
     /// <summary>It is not kept.</summary>
     Nonconforming,
 
+    /// <summary>It is not kept, and a departure in force accepts that.</summary>
+    Departed,
+
     /// <summary>Something needed to tell is missing; never counted as kept.</summary>
     Undetermined,
 }

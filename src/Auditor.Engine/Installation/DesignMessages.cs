@@ -29,6 +29,9 @@ internal static class DesignMessages
     public static Problem UnknownType(SourceSpan span, string name, string list, string? nearest) => Problem.Error(
         "unknown-type", $"`types.{list}` has no `{name}`", span, nearest is null ? $"add it under `types.{list}`" : $"did you mean `{nearest}`?");
 
+    public static Problem NoDate(SourceSpan span, string text) => Problem.Error(
+        "not-a-date", $"`{text}` is not a day of the calendar", span, "write year, month and day as 2026-09-14");
+
     public static Problem CableAndLegs(SourceSpan span, SourceSpan legs) => Problem.Error(
         "cable-and-legs", "a circuit has either `cable` or `legs`", span, "keep the one that describes the run", new ProblemLabel(legs, "and here are the legs"));
 }

@@ -13,7 +13,9 @@ internal static class AuditorProgram
         var terminal = new Terminal(output, error);
         var root = new RootCommand("Audits low-voltage electrical installations against wiring rules kept as data.")
         {
+            EvidenceCommand.Make(terminal),
             RulesCommand.Make(terminal),
+            SchemaCommand.Make(terminal),
         };
         var parsed = root.Parse(args);
         if (parsed.Errors.Count > 0)

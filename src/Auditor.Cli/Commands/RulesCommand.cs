@@ -7,6 +7,8 @@ internal static class RulesCommand
 {
     public static Command Make(Terminal terminal) => new("rules", "Look into the rule set in force, and check and test rule files.")
     {
+        RulesListCommand.Make(terminal),
+        RulesShowCommand.Make(terminal),
         RulesCheckCommand.Make(terminal),
         RulesTestCommand.Make(terminal),
     };

@@ -65,7 +65,14 @@ internal sealed class SetChain(RuleHome home, RuleFileReader reader, Problems pr
             return File.Exists(shipped) ? (shipped, $"{home.Display}/sets/{name}.yaml") : (null, null);
         }
 
-        return (Path.GetFullPath(Path.Combine(folder, name)), display.Length == 0 ? name.Replace('\\', '/') : $"{display}/{name}");
+        return (Path.GetFullPath(Path.Combine(folder, name)), display.Length == 0 ? Shown(name) : $"{display}/{name}");
+    }
+
+    /// <summary>Reports name no place of a machine: an absolute path is shown by its last folder and name.</summary>
+    private static string Shown(string name)
+    {
+        var path = name.Replace('\\', '/');
+        return Path.IsPathRooted(path) ? $"{Path.GetFileName(Path.GetDirectoryName(path))}/{Path.GetFileName(path)}" : path;
     }
 
     /// <summary>A set in a folder called <c>sets</c> composes the files beside that folder; any other set those of its own folder.</summary>

@@ -1,0 +1,31 @@
+using Auditor.Documents;
+
+namespace Auditor.Cli.Commands;
+
+/// <summary>All wordings about arguments of the command line.</summary>
+internal static class CommandMessages
+{
+    public static Problem NoDesigns(string folder) => Problem.Error(
+        "no-designs", $"there is no design file below `{folder}`", null, "design files are called `*.design.yaml`");
+
+    public static Problem NotDate(string text) => Problem.Error(
+        "not-a-date", $"`{text}` is not a day of the calendar", null, "write `--as-of` as year, month and day, for example 2026-09-14");
+
+    public static Problem ManyIntoOne(string path) => Problem.Error(
+        "many-designs-one-file", $"several designs cannot be written to one `{path}`", null,
+        "name one design, or write `{name}` in the path: it stands for the path of each design without `.design.yaml`");
+
+    public static Problem UnknownKey(string key, string? nearest) => Problem.Error(
+        "unknown-key", $"the audit has neither a finding nor a quantity `{key}`", null,
+        nearest is null ? "write `rule:subject` or `subject symbol`, as the report does" : $"did you mean `{nearest}`?");
+
+    public static Problem UnknownRule(string id, string? nearest) => Problem.Error(
+        "unknown-rule", $"the rule set has no rule `{id}`", null, nearest is null ? "see `auditor rules list`" : $"did you mean `{nearest}`?");
+
+    public static Problem UnknownSchema(string name, IEnumerable<string> known) => Problem.Error(
+        "unknown-schema", $"there is no schema `{name}`", null, "schemas: " + string.Join(", ", known));
+
+    public static Problem UnreachableRuleSet(SourceSpan span, string path) => Problem.Error(
+        "rule-set-outside", $"the rule set `{path}` lies outside the folder of the design and the folder auditor runs in", span,
+        "keep the firm's set in the repository, or name it with --rules");
+}

@@ -1,0 +1,72 @@
+using System.CommandLine;
+using Auditor.Documents;
+using Auditor.Engine.RuleSets;
+
+namespace Auditor.Cli.Commands;
+
+/// <summary><c>rules show</c>: one rule in full.</summary>
+internal static class RulesShowCommand
+{
+    public static Command Make(Terminal terminal)
+    {
+        var rules = RuleSetOption.Make();
+        var id = new Argument<string>("RULE") { Description = "Rule id, present or former." };
+        var command = new Command("show", "Show one rule: what it compares, its clause, why, and its cases.") { id, rules };
+        command.SetAction(parsed => Run(terminal, parsed.GetValue(id)!, parsed.GetValue(rules)));
+        return command;
+    }
+
+    private static int Run(Terminal terminal, string id, string? name)
+    {
+        var problems = new Problems();
+        var set = RuleSetOption.Load(name, problems);
+        var rule = set?.Rule(id);
+        if (set is not null && rule is null)
+        {
+            problems.Add(CommandMessages.UnknownRule(id, NearestWord.Find(id, set.Rules.Select(known => known.Id))));
+        }
+
+        if (terminal.Tell(problems) || rule is null)
+        {
+            return ExitCode.Problems;
+        }
+
+        Write(terminal.Output, rule);
+        return ExitCode.Clean;
+    }
+
+    private static void Write(TextWriter output, Rule rule)
+    {
+        output.WriteLine($"{rule.Id}: {rule.Title}");
+        output.WriteLine($"  {RulesListCommand.ProvisionWord(rule)} of every {rule.Shape.Name}; clause type: {rule.Clause.Type}");
+        output.WriteLine($"  {string.Join(", ", rule.Clause.References)}{(rule.Clause.Note.Length == 0 ? "" : "; " + rule.Clause.Note)}");
+        if (rule.When is { } when)
+        {
+            output.WriteLine($"  applies when  {OneLine(when.Text)}");
+        }
+
+        output.WriteLine($"  {(rule.Check.How == CheckKind.Require ? "requires     " : "compares     ")} {OneLine(rule.Check.Value.Text)}");
+        if (rule.Check.Limits.Count > 0)
+        {
+            output.WriteLine($"  {LimitWord(rule.Check.How),-13} {string.Join(" and ", rule.Check.Limits.Select(limit => OneLine(limit.Text)))}");
+        }
+
+        output.WriteLine($"  why           {OneLine(rule.Why)}");
+        output.WriteLine($"  put right by  {string.Join(", ", rule.PutRightBy)}");
+        output.WriteLine($"  departures    {(rule.AllowsDepartures ? "allowed" : "never")}");
+        output.WriteLine($"  decides       {string.Join(", ", rule.Covers)}");
+        output.WriteLine($"  cases         {rule.Node.Items("cases").Count}");
+        output.WriteLine($"  file          {rule.Path}");
+    }
+
+    private static string LimitWord(CheckKind how) => how switch
+    {
+        CheckKind.AtMost => "at most",
+        CheckKind.AtLeast => "at least",
+        CheckKind.Within => "from, to",
+        CheckKind.Equal => "equal to",
+        _ => "one of",
+    };
+
+    private static string OneLine(string text) => string.Join(' ', text.Split((char[]?)null, StringSplitOptions.RemoveEmptyEntries));
+}

@@ -1,0 +1,35 @@
+using System.CommandLine;
+using Auditor.Documents;
+
+namespace Auditor.Cli.Commands;
+
+/// <summary><c>schema</c>: prints one of the schemas.</summary>
+internal static class SchemaCommand
+{
+    private const string Ending = ".schema.json";
+
+    public static Command Make(Terminal terminal)
+    {
+        var name = new Argument<string>("NAME") { Description = "Schema: " + string.Join(", ", Names()) + "." };
+        var command = new Command("schema", "Print the JSON Schema of design files, rule files or findings.") { name };
+        command.SetAction(parsed => Run(terminal, parsed.GetValue(name)!));
+        return command;
+    }
+
+    private static int Run(Terminal terminal, string name)
+    {
+        if (Names().Contains(name))
+        {
+            terminal.Output.Write(File.ReadAllText(Shipped.Rules.SchemaPath(name)));
+            return ExitCode.Clean;
+        }
+
+        var problems = new Problems();
+        problems.Add(CommandMessages.UnknownSchema(name, Names()));
+        terminal.Tell(problems);
+        return ExitCode.Problems;
+    }
+
+    private static List<string> Names() =>
+        [.. Directory.EnumerateFiles(Path.Combine(Shipped.Rules.Folder, "schema"), "*" + Ending).Select(path => Path.GetFileName(path)[..^Ending.Length]).Order(StringComparer.Ordinal)];
+}

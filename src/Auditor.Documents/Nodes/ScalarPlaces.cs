@@ -16,7 +16,8 @@ internal static class ScalarPlaces
         var at = properties + StartOfContent(written[properties..]);
         for (var i = 0; i < index; i++)
         {
-            at = After(written, At(written, scalar.Text, i, at), quote);
+            at = At(written, scalar.Text, i, at);
+            at = IsFirstOfEscapedPair(written, scalar.Text, i, at) ? at : After(written, at, quote);
         }
 
         return scalar.Span.Start + (index < scalar.Text.Length ? At(written, scalar.Text, index, at) : at);
@@ -64,6 +65,10 @@ internal static class ScalarPlaces
             _ => at + 1,
         };
     }
+
+    /// <summary>Whether a character is the first half of a pair that one escape stands for.</summary>
+    private static bool IsFirstOfEscapedPair(ReadOnlySpan<char> written, string text, int index, int at)
+        => char.IsHighSurrogate(text[index]) && written[at..].StartsWith("\\U");
 
     private static int EscapeLength(ReadOnlySpan<char> written, int at) => (at + 1 < written.Length ? written[at + 1] : '\0') switch
     {

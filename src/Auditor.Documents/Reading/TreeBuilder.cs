@@ -55,7 +55,12 @@ internal sealed class TreeBuilder(YamlEvents events, SourceText source, Problems
             return null;
         }
 
-        if (at is NodeEvent { Anchor.IsEmpty: false })
+        if (at is not NodeEvent node)
+        {
+            throw new InvalidOperationException("the parser leaves out a value");
+        }
+
+        if (!node.Anchor.IsEmpty)
         {
             problems.Add(ReadingProblems.Anchor(ScalarTags.PropertiesOf(events.SpanOf(at))));
         }
@@ -71,7 +76,7 @@ internal sealed class TreeBuilder(YamlEvents events, SourceText source, Problems
             throw new UnreadableException(ReadingProblems.TooDeep(events.SpanOf(at), budget.Limits.Nesting));
         }
 
-        ScalarTags.CheckCollection((NodeEvent)at, events.SpanOf(at), problems);
+        ScalarTags.CheckCollection(node, events.SpanOf(at), problems);
         return at is MappingStart ? ReadMapping(nesting + 1) : ReadSequence(nesting + 1);
     }
 
@@ -152,11 +157,18 @@ internal sealed class TreeBuilder(YamlEvents events, SourceText source, Problems
     {
         var span = events.SpanOf(events.Current);
         var at = span.Start + ScalarTags.PropertiesLength(source.Text.AsSpan(span.Start, span.Length));
-        var isFlow = events.Current is MappingStart { Style: MappingStyle.Flow } or SequenceStart { Style: SequenceStyle.Flow };
-        var isBracket = isFlow && at < source.Text.Length && source.Text[at] is '{' or '[';
+        var bracket = events.Current switch
+        {
+            MappingStart { Style: MappingStyle.Flow } => '{',
+            SequenceStart { Style: SequenceStyle.Flow } => '[',
+            _ => default(char?),
+        };
+        var isBracket = at < source.Text.Length && source.Text[at] == bracket;
         _openCollections.Push(isBracket ? new SourceSpan(source, at, at + 1) : null);
         events.Advance();
-        return span.Start;
+
+        // The mapping of a lone pair inside brackets has none of its own; the parser lets it start anywhere before its key.
+        return bracket is null || isBracket ? span.Start : events.SpanOf(events.Current).Start;
     }
 
     /// <summary>Moves past the end of a collection: its closing bracket, or for a block collection the end of its last value.</summary>

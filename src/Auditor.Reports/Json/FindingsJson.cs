@@ -1,0 +1,16 @@
+using Auditor.Engine.Findings;
+using Auditor.Engine.Registers;
+
+namespace Auditor.Reports.Json;
+
+/// <summary>Writes findings for programs, as <c>findings.schema.json</c> describes them.</summary>
+public static class FindingsJson
+{
+    /// <summary>Writes a findings file.</summary>
+    /// <param name="result">The audit.</param>
+    /// <param name="register">The register of requirements.</param>
+    /// <param name="options">What to add.</param>
+    /// <returns>Indented JSON in UTF-8 without a byte order mark; lines end with LF.</returns>
+    public static byte[] Write(AuditResult result, Register register, FindingsOptions options) =>
+        throw new NotSupportedException($"{result.Findings.Count} {register.Rows.Count} {options}");
+}

@@ -1,0 +1,71 @@
+namespace Auditor.Reports.Model;
+
+/// <summary>What one rule says of one subject, ready to be shown. Texts that do not apply are empty.</summary>
+public sealed record ReportFinding
+{
+    /// <summary>Stable key: rule and subject.</summary>
+    public required string Key { get; init; }
+
+    /// <summary>Id of the rule.</summary>
+    public required string Rule { get; init; }
+
+    /// <summary>What is right when it conforms.</summary>
+    public required string Title { get; init; }
+
+    /// <summary>Key of the subject.</summary>
+    public required string Subject { get; init; }
+
+    /// <summary>Name of the subject.</summary>
+    public required string SubjectName { get; init; }
+
+    /// <summary>The verdict, with the assumption that it hangs on.</summary>
+    public required string Verdict { get; init; }
+
+    /// <summary>"requirement" or "recommendation".</summary>
+    public required string Provision { get; init; }
+
+    /// <summary>Type of the clause.</summary>
+    public required string ClauseType { get; init; }
+
+    /// <summary>Clauses of the standards.</summary>
+    public required IReadOnlyList<string> References { get; init; }
+
+    /// <summary>What more there is to say of the clause.</summary>
+    public required string ClauseNote { get; init; }
+
+    /// <summary>The value compared, with its unit.</summary>
+    public required string Value { get; init; }
+
+    /// <summary>The limit with its sense and unit.</summary>
+    public required string Limit { get; init; }
+
+    /// <summary>Distance to the limit as a share of it, with sign.</summary>
+    public required string RelativeMargin { get; init; }
+
+    /// <summary>Distance to the limit in the unit of the value.</summary>
+    public required string AbsoluteMargin { get; init; }
+
+    /// <summary>The sentence.</summary>
+    public required string Sentence { get; init; }
+
+    /// <summary>Why the rule matters.</summary>
+    public required string Why { get; init; }
+
+    /// <summary>Inputs that can put it right, as the design file names them.</summary>
+    public required IReadOnlyList<string> PutRightBy { get; init; }
+
+    /// <summary>Where to look in the design, as path:line:column.</summary>
+    public required string Location { get; init; }
+
+    /// <summary>Assumed inputs and figures from memory that the result rests on, one line each.</summary>
+    public required IReadOnlyList<string> RestsOn { get; init; }
+
+    /// <summary>The formulas of value and limit.</summary>
+    public required IReadOnlyList<FormulaLine> Formulas { get; init; }
+
+    /// <summary>What would have to be known, one line each; empty unless undetermined.</summary>
+    public required IReadOnlyList<string> Missing { get; init; }
+
+    /// <summary>Why the departure in force accepts it; null where none does.</summary>
+    public required ReportDeparture? Departure { get; init; }
+}

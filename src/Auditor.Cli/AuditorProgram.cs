@@ -10,12 +10,18 @@ internal static class AuditorProgram
     /// <returns>The exit code.</returns>
     public static int Run(string[] args, TextWriter output, TextWriter error)
     {
-        var terminal = new Terminal(output, error);
+        var noColour = new Option<bool>("--no-color") { Description = "No colours. The variable NO_COLOR does the same.", Recursive = true };
+        var verbose = new Option<bool>("--verbose") { Description = "Tell on standard error what the program does.", Recursive = true };
+        var terminal = new Terminal(output, error, args.Contains("--no-color"));
+        using var log = Logging.Start(args.Contains("--verbose"));
         var root = new RootCommand("Audits low-voltage electrical installations against wiring rules kept as data.")
         {
+            AuditCommand.Make(terminal),
             EvidenceCommand.Make(terminal),
             RulesCommand.Make(terminal),
             SchemaCommand.Make(terminal),
+            noColour,
+            verbose,
         };
         var parsed = root.Parse(args);
         if (parsed.Errors.Count > 0)

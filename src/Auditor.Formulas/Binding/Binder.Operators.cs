@@ -159,7 +159,6 @@ internal sealed partial class Binder
 
         if (left.Type.Equals(right.Type) && left.Type.Kind != FormulaKind.Group)
         {
-            CheckWord(left, right);
             return new CoalesceTerm(Joined(left.Type, right), SpanOf(binary), left, right);
         }
 
@@ -167,9 +166,14 @@ internal sealed partial class Binder
         return null;
     }
 
-    /// <summary>A vocabulary stays known through `??` and `choose` where the other side is a word written out.</summary>
-    private static FormulaType Joined(FormulaType type, Term other) =>
-        type.Vocabulary is null || other is LiteralTerm || Equals(other.Type.Vocabulary, type.Vocabulary) ? type : FormulaType.Text;
+    /// <summary>A vocabulary stays known through `??` and `choose` where the other side is one of its words.</summary>
+    private static FormulaType Joined(FormulaType type, Term other) => type.Vocabulary switch
+    {
+        null => type,
+        _ when type.Kind == FormulaKind.Words => type,
+        var words when other is LiteralTerm { Constant.Kind: ValueKind.Text } literal => words.Contains(literal.Constant.Text) ? type : FormulaType.Text,
+        var words => Equals(other.Type.Vocabulary, words) ? type : FormulaType.Text,
+    };
 
     private CompareTerm? BindComparison(ScriptBinaryExpression binary, Site site, Relation relation)
     {

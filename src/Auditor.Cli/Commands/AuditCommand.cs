@@ -1,0 +1,85 @@
+using System.CommandLine;
+using Auditor.Cli.Summaries;
+using Auditor.Documents;
+using Auditor.Engine.Findings;
+using Auditor.Engine.Registers;
+using Auditor.Reports.Json;
+using Auditor.Reports.Model;
+using Spectre.Console;
+
+namespace Auditor.Cli.Commands;
+
+/// <summary><c>audit</c>: audits designs, tells what needs action, and writes reports.</summary>
+internal static class AuditCommand
+{
+    public static Command Make(Terminal terminal)
+    {
+        var designs = new Argument<string[]>("DESIGN") { Description = "Design files; for a folder, every *.design.yaml below it.", Arity = ArgumentArity.OneOrMore };
+        var rules = RuleSetOption.Make();
+        var write = new Option<string[]>("--write") { Description = "Write a report (.md, .txt, .json); repeatable. {name} stands for the design's path without .design.yaml.", HelpName = "FILE" };
+        var template = new Option<string?>("--template") { Description = "Template to use instead of the shipped one for .md and .txt.", HelpName = "FILE" };
+        var evidence = new Option<bool>("--evidence") { Description = "Put every input and every quantity with its derivation into the .json." };
+        var asOf = AsOfOption.Make();
+        var failOn = new Option<FailOn>("--fail-on")
+        {
+            Description = "Least severe kind of finding that makes the exit code 1; each counts the more severe ones as well.",
+            DefaultValueFactory = _ => FailOn.Undetermined,
+        };
+        var quiet = new Option<bool>("--quiet", "-q") { Description = "Print no summary." };
+        var command = new Command("audit", "Audit design files against a rule set.") { designs, rules, write, template, evidence, asOf, failOn, quiet };
+        command.SetAction(parsed => new AuditRun(
+            terminal, parsed.GetValue(rules), parsed.GetValue(write) ?? [], parsed.GetValue(template), new FindingsOptions(parsed.GetValue(evidence)),
+            parsed.GetValue(failOn), parsed.GetValue(quiet)).Execute(parsed.GetValue(designs)!, parsed.GetValue(asOf)));
+        return command;
+    }
+
+    /// <summary>One run of the command.</summary>
+    private sealed record AuditRun(
+        Terminal Terminal, string? RuleSet, IReadOnlyList<string> Writes, string? Template, FindingsOptions Options, FailOn FailOn, bool Quiet)
+    {
+        public int Execute(string[] arguments, string? asOfText)
+        {
+            var problems = new Problems();
+            var paths = DesignPaths.Expand(arguments, problems);
+            var asOf = AsOfOption.Read(asOfText, problems);
+            var targets = ReportTarget.Read(Writes, paths.Count, problems);
+            if (targets is null || problems.HasErrors)
+            {
+                Terminal.Tell(problems);
+                return ExitCode.Problems;
+            }
+
+            var register = targets.Count == 0 ? null : Task.Run(() => Register.Load(Shipped.Rules, problems));
+            var auditing = new Auditing(RuleSet, asOf, problems);
+            var results = paths.Select(auditing.Run).OfType<AuditResult>().ToArray();
+            if (problems.HasErrors)
+            {
+                // No report of a run in which anything could not be audited: a part must not be read as the whole.
+                Terminal.Tell(problems);
+                return ExitCode.Problems;
+            }
+
+            foreach (var target in targets)
+            {
+                Array.ForEach(results, result => target.Write(result, register!.GetAwaiter().GetResult(), Template, Options, problems));
+            }
+
+            if (!Quiet)
+            {
+                Summarise(results);
+            }
+
+            return Terminal.Tell(problems) ? ExitCode.Problems : Code(results);
+        }
+
+        private int Code(IEnumerable<AuditResult> results) =>
+            results.SelectMany(result => result.Findings).Any(finding => FailOn.Counts(finding)) ? ExitCode.Found : ExitCode.Clean;
+
+        private void Summarise(AuditResult[] results)
+        {
+            var summary = new Summary(Terminal.Console());
+            Array.ForEach(results, summary.Write);
+            Terminal.Console().WriteLine(Caution.Text);
+        }
+    }
+}

@@ -1,0 +1,18 @@
+#!/usr/bin/env bash
+# Builds everything and runs all tests; the last line reads "N passed, N failed".
+set -euo pipefail
+cd "$(dirname "$0")/.."
+export DOTNET_NOLOGO=1 DOTNET_CLI_TELEMETRY_OPTOUT=1
+
+dotnet build auditor.sln -c Release -v quiet
+
+log=$(mktemp)
+trap 'rm -f "$log"' EXIT
+status=0
+dotnet test --solution auditor.sln -c Release --no-build --no-ansi --no-progress 2>&1 | tee "$log" || status=$?
+
+count() { sed -n "s/^ *$1: \([0-9][0-9]*\).*/\1/p" "$log" | tail -n 1; }
+passed=$(count succeeded)
+failed=$(count failed)
+echo "${passed:-0} passed, ${failed:-0} failed"
+[ "$status" -eq 0 ] && [ "${passed:-0}" -gt 0 ] && [ "${failed:-0}" -eq 0 ]

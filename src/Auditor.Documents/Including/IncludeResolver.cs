@@ -135,7 +135,11 @@ internal sealed class IncludeResolver
     {
         if (_files.TryGetValue(file, out var known))
         {
-            _budget.SpendBytes(known.Text.Text.Length);
+            if (!_budget.TrySpendBytes(known.Bytes))
+            {
+                _problems.Add(FileProblems.TooLarge(known.Text.WholeSpan() with { End = 0 }, _budget.Limits.Bytes));
+                return null;
+            }
         }
         else if (SourceReader.Read(file, _folder.DisplayPathOf(file), _problems, _budget) is { } read)
         {

@@ -10,9 +10,16 @@ internal sealed class ReadingBudget(ReadingLimits limits)
 
     public ReadingLimits Limits { get; } = limits;
 
-    public long BytesLeft => _bytes;
+    public bool TrySpendBytes(long count)
+    {
+        if (count > _bytes)
+        {
+            return false;
+        }
 
-    public void SpendBytes(long count) => _bytes -= count;
+        _bytes -= count;
+        return true;
+    }
 
     public bool TrySpendValue() => _values-- > 0;
 

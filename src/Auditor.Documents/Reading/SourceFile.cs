@@ -1,4 +1,4 @@
 namespace Auditor.Documents;
 
-/// <summary>The text of a file and the hash of its bytes.</summary>
-internal sealed record SourceFile(SourceText Text, string Sha256);
+/// <summary>The text of a file, how many bytes it has, and their SHA-256.</summary>
+internal sealed record SourceFile(SourceText Text, int Bytes, string Sha256);

@@ -28,15 +28,16 @@ public static class SourceReader
                 return null;
             }
 
-            var bytes = ReadBytes(new FileInfo(fullPath), budget.BytesLeft);
+            var bytes = ReadBytes(new FileInfo(fullPath), budget);
             if (bytes is null)
             {
                 problems.Add(FileProblems.TooLarge(nowhere, budget.Limits.Bytes));
                 return null;
             }
 
-            budget.SpendBytes(bytes.Length);
-            return Decode(bytes, displayPath, problems) is { } text ? new SourceFile(text, Convert.ToHexStringLower(SHA256.HashData(bytes))) : null;
+            return Decode(bytes, displayPath, problems) is { } text
+                ? new SourceFile(text, bytes.Length, Convert.ToHexStringLower(SHA256.HashData(bytes)))
+                : null;
         }
         catch (Exception fault) when (fault is FileNotFoundException or DirectoryNotFoundException)
         {
@@ -51,7 +52,7 @@ public static class SourceReader
     }
 
     /// <summary>Reads all bytes, or returns null when there are more than allowed.</summary>
-    private static byte[]? ReadBytes(FileInfo file, long limit)
+    private static byte[]? ReadBytes(FileInfo file, ReadingBudget budget)
     {
         // Pipes and devices report no length. They are not opened at all: opening one may wait for ever.
         if (file.Length == 0)
@@ -59,7 +60,7 @@ public static class SourceReader
             return [];
         }
 
-        if (file.Length > limit)
+        if (!budget.TrySpendBytes(file.Length))
         {
             return null;
         }

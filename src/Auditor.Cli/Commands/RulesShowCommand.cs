@@ -11,7 +11,12 @@ internal static class RulesShowCommand
     {
         var rules = RuleSetOption.Make();
         var id = new Argument<string>("RULE") { Description = "Rule id, present or former." };
-        var command = new Command("show", "Show one rule: what it compares, its clause, why, and its cases.") { id, rules };
+        var command = new Command("show", """
+            Show one rule: what it compares, its clause, why, and its cases.
+
+            Example:
+              auditor rules show disconnection-tn
+            """) { id, rules };
         command.SetAction(parsed => Run(terminal, parsed.GetValue(id)!, parsed.GetValue(rules)));
         return command;
     }

@@ -10,7 +10,13 @@ internal static class RulesTestCommand
     public static Command Make(Terminal terminal)
     {
         var rules = RuleSetOption.Make();
-        var command = new Command("test", "Run every case of every sheet and rule.") { rules };
+        var command = new Command("test", """
+            Run every case of every sheet and rule.
+
+            Examples:
+              auditor rules test
+              auditor rules test --rules house/firm.set.yaml
+            """) { rules };
         command.SetAction(parsed => Run(terminal, parsed.GetValue(rules)));
         return command;
     }

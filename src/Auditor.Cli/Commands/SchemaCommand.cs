@@ -11,7 +11,12 @@ internal static class SchemaCommand
     public static Command Make(Terminal terminal)
     {
         var name = new Argument<string>("NAME") { Description = "Schema: " + string.Join(", ", Names()) + "." };
-        var command = new Command("schema", "Print the JSON Schema of design files, rule files or findings.") { name };
+        var command = new Command("schema", """
+            Print the JSON Schema of design files, rule files or findings.
+
+            Example:
+              auditor schema design
+            """) { name };
         command.SetAction(parsed => Run(terminal, parsed.GetValue(name)!));
         return command;
     }

@@ -2,112 +2,67 @@ using Auditor.Documents;
 using Auditor.Engine.Evaluation;
 using Auditor.Engine.Findings;
 using Auditor.Engine.RuleSets;
-using Auditor.Formulas.Types;
+using Auditor.Formulas;
+using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Values;
-using Auditor.Quantities;
 
 namespace Auditor.Engine.RuleTests;
 
-/// <summary>Runs the cases that stand in sheets and rules.</summary>
+/// <summary>Runs the cases that stand in sheets and rules. May be used side by side.</summary>
 /// <param name="rules">The rule set.</param>
 /// <param name="problems">Receives cases that cannot be run as written.</param>
 public sealed class CaseRunner(RuleSet rules, Problems problems)
 {
-    private readonly Evaluator _evaluator = new(rules);
+    private readonly CaseReader _reader = new(rules, new Evaluator(rules), problems);
+    private readonly Expectation _expectation = new(problems);
 
     /// <summary>Runs every case of the set: sheets by kind of subject and slot, then rules by id.</summary>
     public IReadOnlyList<CaseResult> RunAll() => [.. rules.Quantities.SelectMany(Run), .. rules.Rules.SelectMany(Run)];
 
     /// <summary>Runs the cases of a quantity.</summary>
-    public IEnumerable<CaseResult> Run(QuantityDefinition quantity) =>
-        quantity.Node.Mappings("cases").Select(node => Run(quantity, node));
+    public IEnumerable<CaseResult> Run(QuantityDefinition quantity) => quantity.Node.Mappings("cases").Select(node => Run(quantity, node));
 
     /// <summary>Runs the cases of a rule.</summary>
     public IEnumerable<CaseResult> Run(Rule rule) => rule.Node.Mappings("cases").Select(node => Run(rule, node));
 
-    private CaseResult Run(QuantityDefinition quantity, MappingNode node)
+    /// <summary>Runs a case on a quantity.</summary>
+    /// <param name="quantity">The quantity.</param>
+    /// <param name="node">The case: <c>name</c>, <c>given</c> and <c>expect</c>, in a form that the schema of sheets accepts.</param>
+    public CaseResult Run(QuantityDefinition quantity, MappingNode node)
     {
-        var subject = new CaseReader(rules, _evaluator, problems).Read(quantity.Shape, node.Mapping("given"));
-        var value = quantity.Formula.Evaluate(subject.Scope);
-        var failure = Compare(value, node.Scalar("expect")!, quantity.Slot.Type, quantity.Slot.Unit);
-        return Result($"{quantity.Sheet}: {quantity.Shape.Name} {quantity.Slot.Symbol}", node, failure);
+        var value = Evaluate(quantity.Formula, quantity.Shape, node.Mapping("given"));
+        var failure = _expectation.Compare(value, node.Scalar("expect")!, quantity.Slot.Type, quantity.Slot.Unit);
+        return Result(OwnerOf(quantity), node, failure);
     }
 
-    private CaseResult Run(Rule rule, MappingNode node)
+    /// <summary>Runs a case on a rule.</summary>
+    /// <param name="rule">The rule.</param>
+    /// <param name="node">The case: <c>name</c>, <c>given</c>, <c>verdict</c> and <c>margin</c>, in a form that the schema of rules accepts.</param>
+    public CaseResult Run(Rule rule, MappingNode node)
     {
-        var subject = new CaseReader(rules, _evaluator, problems).Read(rule.Shape, node.Mapping("given"));
-        var judgement = Judge.Decide(rule, subject.Scope);
+        var judgement = Judge(rule, node);
         var expected = node.Text("verdict");
         var got = judgement.Verdict?.Word() ?? "none";
-        var failure = expected == got ? CompareMargin(judgement, node.Scalar("margin")) : $"expected {expected}, got {got}{Details(judgement)}";
+        var failure = expected == got ? Expectation.Compare(judgement.Margin, node.Scalar("margin")) : $"expected {expected}, got {got}{Details(judgement)}";
         return Result(rule.Id, node, failure);
     }
+
+    /// <summary>What each case of a rule comes to, in their order.</summary>
+    public IEnumerable<Judgement> Judgements(Rule rule) => rule.Node.Mappings("cases").Select(node => Judge(rule, node));
+
+    /// <summary>The value of a formula on the subject that a case describes.</summary>
+    /// <param name="formula">The formula.</param>
+    /// <param name="shape">Kind of subject that it was bound for.</param>
+    /// <param name="given">What the case gives; null for nothing.</param>
+    public Value Evaluate(Formula formula, SubjectShape shape, MappingNode? given) => formula.Evaluate(_reader.Read(shape, given).Scope);
+
+    /// <summary>How results and messages call a quantity.</summary>
+    internal static string OwnerOf(QuantityDefinition quantity) => $"{quantity.Sheet}: {quantity.Shape.Name} {quantity.Slot.Symbol}";
+
+    private Judgement Judge(Rule rule, MappingNode node) => Evaluation.Judge.Decide(rule, _reader.Read(rule.Shape, node.Mapping("given")).Scope);
 
     private static string Details(Judgement judgement) =>
         judgement.Absences is { } absences ? " (" + string.Join("; ", absences.Items) + ")" : "";
 
     private static CaseResult Result(string owner, MappingNode node, string? failure) => new(owner, node.Text("name")!, failure, node.Span);
-
-    private static string? CompareMargin(Judgement judgement, ScalarNode? expected)
-    {
-        if (expected is null)
-        {
-            return null;
-        }
-
-        if (!QuantityText.TryParse(expected.Text, out var stated, out _) || !stated.Quantity.Dimension.IsNone)
-        {
-            return $"`{expected.Text}` is no relative margin";
-        }
-
-        if (judgement.Margin?.Relative is not { } relative)
-        {
-            return $"expected a margin of {expected.Text}, got none";
-        }
-
-        return Near(relative, stated) ? null : $"expected a margin of {expected.Text}, got {relative * 100:0.######} %";
-    }
-
-    private string? Compare(in Value value, ScalarNode expected, FormulaType type, Unit? unit)
-    {
-        if (expected.Text == "missing" || value.IsMissing)
-        {
-            return value.IsMissing == (expected.Text == "missing") ? null : $"expected {expected.Text}, got {Show(value, unit)}";
-        }
-
-        if (type.Kind != FormulaKind.Quantity)
-        {
-            var same = CaseReader.ValueOf(expected, type) is { } wanted
-                && (type.Kind == FormulaKind.Text ? wanted.Text == value.Text : wanted.Flag == value.Flag);
-            return same ? null : $"expected {expected.Text}, got {Show(value, unit)}";
-        }
-
-        if (!QuantityText.TryParse(expected.Text, out var stated, out _) || stated.Quantity.Dimension != type.Dimension)
-        {
-            problems.Add(CaseMessages.WrongExpectation(expected.Span, type));
-            return $"`{expected.Text}` is no expectation for {type}";
-        }
-
-        return Near(value.Number, stated) ? null : $"expected {expected.Text}, got {Show(value, unit)}";
-    }
-
-    /// <summary>Within the tolerance, or the same within the slack of comparisons where none is stated.</summary>
-    private static bool Near(double value, StatedQuantity stated)
-    {
-        var wanted = stated.Quantity.Value;
-        if (Comparison.Same(value, wanted) || Math.Abs(value - wanted) < 1e-12)
-        {
-            return true;
-        }
-
-        return stated.Tolerance is { } tolerance && value >= wanted - tolerance.Below && value <= wanted + tolerance.Above;
-    }
-
-    private static string Show(in Value value, Unit? unit) => value.Kind switch
-    {
-        ValueKind.Missing => "missing: " + string.Join("; ", value.Absences.Items),
-        ValueKind.Quantity => $"{unit!.FromCoherent(value.Number):G7} {unit.Symbol}",
-        ValueKind.Flag => value.Flag ? "true" : "false",
-        _ => value.Text,
-    };
 }

@@ -10,5 +10,55 @@ public static class ReportFile
     /// <param name="bytes">What to write.</param>
     /// <param name="problems">Receives the reason when it cannot be written.</param>
     /// <returns>Whether it was written.</returns>
-    public static bool Write(string path, ReadOnlySpan<byte> bytes, Problems problems) => throw new NotSupportedException($"{path} {bytes.Length} {problems.HasErrors}");
+    public static bool Write(string path, ReadOnlySpan<byte> bytes, Problems problems)
+    {
+        var full = Path.GetFullPath(path);
+        var folder = Path.GetDirectoryName(full);
+        if (Directory.Exists(full) || !Directory.Exists(folder))
+        {
+            problems.Add(Directory.Exists(full) ? FileMessages.IsFolder(path) : FileMessages.NoFolder(path));
+            return false;
+        }
+
+        var beside = Path.Combine(folder, $".{Path.GetFileName(full)}.{Path.GetRandomFileName()}");
+        try
+        {
+            WriteWhole(beside, bytes);
+            File.Move(beside, full, overwrite: true);
+            return true;
+        }
+        catch (UnauthorizedAccessException)
+        {
+            problems.Add(FileMessages.Denied(path));
+        }
+        catch (IOException fault)
+        {
+            problems.Add(FileMessages.Failed(path, Reason(fault)));
+        }
+
+        Remove(beside);
+        return false;
+    }
+
+    private static void WriteWhole(string path, ReadOnlySpan<byte> bytes)
+    {
+        using var stream = new FileStream(path, FileMode.CreateNew, FileAccess.Write, FileShare.None);
+        stream.Write(bytes);
+        stream.Flush(flushToDisk: true);
+    }
+
+    /// <summary>The reason without the paths of the machine that the system's message ends with.</summary>
+    private static string Reason(IOException fault) => fault.Message.Split(" : '", 2)[0].TrimEnd('.').ToLowerInvariant();
+
+    private static void Remove(string path)
+    {
+        try
+        {
+            File.Delete(path);
+        }
+        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
+        {
+            // The file that could not be written cannot be removed either; the problem of the writing tells the reason.
+        }
+    }
 }

@@ -1,31 +1,47 @@
 using Auditor.Documents;
+using Auditor.Reports.Templates;
 
 namespace Auditor.Reports.Files;
 
 /// <summary>A format of report, found by the ending of the file to write.</summary>
-/// <param name="Ending">The ending, with its dot.</param>
-/// <param name="TemplateName">File name of the shipped template; null for a format that is not written from one.</param>
-public sealed record ReportFormat(string Ending, string? TemplateName)
+public sealed class ReportFormat
 {
+    private ReportFormat(string ending, string? templateName, Ink? ink)
+    {
+        Ending = ending;
+        TemplateName = templateName;
+        Ink = ink;
+    }
+
     /// <summary>Plain text.</summary>
-    public static ReportFormat Text { get; } = new(".txt", "report.scriban-txt");
+    public static ReportFormat Text { get; } = new(".txt", "report.scriban-txt", new PlainInk());
 
     /// <summary>Markdown.</summary>
-    public static ReportFormat Markdown { get; } = new(".md", "report.scriban-md");
+    public static ReportFormat Markdown { get; } = new(".md", "report.scriban-md", new MarkdownInk());
 
     /// <summary>Findings for programs.</summary>
-    public static ReportFormat Json { get; } = new(".json", null);
+    public static ReportFormat Json { get; } = new(".json", null, null);
 
     /// <summary>All formats.</summary>
     public static IReadOnlyList<ReportFormat> All { get; } = [Text, Markdown, Json];
 
-    /// <summary>The format of a file to write; null, with a problem that lists the known endings, when its ending is none of them.</summary>
-    public static ReportFormat? Of(string path, Problems problems) =>
-        All.FirstOrDefault(format => path.EndsWith(format.Ending, StringComparison.OrdinalIgnoreCase)) ?? Unknown(path, problems);
+    /// <summary>The ending, with its dot.</summary>
+    public string Ending { get; }
 
-    private static ReportFormat? Unknown(string path, Problems problems)
+    /// <summary>File name of the shipped template; null for a format that is not written from one.</summary>
+    public string? TemplateName { get; }
+
+    internal Ink? Ink { get; }
+
+    /// <summary>The format of a file to write; null, with a problem that lists the known endings, when its ending is none of them.</summary>
+    public static ReportFormat? Of(string path, Problems problems)
     {
-        problems.Add(FileMessages.UnknownEnding(path, All.Select(format => format.Ending)));
-        return null;
+        var format = All.FirstOrDefault(format => path.EndsWith(format.Ending, StringComparison.OrdinalIgnoreCase));
+        if (format is null)
+        {
+            problems.Add(FileMessages.UnknownEnding(path, All.Select(known => known.Ending)));
+        }
+
+        return format;
     }
 }

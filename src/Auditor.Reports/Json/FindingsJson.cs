@@ -1,5 +1,6 @@
 using Auditor.Engine.Findings;
 using Auditor.Engine.Registers;
+using Auditor.Reports.Reading;
 
 namespace Auditor.Reports.Json;
 
@@ -11,6 +12,25 @@ public static class FindingsJson
     /// <param name="register">The register of requirements.</param>
     /// <param name="options">What to add.</param>
     /// <returns>Indented JSON in UTF-8 without a byte order mark; lines end with LF.</returns>
-    public static byte[] Write(AuditResult result, Register register, FindingsOptions options) =>
-        throw new NotSupportedException($"{result.Findings.Count} {register.Rows.Count} {options}");
+    public static byte[] Write(AuditResult result, Register register, FindingsOptions options)
+    {
+        using var stream = new MemoryStream();
+        using (var output = new JsonOutput(stream, new Places(result.Design.File)))
+        {
+            var supports = new Supports(result);
+            output.Object(null, () =>
+            {
+                HeadJson.Write(output, result);
+                FindingJson.Write(output, result, supports);
+                TailJson.Write(output, result, register, supports);
+                if (options.AllEvidence)
+                {
+                    EvidenceJson.Write(output, result);
+                }
+            });
+        }
+
+        stream.WriteByte((byte)'\n');
+        return stream.ToArray();
+    }
 }

@@ -21,8 +21,8 @@ public sealed record ReportFinding
     /// <summary>The verdict, with the assumption that it hangs on.</summary>
     public required string Verdict { get; init; }
 
-    /// <summary>"requirement" or "recommendation".</summary>
-    public required string Provision { get; init; }
+    /// <summary>Whether the rule is a requirement ("shall"); otherwise it is a recommendation ("should").</summary>
+    public required bool IsRequirement { get; init; }
 
     /// <summary>Type of the clause.</summary>
     public required string ClauseType { get; init; }

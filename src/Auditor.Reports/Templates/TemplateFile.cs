@@ -2,18 +2,22 @@ using Auditor.Reports.Files;
 
 namespace Auditor.Reports.Templates;
 
-/// <summary>A template file.</summary>
+/// <summary>A template, or a file that stands beside one.</summary>
 /// <param name="FullPath">Where it lies.</param>
 /// <param name="DisplayPath">The path to show in problems.</param>
 public sealed record TemplateFile(string FullPath, string DisplayPath)
 {
-    /// <summary>The template that comes with the program; only for formats that are written from one.</summary>
-    public static TemplateFile Shipped(ReportFormat format)
-    {
-        var name = format.TemplateName ?? throw new ArgumentException("the format is not written from a template", nameof(format));
-        return new TemplateFile(Path.Combine(AppContext.BaseDirectory, "templates", name), "templates/" + name);
-    }
+    /// <summary>The shipped template of a format.</summary>
+    /// <exception cref="ArgumentException">The format is not written from a template.</exception>
+    public static TemplateFile Shipped(ReportFormat format) =>
+        ShippedAs(format.TemplateName ?? throw new ArgumentException($"no template writes {format.Ending}", nameof(format)));
 
     /// <summary>The template at a path that the caller gives.</summary>
-    public static TemplateFile At(string path) => new(Path.GetFullPath(path), path);
+    public static TemplateFile At(string path) => new(Path.GetFullPath(path), path.Replace('\\', '/'));
+
+    internal static TemplateFile ShippedAs(string name) => new(Path.Combine(AppContext.BaseDirectory, "templates", name), "templates/" + name);
+
+    /// <summary>A file of that name, or path relative to the template, in the folder of the template.</summary>
+    internal TemplateFile Beside(string name) => new(
+        Path.GetFullPath(Path.Combine(Path.GetDirectoryName(FullPath)!, name)), DisplayPath[..(DisplayPath.LastIndexOf('/') + 1)] + name);
 }

@@ -1,10 +1,16 @@
+using System.Text;
 using Auditor.Documents;
 using Auditor.Reports.Files;
 using Auditor.Reports.Model;
+using Scriban.Syntax;
 
 namespace Auditor.Reports.Templates;
 
-/// <summary>Writes a report from a template.</summary>
+/// <summary>
+/// Writes a report from a template in the Scriban language. A template reaches the model as <c>report</c>, the functions
+/// <c>array.*</c> and <c>string.*</c>, <c>code</c> (a text set as code) and <c>include</c> (a file in the folder of the template), and
+/// nothing else: no file, no environment, no clock. Whatever it inserts is made inert; only its own fixed text is markup.
+/// </summary>
 public static class TemplateReport
 {
     /// <summary>Writes a report.</summary>
@@ -12,7 +18,27 @@ public static class TemplateReport
     /// <param name="format">Text or Markdown; decides how inserted text is made inert.</param>
     /// <param name="template">The template.</param>
     /// <param name="problems">Receives what is wrong with the template, with its path, line and column.</param>
-    /// <returns>The report in UTF-8 without a byte order mark; null when there are problems.</returns>
-    public static byte[]? Render(ReportModel model, ReportFormat format, TemplateFile template, Problems problems) =>
-        throw new NotSupportedException($"{model.Project.Title} {format} {template} {problems.HasErrors}");
+    /// <param name="limits">How much the template may ask for; null for the default limits.</param>
+    /// <returns>The report in UTF-8 without a byte order mark, lines ended by LF; null when there are problems.</returns>
+    /// <exception cref="ArgumentException">The format is not written from a template.</exception>
+    public static byte[]? Render(ReportModel model, ReportFormat format, TemplateFile template, Problems problems, TemplateLimits? limits = null)
+    {
+        var ink = format.Ink ?? throw new ArgumentException($"no template writes {format.Ending}", nameof(format));
+        var folder = new TemplateFolder(template, limits ?? TemplateLimits.Default, problems);
+        if (folder.ParseTop() is not { } parsed)
+        {
+            return null;
+        }
+
+        var context = new ReportContext(model, ink, folder);
+        try
+        {
+            var text = ink.Finish(parsed.Render(context).Replace("\r\n", "\n", StringComparison.Ordinal));
+            return context.HasShownCaution ? Encoding.UTF8.GetBytes(text) : folder.Refuse(TemplateMessages.WithoutCaution);
+        }
+        catch (ScriptRuntimeException fault)
+        {
+            return folder.Refuse(fault);
+        }
+    }
 }

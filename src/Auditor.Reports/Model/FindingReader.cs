@@ -1,0 +1,54 @@
+using Auditor.Engine.Departures;
+using Auditor.Engine.Evidence;
+using Auditor.Engine.Findings;
+using Auditor.Engine.RuleSets;
+using Auditor.Reports.Reading;
+
+namespace Auditor.Reports.Model;
+
+/// <summary>Turns findings into what reports show of them.</summary>
+internal sealed class FindingReader(
+    AuditResult result, Places places, Supports supports, IReadOnlyDictionary<Departure, ReportDeparture> departures)
+{
+    private readonly FormulaLines _formulas = new(result.Rules);
+
+    public ReportFinding Read(Finding finding)
+    {
+        var rule = finding.Rule;
+        return new ReportFinding
+        {
+            Key = finding.Key,
+            Rule = rule.Id,
+            Title = rule.Title,
+            Subject = finding.Subject.Key,
+            SubjectName = SubjectText.NameToShow(finding.Subject),
+            Verdict = finding.VerdictText,
+            IsRequirement = rule.Provision == Provision.Requirement,
+            ClauseType = rule.Clause.Type,
+            References = rule.Clause.References,
+            ClauseNote = rule.Clause.Note,
+            Value = finding.ValueShown,
+            Limit = finding.LimitShown,
+            RelativeMargin = finding.Judgement.Margin?.Relative is { } relative ? ValueText.ShowMargin(relative) : "",
+            AbsoluteMargin = finding.MarginShown ?? "",
+            Sentence = finding.Message,
+            Why = rule.Why,
+            PutRightBy = rule.PutRightBy,
+            Location = places.Text(finding.Location),
+            RestsOn = [.. supports.Of(finding).Select(Shown)],
+            Formulas = _formulas.Of(finding),
+            Missing = [.. finding.Judgement.Absences?.Items.Select(absence => absence.ToString()) ?? []],
+            Departure = finding.Departure is { } departure ? departures[departure] : null,
+        };
+    }
+
+    private string Shown(Foundation foundation)
+    {
+        if (foundation.Kind == FoundationKind.AssumedInput)
+        {
+            return $"assumed: {foundation.Subject} {foundation.Name}: {foundation.Text} ({places.Text(foundation.Span!.Value)})";
+        }
+
+        return foundation.Text.Length == 0 ? $"from memory: {foundation.Name}" : $"from memory: {foundation.Name}: {foundation.Text}";
+    }
+}

@@ -1,0 +1,60 @@
+using Auditor.Documents;
+using Auditor.Engine.Installation;
+using Auditor.Formulas.Subjects;
+using Auditor.Formulas.Types;
+using Auditor.Quantities;
+
+namespace Auditor.Reports.Reading;
+
+/// <summary>An input as the design states it.</summary>
+/// <param name="Subject">The subject that has it.</param>
+/// <param name="Slot">The input.</param>
+/// <param name="Text">Its value as written; a list of words with commas between.</param>
+/// <param name="Standing">How it came to be known.</param>
+/// <param name="From">Where it was said: <c>subject</c>, <c>type</c> or <c>defaults</c>.</param>
+/// <param name="Span">Where it stands.</param>
+internal sealed record StatedInput(DesignSubject Subject, InputSlot Slot, string Text, Standing Standing, string From, SourceSpan Span)
+{
+    /// <summary>Every input that the design states of a subject, in the order of its shape.</summary>
+    public static IEnumerable<StatedInput> Of(DesignSubject subject) =>
+        subject.Shape.Inputs.Where(slot => slot.Type.Kind != FormulaKind.Group).Select(slot => Of(subject, slot)).OfType<StatedInput>();
+
+    private static StatedInput? Of(DesignSubject subject, InputSlot slot)
+    {
+        var own = Walk(subject.Node, slot);
+        if (own is SequenceNode list)
+        {
+            var words = list.Items.OfType<ScalarNode>().Select(item => item.Text);
+            return new StatedInput(subject, slot, string.Join(", ", words), Standing.Designed, "subject", list.Span);
+        }
+
+        return subject.Source(slot) is { } scalar
+            ? new StatedInput(subject, slot, scalar.Text, StandingOf(slot, scalar), FromOf(subject, slot, own, scalar), scalar.Span)
+            : null;
+    }
+
+    private static Standing StandingOf(InputSlot slot, ScalarNode scalar) =>
+        slot.Type.Kind == FormulaKind.Quantity && QuantityText.TryParse(scalar.Text, out var stated, out _) ? stated.Standing : Standing.Designed;
+
+    private static string FromOf(DesignSubject subject, InputSlot slot, Node? own, ScalarNode scalar)
+    {
+        if (ReferenceEquals(own, scalar))
+        {
+            return "subject";
+        }
+
+        var defaults = subject.Parent?.Parent?.Node.Mapping("defaults");
+        return defaults is not null && ReferenceEquals(Walk(defaults, slot), scalar) ? "defaults" : "type";
+    }
+
+    private static Node? Walk(MappingNode start, InputSlot slot)
+    {
+        Node? node = start;
+        foreach (var key in slot.Path.Split('.'))
+        {
+            node = (node as MappingNode)?.Find(key);
+        }
+
+        return node;
+    }
+}

@@ -13,7 +13,8 @@ public class SchemaTests
     [InlineData("""{ "properties": { "a": { "const": 1 } } }""", "test.schema.json: properties.a: the keyword `const` is not supported")]
     [InlineData("""{ "if": {}, "then": {} }""", "test.schema.json: $: the keyword `if` is not supported")]
     [InlineData("""{ "definitions": { "x": { "oneOf": [{ "propertyNames": {} }] } } }""", "test.schema.json: definitions.x.oneOf[0]: the keyword `propertyNames` is not supported")]
-    [InlineData("""{ "items": [{ "dependencies": {} }] }""", "test.schema.json: items[0]: the keyword `dependencies` is not supported")]
+    [InlineData("""{ "items": { "dependencies": {} } }""", "test.schema.json: items: the keyword `dependencies` is not supported")]
+    [InlineData("""{ "items": [{}] }""", "test.schema.json: $: `items` takes one schema for all items")]
     [InlineData("""{ "not": { "contains": {} } }""", "test.schema.json: not: the keyword `contains` is not supported")]
     [InlineData("""{ "additionalProperties": { "format": "email" } }""", "test.schema.json: additionalProperties: `format` knows `date` only")]
     [InlineData("""{ "enum": [[1]] }""", "test.schema.json: $: `enum` lists single values only")]
@@ -30,6 +31,22 @@ public class SchemaTests
     [Fact]
     public void A_property_may_bear_the_name_of_a_keyword()
         => Assert.Empty(Check("""{ "properties": { "const": { "type": "string" }, "if": { "type": "integer" } } }""", "const: a\nif: 1\n").All);
+
+    [Theory]
+    [InlineData("""{ "oneOf": [{ "type": "string" }, { "enum": ["b"] }] }""", "a: b", "`a` can be read in more than one way")]
+    [InlineData("""{ "not": { "type": "string" } }""", "a: b", "`a` cannot be this")]
+    [InlineData("""{ "not": { "required": ["b"] } }""", "a: { b: 1 }", "`b` cannot be said here")]
+    [InlineData("""{ "not": { "anyOf": [{ "required": ["x"] }, { "required": ["c", "b"] }] } }""", "a: { b: 1, c: 2 }", "`b` and `c` cannot be said together")]
+    [InlineData("""{ "anyOf": [{ "required": ["x", "y"] }, { "required": ["z"] }] }""", "a: { x: 1 }", "`a` lacks `x` and `y` or `z`")]
+    [InlineData("""{ "type": "array", "maxItems": 1 }""", "a: [1, 2]", "`a` must have at most 1 item")]
+    [InlineData("""{ "items": { "items": { "type": "integer" } } }""", "a: [[b]]", "an item must be a whole number, not a text")]
+    [InlineData("""{ "allOf": [{ "minimum": 3 }, { "maximum": 1 }] }""", "a: 2", "`a` must be at least 3", "`a` must be at most 1")]
+    [InlineData("""{ "type": "null" }""", "a: 1", "`a` must be nothing, not a number")]
+    [InlineData("""{ "type": ["array", "boolean"] }""", "a: b", "`a` must be a list or `true` or `false`, not a text")]
+    [InlineData("""{ "enum": ["1", null] }""", "a: 1", "`1` is not a word for `a`")]
+    [InlineData("""{ "properties": {}, "additionalProperties": false }""", "a: { b: 1 }", "`b` is not a key of `a`")]
+    public void A_departure_is_put_in_our_words(string schema, string yaml, params string[] messages)
+        => Assert.Equal(messages, Check($$"""{ "properties": { "a": {{schema}} } }""", yaml).All.Select(problem => problem.Message));
 
     [Theory]
     [InlineData("\"signed\": true", "-1 m", true)]
@@ -58,6 +75,13 @@ public class SchemaTests
     [InlineData("\"80 %, assumed\"")]
     public void A_ratio_is_a_number_alone_or_in_per_cent(string value)
         => Assert.Empty(Check("""{ "properties": { "a": { "type": ["string", "number"], "quantity": "ratio" } } }""", "a: " + value).All);
+
+    [Theory]
+    [InlineData("B", true)]
+    [InlineData("\"B\\n\"", false)]
+    [InlineData("\"B\\n\\n\"", false)]
+    public void A_form_ends_where_the_text_ends(string value, bool isGood)
+        => Assert.Equal(isGood ? [] : ["wrong-form"], Check("""{ "properties": { "a": { "type": "string", "pattern": "^[A-Z]$" } } }""", "a: " + value).Codes());
 
     [Fact]
     public void What_a_partial_mapping_lacks_is_not_reported()

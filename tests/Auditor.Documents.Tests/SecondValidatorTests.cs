@@ -38,11 +38,11 @@ public class SecondValidatorTests
         "origin: { transformer: a }", "origin: { transformer: a, loop-impedance: { resistance: a, reactance: b } }", "origin: [a]", "other: 1", "runs: []", "runs: a",
     ];
 
-    private static readonly Gen<string> Runs = Gen.Select(Gen.OneOf(RunKeys), Gen.OneOf(Values), (key, value) => (key, value)).Array[0, 3]
+    private static readonly Gen<string> Runs = Gen.Select(Gen.OneOf(RunKeys), Gen.OneOf(Values), (key, value) => (key, value)).Array[0, 2]
         .Select(pairs => "{ " + string.Join(", ", pairs.Append(("id", "a")).Append(("length", "1 m")).DistinctBy(pair => pair.Item1)
             .Select(pair => $"{pair.Item1}: {pair.Item2}")) + " }");
 
-    private static readonly Gen<string> Documents = Gen.Select(Gen.OneOf(TopLines).Array[0, 3], Runs.Array[1, 3], (lines, runs) => string.Join('\n',
+    private static readonly Gen<string> Documents = Gen.Select(Gen.OneOf(TopLines).Array[0, 2], Runs.Array[1, 2], (lines, runs) => string.Join('\n',
         lines.Append("plan-format: 1").Append($"runs: [{string.Join(", ", runs)}]").DistinctBy(line => line[..line.IndexOf(':', StringComparison.Ordinal)])));
 
     public static TheoryData<string, string> Files => [.. FilesIn("Bad"), .. FilesIn("Good")];

@@ -1,4 +1,5 @@
 using System.Text;
+using Auditor.Testing;
 using CsCheck;
 
 namespace Auditor.Documents.Tests;
@@ -57,6 +58,31 @@ public class YamlReaderProperties
             }
         },
         iter: 5_000);
+
+    [Fact]
+    public void No_slip_in_a_good_file_makes_anything_throw()
+    {
+        var good = File.ReadAllText(Repository.PathOf($"{Plan.Files}/Good/everything.yaml"));
+        var slips = Gen.Select(Gen.Int[0, good.Length], Gen.Int[0, 8], Fragments).Array[1, 4];
+        slips.Sample(
+            cuts =>
+            {
+                var text = cuts.Aggregate(good, (text, cut) =>
+                {
+                    var at = Math.Min(cut.Item1, text.Length);
+                    return text.Remove(at, Math.Min(cut.Item2, text.Length - at)).Insert(at, cut.Item3);
+                });
+                var node = Yaml.Read(text, out var problems);
+                Assert.True(node is not null || problems.HasErrors);
+                if (node is not null)
+                {
+                    Plan.Schema.Validate(node, problems);
+                }
+
+                Assert.NotNull(ProblemText.Render(problems.All));
+            },
+            iter: 2_000);
+    }
 
     [Fact]
     public void Every_scalar_is_stated_by_its_span() => Documents.Sample(text =>

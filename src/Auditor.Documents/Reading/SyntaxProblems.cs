@@ -27,7 +27,7 @@ internal static class SyntaxProblems
         ("expected ',' or '}'", "a comma or `}` is expected here", "separate the entries by commas and close the brace"),
         ("expected ',' or ']'", "a comma or `]` is expected here", "separate the items by commas and close the bracket"),
         ("expected node content", "a value is expected here", "write the value, or close what was opened before"),
-        ("end of stream", "the quoted text that starts here is not closed", "add the closing quote"),
+        ("quoted scalar, found unexpected end of stream", "the quoted text that starts here is not closed", "add the closing quote"),
         ("unexpected document indicator", "the quoted text is not closed before the document ends", "add the closing quote"),
         ("unknown escape", "an escape that means nothing", EscapeHelp),
         ("hexadecimal", "an escape without its hexadecimal digits", EscapeHelp),
@@ -35,15 +35,14 @@ internal static class SyntaxProblems
         ("cannot start any token", "a character that no value can start with", "put quotes around the value"),
         ("block scalar", "the text block does not start or indent as it should", "put nothing after `|` or `>`, and indent all its lines alike"),
         ("wrong indentation", "the quoted text that starts here is not closed on its line", "add the closing quote, or indent its further lines"),
+        ("directive", "a directive that cannot be read", "directives are not used here: remove the line"),
         ("comment", "a comment that does not stand apart", "put a blank before the `#`"),
         ("anchor", "an anchor or alias that cannot be read", "anchors and aliases are not used here: write the value out"),
         ("alias", "an anchor or alias that cannot be read", "anchors and aliases are not used here: write the value out"),
         ("tag", "a tag that cannot be read", "tags are not used here: put quotes around a value that starts with `!`"),
-        ("directive", "a directive that cannot be read", "directives are not used here: remove the line"),
         ("YAML document", "a directive that cannot be read", "directives are not used here: remove the line"),
         ("<document start>", "something is left over after the end of the value", "indent it as part of the value, or remove it"),
         ("<document end>", "something is left over after the end of the value", "indent it as part of the value, or remove it"),
-        ("content after '...'", "something is left over after the end of the document", "remove it"),
     ];
 
     /// <summary>Words a fault that the parser has placed.</summary>
@@ -64,7 +63,7 @@ internal static class SyntaxProblems
             return Make("a bracket is closed that was not opened", new SourceSpan(source, start, start + 1), "remove it, or open it before", null);
         }
 
-        var (_, message, help) = Array.Find(Wordings, wording => fault.Message.Contains(wording.Holds, StringComparison.Ordinal));
+        var (_, message, help) = Array.Find(Wordings, wording => fault.Message.Contains(wording.Holds, StringComparison.OrdinalIgnoreCase));
         return Make(message ?? "the text is not YAML from here on", new SourceSpan(source, start, end),
             help ?? "look for a missing quote, bracket or colon, or for uneven indentation", openBracket);
     }

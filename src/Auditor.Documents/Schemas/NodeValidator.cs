@@ -37,6 +37,12 @@ internal sealed class NodeValidator(Func<JsonSchema, QuantityRule?> ruleOf) : Js
             errors = [.. errors, new ValidationError(ValidationErrorKind.DateExpected, propertyName, propertyPath, token, schema)];
         }
 
+        if (schema.Pattern is { } pattern && pattern.EndsWith('$') && token.Type == JTokenType.String && token.Value<string>()!.EndsWith('\n'))
+        {
+            // By the standard `$` is the end of the text; to the validator it is also the place before a last line break.
+            errors = [.. errors, new ValidationError(ValidationErrorKind.PatternMismatch, propertyName, propertyPath, token, schema)];
+        }
+
         // By the standard, required keys are asked of mappings only.
         return errors.Count == 0 || token is JObject
             ? errors

@@ -26,6 +26,11 @@ internal static class SchemaKeywords
             throw Fault(keywords, $"the keyword `{unsupported}` is not supported");
         }
 
+        if (keywords["items"] is JArray)
+        {
+            throw Fault(keywords, "`items` takes one schema for all items");
+        }
+
         if (keywords["format"] is JValue format && format.Value as string != "date")
         {
             throw Fault(keywords, "`format` knows `date` only");
@@ -60,8 +65,7 @@ internal static class SchemaKeywords
     {
         "properties" or "patternProperties" or "definitions" or "$defs" => keyword.Value.Children<JProperty>().Select(property => property.Value),
         "oneOf" or "anyOf" or "allOf" => keyword.Value.Children(),
-        "items" => keyword.Value is JArray items ? items.Children() : [keyword.Value],
-        "additionalProperties" or "additionalItems" or "not" => [keyword.Value],
+        "items" or "additionalProperties" or "not" => [keyword.Value],
         _ => Enumerable.Empty<JToken>(),
     });
 

@@ -123,7 +123,7 @@ internal static class SchemaProblems
             ValidationErrorKind.NumberTooBig => ("out-of-range", $"{name} must be {MostOf(schema)}"),
             ValidationErrorKind.NumberNotMultipleOf or ValidationErrorKind.IntegerNotMultipleOf => ("out-of-range", $"{name} must be a multiple of {schema.MultipleOf}"),
             ValidationErrorKind.TooFewItems => ("too-few", $"{name} must have at least {Count(schema.MinItems, "item")}"),
-            ValidationErrorKind.TooManyItems or ValidationErrorKind.TooManyItemsInTuple => ("too-many", $"{name} must have at most {Count(schema.MaxItems, "item")}"),
+            ValidationErrorKind.TooManyItems => ("too-many", $"{name} must have at most {Count(schema.MaxItems, "item")}"),
             ValidationErrorKind.TooFewProperties => ("too-few", $"{name} must have at least {Count(schema.MinProperties, "key")}"),
             ValidationErrorKind.TooManyProperties => ("too-many", $"{name} must have at most {Count(schema.MaxProperties, "key")}"),
             _ => ("wrong-form", $"{name} does not fit the schema"),

@@ -108,7 +108,7 @@ internal sealed partial class Binder
             return null;
         }
 
-        if (then.Type.Equals(otherwise.Type) && then.Type.Kind != FormulaKind.Group)
+        if (then.Type.Equals(otherwise.Type))
         {
             return new ChooseTerm(Joined(then.Type, otherwise), span, condition, then, otherwise);
         }
@@ -118,7 +118,7 @@ internal sealed partial class Binder
     }
 
     private GivenTerm? BindGiven(SourceSpan span, ScriptExpression argument, Site site) =>
-        Bind(argument, site) is { } term ? new GivenTerm(span, term) : null;
+        BindAny(argument, site) is { } term ? new GivenTerm(span, term) : null;
 
     private NumericTerm? BindNumeric(SourceSpan span, string name, ScriptExpression argument, Site site)
     {
@@ -128,6 +128,12 @@ internal sealed partial class Binder
         }
 
         var dimension = term.Type.Dimension;
+        if (name == "abs" && dimension.IsTemperature)
+        {
+            Fail(FormulaMessages.Needs(term.Span, "`abs`", NoTemperature, term.Type));
+            return null;
+        }
+
         if (name == "sqrt" && !dimension.TryPower(0.5, out dimension))
         {
             Fail(FormulaMessages.Overflow(span));

@@ -141,7 +141,7 @@ internal sealed partial class Binder
             _ => (Aggregate.Any, FormulaType.Flag),
         };
         return how == Aggregate.Sum && item.Type.Dimension.IsTemperature
-            ? Fail(FormulaMessages.Needs(item.Span, "`sum_of`", "anything but a temperature", item.Type))
+            ? Fail(FormulaMessages.Needs(item.Span, "`sum_of`", NoTemperature, item.Type))
             : new AggregateTerm(type, span, how, collection, item, inner.UsesOuter);
     }
 }

@@ -10,69 +10,49 @@ namespace Auditor.Formulas.Binding;
 /// <summary>Numbers, quantities, texts and flags written out.</summary>
 internal sealed partial class Binder
 {
-    private LiteralTerm? BindLiteral(ScriptLiteral literal)
+    private Term? BindLiteral(ScriptLiteral literal)
     {
         var span = SpanOf(literal);
-        switch (literal.Value)
-        {
-            case string text:
-                return new LiteralTerm(FormulaType.Text, span, Value.Of(text));
-            case bool flag:
-                return new LiteralTerm(FormulaType.Flag, span, Value.Of(flag));
-            case null:
-                Fail(FormulaMessages.NotAllowed(span, "`null`"));
-                return null;
-            default:
-                return NumberOf(literal) is { } number ? new LiteralTerm(FormulaType.Number, span, Value.Of(number)) : null;
-        }
-    }
-
-    private double? NumberOf(ScriptLiteral literal)
-    {
-        var written = source.Text[literal.Span.Start.Offset..Math.Min(literal.Span.End.Offset + 1, source.Text.Length)];
-        if (written.Length > 0 && char.IsAsciiLetter(written[^1]))
-        {
-            Fail(FormulaMessages.NumberSuffix(SpanOf(literal), written));
-            return null;
-        }
-
         return literal.Value switch
         {
-            int number => number,
-            long number => number,
-            double number => number,
-            BigInteger number => (double)number,
-            _ => null,
+            string text => new LiteralTerm(FormulaType.Text, span, Value.Of(text)),
+            bool flag => new LiteralTerm(FormulaType.Flag, span, Value.Of(flag)),
+            null => Fail(FormulaMessages.NotAllowed(span, "`null`")),
+            _ when NumberOf(literal) is { } number => new LiteralTerm(FormulaType.Number, span, Value.Of(number)),
+            _ => Fail(FormulaMessages.NotAllowed(span, "this")),
         };
     }
 
+    private static double? NumberOf(ScriptLiteral literal) => literal.Value switch
+    {
+        int number => number,
+        long number => number,
+        double number => number,
+        BigInteger number => (double)number,
+        _ => null,
+    };
+
     /// <summary>A number directly followed by a name: the name must be a unit.</summary>
-    private LiteralTerm? BindQuantityLiteral(ScriptBinaryExpression pair, ScriptLiteral literal, bool negative)
+    private Term? BindQuantityLiteral(ScriptBinaryExpression pair, ScriptLiteral literal, bool negative)
     {
         if (pair.Right is ScriptBinaryExpression { Operator: ScriptBinaryOperator.Power })
         {
-            Fail(FormulaMessages.PowerBrackets(SpanOf(pair)));
-            return null;
+            return Fail(FormulaMessages.PowerBrackets(SpanOf(pair)));
         }
 
-        if (pair.Right is not ScriptVariable name)
+        if (NumberOf(literal) is not { } number || pair.Right is not ScriptVariable name)
         {
-            Fail(FormulaMessages.SideBySide(SpanOf(pair)));
-            return null;
+            return Fail(FormulaMessages.SideBySide(SpanOf(pair)));
         }
 
         if (UnitCatalog.FindIdentifier(name.Name) is not { } unit)
         {
-            Fail(FormulaMessages.UnknownUnit(SpanOf(name), name.Name));
-            return null;
+            return Fail(FormulaMessages.UnknownUnit(SpanOf(name), name.Name));
         }
 
-        if (NumberOf(literal) is not { } number)
-        {
-            return null;
-        }
-
-        var quantity = Quantity.Of(negative ? -number : number, unit);
-        return new LiteralTerm(FormulaType.Of(quantity.Dimension), SpanOf(pair), Value.Of(quantity.Value), unit);
+        var quantity = unit.ToCoherent(negative ? -number : number);
+        return double.IsFinite(quantity)
+            ? new LiteralTerm(FormulaType.Of(unit.Dimension), SpanOf(pair), Value.Of(quantity), unit)
+            : Fail(FormulaMessages.NumberTooLarge(SpanOf(pair)));
     }
 }

@@ -12,6 +12,7 @@ namespace Auditor.Formulas.Binding;
 internal sealed partial class Binder
 {
     private const string EmptyList = "none";
+    private const string OuterSubject = "this";
 
     private Term? BindName(ScriptExpression expression, Site site)
     {
@@ -37,6 +38,9 @@ internal sealed partial class Binder
             case ScriptVariable variable:
                 parts.Add(variable.Name);
                 return true;
+            case ScriptThisExpression:
+                parts.Add(OuterSubject);
+                return true;
             case ScriptMemberExpression { Target: { } target, Member: { } member }:
                 var flat = Flatten(target, parts);
                 parts.Add(member.Name);
@@ -54,9 +58,9 @@ internal sealed partial class Binder
     private Term? BindPath(SourceSpan span, List<string> parts, int from, Site site)
     {
         var head = parts[from];
-        if (head == "this" && from < parts.Count - 1)
+        if (head == OuterSubject)
         {
-            return BindOuter(span, parts, from, site);
+            return from == parts.Count - 1 ? Fail(FormulaMessages.WayAlone(span, head)) : BindOuter(span, parts, from, site);
         }
 
         if (site.Shape.Way(head) is { } way)

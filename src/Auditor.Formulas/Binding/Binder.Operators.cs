@@ -10,6 +10,8 @@ namespace Auditor.Formulas.Binding;
 /// <summary>Operators, with the check that units fit.</summary>
 internal sealed partial class Binder
 {
+    private const string NoTemperature = "anything but a temperature";
+
     private Term? BindUnary(ScriptUnaryExpression unary, Site site)
     {
         var span = SpanOf(unary);
@@ -18,11 +20,18 @@ internal sealed partial class Binder
             case ScriptUnaryOperator.Not:
                 return BindFlag(unary.Right!, site, "`!`") is { } flag ? new NotTerm(span, flag) : null;
             case ScriptUnaryOperator.Negate:
-                return BindQuantity(unary.Right!, site, "`-`") is { } number ? new NegateTerm(span, number) : null;
+                return BindNegative(span, unary.Right!, site);
             default:
                 return Fail(FormulaMessages.NotAllowed(span, "this sign"));
         }
     }
+
+    private Term? BindNegative(SourceSpan span, ScriptExpression operand, Site site) => BindQuantity(operand, site, "`-`") switch
+    {
+        null => null,
+        { Type.Dimension.IsTemperature: true } number => Fail(FormulaMessages.Needs(number.Span, "`-`", NoTemperature, number.Type)),
+        var number => new NegateTerm(span, number),
+    };
 
     private Term? BindBinary(ScriptBinaryExpression binary, Site site)
     {
@@ -157,7 +166,7 @@ internal sealed partial class Binder
             return null;
         }
 
-        if (left.Type.Equals(right.Type) && left.Type.Kind != FormulaKind.Group)
+        if (left.Type.Equals(right.Type))
         {
             return new CoalesceTerm(Joined(left.Type, right), SpanOf(binary), left, right);
         }

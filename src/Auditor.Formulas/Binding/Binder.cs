@@ -33,11 +33,18 @@ internal sealed partial class Binder(ScalarNode source, FormulaWorld world, Prob
         return root is null ? null : new Formula(source, root, [.. binder._references]);
     }
 
-    private Term? Bind(ScriptExpression expression, Site site) => expression switch
+    /// <summary>Binds anything that gives a value; a group of inputs gives none.</summary>
+    private Term? Bind(ScriptExpression expression, Site site)
+    {
+        var term = BindAny(expression, site);
+        return term?.Type.Kind == FormulaKind.Group ? Fail(FormulaMessages.GroupAlone(term.Span, term.Span.Text)) : term;
+    }
+
+    private Term? BindAny(ScriptExpression expression, Site site) => expression switch
     {
         ScriptLiteral literal => BindLiteral(literal),
-        ScriptVariable or ScriptMemberExpression => BindName(expression, site),
-        ScriptNestedExpression { Expression: { } inner } => Bind(inner, site),
+        ScriptVariable or ScriptThisExpression or ScriptMemberExpression => BindName(expression, site),
+        ScriptNestedExpression { Expression: { } inner } => BindAny(inner, site),
         ScriptUnaryExpression unary => BindUnary(unary, site),
         ScriptBinaryExpression binary => BindBinary(binary, site),
         ScriptFunctionCall call => BindCall(call, site),

@@ -13,6 +13,9 @@ internal static class FormulaMessages
     public static Problem TooLong(SourceSpan span, int most) => Problem.Error(
         "formula-too-long", $"a formula may have at most {most} characters", span, "split it into quantities of their own");
 
+    public static Problem TooDeep(SourceSpan span, int most) => Problem.Error(
+        "formula-too-deep", $"a formula may have at most {most} terms within one another or in one chain", span, "split it into quantities of their own");
+
     public static Problem Empty(SourceSpan span) => Problem.Error("formula-empty", "the formula is empty", span, "write an expression");
 
     public static Problem NotAllowed(SourceSpan span, string what) => Problem.Error(
@@ -48,6 +51,9 @@ internal static class FormulaMessages
 
     public static Problem NumberSuffix(SourceSpan span, string text) => Problem.Error(
         "number-suffix", $"`{text}` is not a number", span, "put a space between a number and its unit");
+
+    public static Problem NumberTooLarge(SourceSpan span) => Problem.Error(
+        "number-too-large", "this number is too large to calculate with", span, "choose a larger unit");
 
     public static Problem PowerBrackets(SourceSpan span) => Problem.Error(
         "power-brackets", "it is not clear what this power is of", span, "put brackets around a negative base, a unit or a further power");

@@ -11,7 +11,10 @@ internal static class FormulaParser
 {
     public const int MostCharacters = 2000;
 
-    private static readonly ParserOptions Options = new() { ExpressionDepthLimit = 60 };
+    /// <summary>Terms within one another at the most, a chain of operators included; keeps binding and evaluation within the stack.</summary>
+    public const int MostDeep = 60;
+
+    private static readonly ParserOptions Options = new() { ExpressionDepthLimit = MostDeep };
     private static readonly LexerOptions Lexing = new() { Mode = ScriptMode.ScriptOnly, Lang = ScriptLang.Scientific };
 
     /// <summary>The expression, or null with a problem added.</summary>
@@ -30,10 +33,15 @@ internal static class FormulaParser
             return null;
         }
 
+        if (!FormulaTokens.Check(source, Lexing, problems))
+        {
+            return null;
+        }
+
         var template = Template.Parse(text, "formula", Options, Lexing);
         if (template.HasErrors)
         {
-            problems.Add(FormulaMessages.Unreadable(SpanOfError(source, template.Messages[0].Span)));
+            problems.Add(ErrorOf(source, template.Messages[0]));
             return null;
         }
 
@@ -72,12 +80,19 @@ internal static class FormulaParser
         _ => node.Span.End.Offset + 1,
     };
 
+    private static Problem ErrorOf(ScalarNode source, LogMessage error)
+    {
+        var span = SpanOfError(source, error.Span);
+        return error.Message.Contains("depth limit", StringComparison.Ordinal) ? FormulaMessages.TooDeep(span, MostDeep) : FormulaMessages.Unreadable(span);
+    }
+
     private static SourceSpan SpanOfError(ScalarNode source, Scriban.Parsing.SourceSpan span) =>
         span.End.Offset < span.Start.Offset || span.Start.Offset >= source.Text.Length || (span.Start.Offset == 0 && span.End.Offset == 0)
             ? source.Span
             : SpanOf(source, span.Start.Offset, span.End.Offset + 1);
 
-    private static SourceSpan SpanOf(ScalarNode source, int start, int end)
+    /// <summary>Where a stretch of the formula stands in the rule file; cut to the formula.</summary>
+    public static SourceSpan SpanOf(ScalarNode source, int start, int end)
     {
         var from = Math.Clamp(start, 0, source.Text.Length);
         return source.SpanOf(from, Math.Clamp(end, from, source.Text.Length) - from);

@@ -23,8 +23,8 @@ internal sealed class Tracer : ITrace
     public void Read(SourceSpan term, ParameterSlot slot, in Value value) =>
         _readings.Add(new Reading(term, value, slot.Unit) { Parameter = slot });
 
-    public void Read(SourceSpan term, Lookup lookup, IReadOnlyList<TableCell> cells, in Value value) =>
-        _readings.Add(new Reading(term, value, lookup.Unit) { Lookup = lookup, Cells = cells });
+    public void Read(SourceSpan term, Lookup lookup, IReadOnlyList<TableCell> cells, in Value value, Quantities.Unit? unit) =>
+        _readings.Add(new Reading(term, value, unit) { Lookup = lookup, Cells = cells });
 
     public void Read(SourceSpan term, Curve curve, string reading, in Value value, Quantities.Unit unit) =>
         _readings.Add(new Reading(term, value, unit) { Curve = curve, CurveReading = reading });

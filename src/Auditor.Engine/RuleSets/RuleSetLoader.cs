@@ -56,14 +56,15 @@ public sealed class RuleSetLoader
         var curves = new CurveSet();
         Each(files, "lookup", (file, _) => LookupReader.Read(file.Root, lookups, _problems));
         var tables = new TableReader(lookups, _problems);
-        Each(files, "table", (file, set) => tables.Read(file.Root, replace: set > 0));
-        Each(files, "curve", (file, _) => CurveReader.Read(file.Root, curves, _problems));
+        Each(files, "table", (file, set) => tables.Read(file.Root, set));
+        Each(files, "curve", (file, set) => CurveReader.Read(file.Root, set, curves, _problems));
         foreach (var lookup in lookups.Values)
         {
             lookup.Close();
         }
 
-        return new FormulaWorld(lookups, curves, parameters.ToDictionary(parameter => parameter.Slot.Name, parameter => parameter.Slot));    }
+        return new FormulaWorld(lookups, curves, parameters.ToDictionary(parameter => parameter.Slot.Name, parameter => parameter.Slot));
+    }
 
     private List<Rule> Rules(IReadOnlyList<RuleFile>[] files, RuleReader reader)
     {

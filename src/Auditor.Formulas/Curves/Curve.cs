@@ -39,10 +39,8 @@ public sealed record Curve(
             : Missing($"{Source.Title} gives no time for {current:0.###} A at {rating:0.###} A, which is below its first point");
     }
 
-    private CurveEdge? EdgeFor(double rating) =>
-        ByRating
-            ? Slow.FirstOrDefault(edge => rating <= edge.Rating * (1 + 1e-9))
-            : Slow.FirstOrDefault(edge => Math.Abs(edge.Rating - rating) <= 1e-9 * rating);
+    private CurveEdge? EdgeFor(double rating) => Slow.FirstOrDefault(edge =>
+        rating > 0 && (ByRating ? Comparison.AtMost(rating, edge.Rating) : Comparison.Same(rating, edge.Rating)));
 
     private Value NoRating(double rating) => Missing($"{Source.Title} holds no rating of {rating:0.###} A");
 

@@ -1,4 +1,5 @@
 using Auditor.Formulas.Tables;
+using Auditor.Formulas.Values;
 
 namespace Auditor.Formulas.Curves;
 
@@ -11,14 +12,9 @@ public sealed record CurveEdge(double Rating, IReadOnlyList<CurvePoint> Points, 
     /// <summary>Longest time to open at a current: missing (null) below the first point, the last point's time above the last.</summary>
     public double? TimeAt(double current)
     {
-        if (current < Points[0].Current)
-        {
-            return null;
-        }
-
         for (var i = Points.Count - 1; i >= 0; i--)
         {
-            if (current >= Points[i].Current)
+            if (Comparison.AtLeast(current, Points[i].Current))
             {
                 return i == Points.Count - 1 ? Points[i].Time : Between(Points[i], Points[i + 1], current);
             }
@@ -30,23 +26,21 @@ public sealed record CurveEdge(double Rating, IReadOnlyList<CurvePoint> Points, 
     /// <summary>Least current that opens within a time; null outside the times of the points.</summary>
     public double? CurrentAt(double time)
     {
-        if (time > Points[0].Time || time < Points[^1].Time)
+        if (!Comparison.AtMost(time, Points[0].Time))
         {
             return null;
         }
 
         for (var i = 0; i < Points.Count; i++)
         {
-            if (Points[i].Time <= time)
+            if (Comparison.AtMost(Points[i].Time, time))
             {
-                return i == 0 || Points[i].Time == time ? FirstAt(i) : CurrentBetween(Points[i - 1], Points[i], time);
+                return i == 0 || Comparison.Same(Points[i].Time, time) ? Points[i].Current : CurrentBetween(Points[i - 1], Points[i], time);
             }
         }
 
         return null;
     }
-
-    private double FirstAt(int index) => Points[index].Current;
 
     private static double Between(CurvePoint low, CurvePoint high, double current)
     {

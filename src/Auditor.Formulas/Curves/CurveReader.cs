@@ -7,38 +7,66 @@ namespace Auditor.Formulas.Curves;
 /// <summary>Makes curves from files that their schema has accepted.</summary>
 public static class CurveReader
 {
-    /// <summary>Reads one curve into a set.</summary>
-    public static void Read(MappingNode file, CurveSet curves, Problems problems)
+    /// <summary>Reads one curve.</summary>
+    /// <param name="file">Root of the file.</param>
+    /// <param name="set">Number of its set in the chain.</param>
+    /// <param name="curves">Receives the curve.</param>
+    /// <param name="problems">Receives what is wrong.</param>
+    public static void Read(MappingNode file, int set, CurveSet curves, Problems problems)
     {
-        var trust = TrustWords.Find(file.Text("trust")!)!.Value;
-        var source = new TableSource(file.Text("curve")!, file.Text("title")!, file.Texts("source"), file.Span.Source.Path);
+        var id = file.Scalar("curve")!;
+        var source = new TableSource(id.Text, file.Text("title")!, file.Texts("source"), file.Span.Source.Path);
         var byRating = file.Text("of") == "rating";
-        curves.Add(new Curve(
-            source, file.Texts("standard"), file.Text("type"), byRating, Edges(file, "slow", trust, problems), Edges(file, "fast", trust, problems)));
+        var curve = new Curve(
+            source, file.Texts("standard"), file.Text("type"), byRating, Edges(file, "slow", byRating, problems), Edges(file, "fast", byRating, problems));
+        if (curves.Add(curve, set) is { } rival)
+        {
+            problems.Add(TableMessages.SecondCurve(id.Span, id.Text, rival.Source.Path));
+        }
     }
 
-    private static List<CurveEdge> Edges(MappingNode file, string which, Trust trust, Problems problems)
+    private static List<CurveEdge> Edges(MappingNode file, string which, bool byRating, Problems problems)
     {
         var edges = new List<CurveEdge>();
-        foreach (var edge in file.Mappings(which))
+        foreach (var node in file.Mappings(which))
         {
-            var rating = edge.Scalar("ratings-up-to") ?? edge.Scalar("rating")!;
-            if (!QuantityText.TryParse(rating.Text, out var stated, out _) || stated!.Quantity.Dimension != Dimension.Current)
+            if (Rating(node, byRating, problems) is not var (rating, span))
             {
-                problems.Add(TableMessages.NotNumber(rating.Span, "A, with its unit,"));
                 continue;
             }
 
-            var points = Points(edge, problems);
+            if (edges.Exists(edge => edge.Rating == rating))
+            {
+                problems.Add(TableMessages.SecondRating(span));
+            }
+
+            var points = Points(node, problems);
             if (points.Count > 0)
             {
-                var own = edge.Text("trust") is { } word ? TrustWords.Find(word)!.Value : trust;
-                edges.Add(new CurveEdge(stated.Quantity.Value, points, own));
+                edges.Add(new CurveEdge(rating, points, TrustWords.Find(node.Text("trust") ?? file.Text("trust")!)!.Value));
             }
         }
 
         edges.Sort((a, b) => a.Rating.CompareTo(b.Rating));
         return edges;
+    }
+
+    private static (double Rating, SourceSpan Span)? Rating(MappingNode edge, bool byRating, Problems problems)
+    {
+        var key = byRating ? "ratings-up-to" : "rating";
+        if (edge.Scalar(key) is not { } scalar || edge.Find(byRating ? "rating" : "ratings-up-to") is not null)
+        {
+            problems.Add(TableMessages.NoRating(edge.Span, key));
+            return null;
+        }
+
+        if (QuantityText.TryParse(scalar.Text, out var stated, out _) && stated.Quantity.Dimension == Dimension.Current)
+        {
+            return (stated.Quantity.Value, scalar.Span);
+        }
+
+        problems.Add(TableMessages.NotNumber(scalar.Span, "A, with its unit,"));
+        return null;
     }
 
     private static List<CurvePoint> Points(MappingNode edge, Problems problems)

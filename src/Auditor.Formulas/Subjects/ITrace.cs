@@ -18,8 +18,8 @@ public interface ITrace
     /// <summary>A parameter was read.</summary>
     void Read(SourceSpan term, ParameterSlot slot, in Value value);
 
-    /// <summary>A table was looked up; the cells are those that the value was taken or interpolated from.</summary>
-    void Read(SourceSpan term, Lookup lookup, IReadOnlyList<TableCell> cells, in Value value);
+    /// <summary>A table was looked up; the cells are those that the value was taken or interpolated from, the unit is that of the value.</summary>
+    void Read(SourceSpan term, Lookup lookup, IReadOnlyList<TableCell> cells, in Value value, Unit? unit);
 
     /// <summary>A curve was read.</summary>
     void Read(SourceSpan term, Curve curve, string reading, in Value value, Unit unit);

@@ -31,12 +31,11 @@ public sealed class Lookup(string name, string about, IReadOnlyList<LookupKey> k
     /// <summary>What to give instead of a missing figure.</summary>
     public string WhenMissing { get; } = whenMissing;
 
-    /// <summary>Enters a cell.</summary>
+    /// <summary>Enters a cell; a cell already there gives way, as when a house set overrides a table.</summary>
     /// <param name="path">One value per key: a <see cref="double"/> in coherent units or a word.</param>
     /// <param name="cell">The cell.</param>
-    /// <param name="replace">Whether a cell already there gives way; that is how a house set overrides a table.</param>
     /// <returns>The cell that was there before, or null.</returns>
-    public TableCell? Enter(IReadOnlyList<object> path, TableCell cell, bool replace)
+    public TableCell? Enter(IReadOnlyList<object> path, TableCell cell)
     {
         var level = _root;
         foreach (var part in path)
@@ -45,11 +44,7 @@ public sealed class Lookup(string name, string about, IReadOnlyList<LookupKey> k
         }
 
         var before = level.Cell;
-        if (before is null || replace)
-        {
-            level.Cell = cell;
-        }
-
+        level.Cell = cell;
         return before;
     }
 
@@ -66,8 +61,11 @@ public sealed class Lookup(string name, string about, IReadOnlyList<LookupKey> k
         return reading.Read(_root, arguments, 0);
     }
 
-    /// <summary>The least tabulated value of the only key that is not below <paramref name="number"/>; null when there is none.</summary>
-    public double? RoundUp(double number) => _root.NextUp(number)?.Number;
+    /// <summary>
+    /// The least tabulated value of the only key that is not below <paramref name="number"/>, in coherent units, with its cell; null when there is none.
+    /// </summary>
+    public (double Key, TableCell Cell)? RoundUp(double number) =>
+        _root.NextUp(number) is { } next && _root.At(next)?.Cell is { } cell ? (next.Number, cell) : null;
 
     /// <summary>All cells, in the order of their keys.</summary>
     public IEnumerable<(IReadOnlyList<object> Keys, TableCell Cell)> Cells() => _root.Cells([]);

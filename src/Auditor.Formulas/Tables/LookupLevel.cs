@@ -1,3 +1,5 @@
+using Auditor.Formulas.Values;
+
 namespace Auditor.Formulas.Tables;
 
 /// <summary>One level of a lookup's key tree.</summary>
@@ -8,9 +10,6 @@ internal sealed class LookupLevel
 
     /// <summary>The cell, at the last level.</summary>
     public TableCell? Cell { get; set; }
-
-    /// <summary>Tabulated numbers of this level, ascending.</summary>
-    public IReadOnlyList<KeyValue> Ordered => _ordered;
 
     public LookupLevel Open(KeyValue key)
     {
@@ -25,6 +24,17 @@ internal sealed class LookupLevel
 
     public LookupLevel? At(KeyValue key) => _next.GetValueOrDefault(key);
 
+    /// <summary>The tabulated number that is the given one within the slack of comparisons, so that a size that was computed finds its row.</summary>
+    public LookupLevel? At(double number)
+    {
+        if (At(KeyValue.Of(number)) is { } exact)
+        {
+            return exact;
+        }
+
+        return NextUp(number) is { } next && Comparison.Same(next.Number, number) ? At(next) : null;
+    }
+
     public void Close()
     {
         _ordered = [.. _next.Keys.Where(key => key.Word is null).OrderBy(key => key.Number)];
@@ -37,10 +47,9 @@ internal sealed class LookupLevel
     /// <summary>The least tabulated number not below the given one, or null.</summary>
     public KeyValue? NextUp(double number)
     {
-        var sought = KeyValue.Of(number);
         foreach (var key in _ordered)
         {
-            if (key.Number >= sought.Number)
+            if (Comparison.AtLeast(key.Number, number))
             {
                 return key;
             }
@@ -52,10 +61,9 @@ internal sealed class LookupLevel
     /// <summary>The greatest tabulated number below the given one, or null.</summary>
     public KeyValue? NextDown(double number)
     {
-        var sought = KeyValue.Of(number);
         for (var i = _ordered.Length - 1; i >= 0; i--)
         {
-            if (_ordered[i].Number < sought.Number)
+            if (!Comparison.AtLeast(_ordered[i].Number, number))
             {
                 return _ordered[i];
             }

@@ -43,8 +43,13 @@ public static class LookupReader
             problems.Add(TableMessages.SecondBetween(between!.Span));
         }
 
-        var lookup = new Lookup(
-            name, file.Text("about")!, keys, UnitOf(file.Mapping("value")!.Scalar("unit"), problems), file.Text("when-missing") ?? "");
+        var value = file.Mapping("value")!.Scalar("unit");
+        foreach (var key in keys.Where(key => key.Between != Between.None && (key.Unit is null || (value is null && key.Between != Between.NextRow))))
+        {
+            problems.Add(TableMessages.BetweenWords(between!.Find(key.Name)!.Span, key.Unit is null ? $"two words of `{key.Name}`" : "two words of the table"));
+        }
+
+        var lookup = new Lookup(name, file.Text("about")!, keys, UnitOf(value, problems), file.Text("when-missing") ?? "");
         if (!lookups.TryAdd(name, lookup))
         {
             problems.Add(TableMessages.SecondLookup(file.Find("lookup")!.Span, name));

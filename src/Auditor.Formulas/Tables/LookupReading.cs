@@ -21,7 +21,7 @@ internal readonly struct LookupReading(Lookup lookup, ICollection<TableCell>? ce
             return found is null ? NoRow(level, arguments, depth) : Read(found, arguments, depth + 1);
         }
 
-        var exact = level.At(KeyValue.Of(argument.Number));
+        var exact = level.At(argument.Number);
         if (exact is not null)
         {
             return Read(exact, arguments, depth + 1);

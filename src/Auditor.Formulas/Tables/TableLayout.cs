@@ -43,6 +43,11 @@ internal sealed class TableLayout
             problems.Add(TableMessages.KeyNotOnce(file.Find("table")!.Span, key.Name));
         }
 
+        if (file.Find("columns") is null != file.Find("across") is null)
+        {
+            problems.Add(TableMessages.ColumnsOrAcross((file.Find("columns") ?? file.Find("across"))!.Span));
+        }
+
         var columns = across.Count == 0 ? [new Column("", [])] : ColumnsOf(file, lookup, across, problems);
         return problems.All.Count == before ? new TableLayout(lookup, fixedKeys, down, columns) : null;
     }

@@ -26,6 +26,12 @@ internal static class TableMessages
     public static Problem SecondBetween(SourceSpan span) => Problem.Error(
         "between-twice", "only one key may have anything between its rows", span, "leave the others at `none`");
 
+    public static Problem BetweenWords(SourceSpan span, string what) => Problem.Error(
+        "between-words", $"nothing lies between {what}", span, "only numbers have something between them; leave it at `none`");
+
+    public static Problem ColumnsOrAcross(SourceSpan span) => Problem.Error(
+        "columns-without-across", "`columns` and `across` belong together", span, "`across` names the keys, `columns` gives their values");
+
     public static Problem RowLength(SourceSpan span, int wanted, int got) => Problem.Error(
         "table-row-length", $"this row has {got} values, and {wanted} are due", span, "a row holds its keys, then one value for each column; write null for an empty cell");
 
@@ -37,6 +43,15 @@ internal static class TableMessages
 
     public static Problem SecondCell(SourceSpan span, string keys, string other) => Problem.Error(
         "duplicate-cell", $"the figure for {keys} is given a second time", span, $"it stands already in {other}; a house set may override a table, a set may not contradict itself");
+
+    public static Problem NoRating(SourceSpan span, string key) => Problem.Error(
+        "curve-rating", $"these points need `{key}`, and nothing else, to say what they hold for", span,
+        "curves in multiples of the rating say `ratings-up-to`, curves in amperes `rating`");
+
+    public static Problem SecondRating(SourceSpan span) => Problem.Error("curve-rating-twice", "there are points for this rating already", span, null);
+
+    public static Problem SecondCurve(SourceSpan span, string id, string other) => Problem.Error(
+        "duplicate-curve", $"curve `{id}` holds for devices that {other} holds for", span, "a house set may replace a curve, a set may not contradict itself");
 
     public static Problem CurveOrder(SourceSpan span) => Problem.Error(
         "curve-order", "along a curve the current grows and the time falls", span, "order the points by current; a step has the same current twice");

@@ -5,21 +5,23 @@ namespace Auditor.Formulas.Tables;
 /// <summary>Enters the figures of table files that their schema has accepted into their lookups.</summary>
 public sealed class TableReader(IReadOnlyDictionary<string, Lookup> lookups, Problems problems)
 {
-    private readonly Dictionary<string, string> _pathOf = [];
+    private readonly Dictionary<string, (string Path, int Set)> _tables = [];
+    private readonly Dictionary<TableSource, int> _setOf = new(ReferenceEqualityComparer.Instance);
 
     /// <summary>Enters one table.</summary>
     /// <param name="file">Root of the file.</param>
-    /// <param name="replace">Whether its cells go before cells already there, as those of a house set do.</param>
-    public void Read(MappingNode file, bool replace)
+    /// <param name="set">Number of its set in the chain: the cells of a later set go before those of an earlier one; within a set a cell stands once.</param>
+    public void Read(MappingNode file, int set)
     {
         var id = file.Scalar("table")!;
         var path = file.Span.Source.Path;
-        if (!_pathOf.TryAdd(id.Text, path) && !replace)
+        if (_tables.TryGetValue(id.Text, out var other) && other.Set == set)
         {
-            problems.Add(TableMessages.SecondTable(id.Span, id.Text, _pathOf[id.Text]));
+            problems.Add(TableMessages.SecondTable(id.Span, id.Text, other.Path));
             return;
         }
 
+        _tables[id.Text] = (path, set);
         var name = file.Scalar("lookup")!;
         if (!lookups.TryGetValue(name.Text, out var lookup))
         {
@@ -31,11 +33,12 @@ public sealed class TableReader(IReadOnlyDictionary<string, Lookup> lookups, Pro
         if (layout is not null)
         {
             var source = new TableSource(id.Text, file.Text("title")!, file.Texts("source"), path);
-            Enter(file, lookup, layout, source, replace);
+            _setOf.Add(source, set);
+            Enter(file, lookup, layout, source);
         }
     }
 
-    private void Enter(MappingNode file, Lookup lookup, TableLayout layout, TableSource source, bool replace)
+    private void Enter(MappingNode file, Lookup lookup, TableLayout layout, TableSource source)
     {
         var trust = TrustWords.Find(file.Text("trust")!)!.Value;
         var rowTrust = file.Mapping("row-trust");
@@ -54,20 +57,20 @@ public sealed class TableReader(IReadOnlyDictionary<string, Lookup> lookups, Pro
             for (var i = 0; i < layout.Columns.Count; i++)
             {
                 var place = new CellPlace(source, string.Join(", ", keys.Select(key => key.Text)), layout.Columns[i].Title, ownTrust, line);
-                EnterCell(lookup, layout.PathOf(keys, i, problems), (ScalarNode)row.Items[layout.Down.Count + i], place, replace);
+                EnterCell(lookup, layout.PathOf(keys, i, problems), (ScalarNode)row.Items[layout.Down.Count + i], place);
             }
         }
     }
 
-    private void EnterCell(Lookup lookup, object[]? path, ScalarNode scalar, CellPlace place, bool replace)
+    private void EnterCell(Lookup lookup, object[]? path, ScalarNode scalar, CellPlace place)
     {
         if (path is null || CellOf(lookup, scalar, place) is not { } cell)
         {
             return;
         }
 
-        var before = lookup.Enter(path, cell, replace);
-        if (before is not null && !replace)
+        var before = lookup.Enter(path, cell);
+        if (before is not null && _setOf[before.Table] == _setOf[place.Table])
         {
             problems.Add(TableMessages.SecondCell(
                 scalar.Span, place.Column.Length == 0 ? place.Row : $"{place.Row} / {place.Column}", $"{before.Table.Path}:{before.Line}"));

@@ -9,7 +9,7 @@ namespace Auditor.Formulas.Terms;
 /// <summary>The least or the greatest of several quantities; missing when any of them is.</summary>
 internal sealed class ExtremeTerm(FormulaType type, SourceSpan span, bool least, IReadOnlyList<Term> operands) : Term(type, span)
 {
-    public override Unit? Unit => operands[0].Unit;
+    public override Unit? Unit => operands.Select(operand => operand.Unit).FirstOrDefault(unit => unit is not null);
 
     public override Value Evaluate(Scope scope)
     {

@@ -19,9 +19,11 @@ internal sealed class RoundUpTerm(SourceSpan span, Lookup series, Term operand) 
             return value;
         }
 
-        if (series.RoundUp(value.Number) is { } next)
+        if (series.RoundUp(value.Number) is var (key, cell))
         {
-            return Value.Of(next, value.Marks);
+            var rounded = Value.Of(key, value.Marks | cell.Trust.Mark());
+            scope.Trace?.Read(Span, series, [cell], rounded, Unit);
+            return rounded;
         }
 
         var asked = QuantityText.Show(value.Number, series.Keys[0].Unit!);

@@ -34,7 +34,7 @@ internal sealed class TableTerm(FormulaType type, SourceSpan span, Lookup lookup
 
         var cells = scope.Trace is null ? null : new List<TableCell>();
         var value = lookup.Find(arguments, cells).With(marks);
-        scope.Trace?.Read(Span, lookup, cells!, value);
+        scope.Trace?.Read(Span, lookup, cells!, value, Unit);
         return value;
     }
 }

@@ -10,6 +10,12 @@ internal static class AuditorProgram
     /// <returns>The exit code.</returns>
     public static int Run(string[] args, TextWriter output, TextWriter error)
     {
+        if (!Directory.Exists(Shipped.Rules.Folder))
+        {
+            error.WriteLine("the rule data that belong beside the program are missing; build or install it anew");
+            return ExitCode.Problems;
+        }
+
         var noColour = new Option<bool>("--no-color") { Description = "No colours. The variable NO_COLOR does the same.", Recursive = true };
         var verbose = new Option<bool>("--verbose") { Description = "Tell on standard error what the program does.", Recursive = true };
         var terminal = new Terminal(output, error, args.Contains("--no-color"));

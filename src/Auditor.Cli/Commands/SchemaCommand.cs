@@ -1,4 +1,5 @@
 using System.CommandLine;
+using System.CommandLine.Completions;
 using Auditor.Documents;
 
 namespace Auditor.Cli.Commands;
@@ -10,7 +11,8 @@ internal static class SchemaCommand
 
     public static Command Make(Terminal terminal)
     {
-        var name = new Argument<string>("NAME") { Description = "Schema: " + string.Join(", ", Names()) + "." };
+        var name = new Argument<string>("NAME") { Description = "Name of the schema, such as design, provision or findings." };
+        name.CompletionSources.Add(_ => Names().Select(known => new CompletionItem(known)));
         var command = new Command("schema", """
             Print the JSON Schema of design files, rule files or findings.
 

@@ -31,7 +31,7 @@ internal sealed class Readings : ITrace
     public void Read(SourceSpan term, ParameterSlot slot, in Value value) =>
         Add(new Antecedent("parameter", null, slot.Name, value, slot.Unit) { Parameter = slot });
 
-    public void Read(SourceSpan term, Lookup lookup, IReadOnlyList<TableCell> cells, in Value value)
+    public void Read(SourceSpan term, Lookup lookup, IReadOnlyList<TableCell> cells, in Value value, Unit? unit)
     {
         foreach (var cell in cells.Where(cell => !cell.IsEmpty))
         {

@@ -40,7 +40,7 @@ public sealed class CaseRunner(RuleSet rules, Problems problems)
     /// <param name="node">The case: <c>name</c>, <c>given</c>, <c>verdict</c> and <c>margin</c>, in a form that the schema of rules accepts.</param>
     public CaseResult Run(Rule rule, MappingNode node)
     {
-        var judgement = Judge(rule, node);
+        var judgement = Judge(rule, node.Mapping("given"));
         var expected = node.Text("verdict");
         var got = judgement.Verdict?.Word() ?? "none";
         var failure = expected == got ? Expectation.Compare(judgement.Margin, node.Scalar("margin")) : $"expected {expected}, got {got}{Details(judgement)}";
@@ -48,7 +48,12 @@ public sealed class CaseRunner(RuleSet rules, Problems problems)
     }
 
     /// <summary>What each case of a rule comes to, in their order.</summary>
-    public IEnumerable<Judgement> Judgements(Rule rule) => rule.Node.Mappings("cases").Select(node => Judge(rule, node));
+    public IEnumerable<Judgement> Judgements(Rule rule) => rule.Node.Mappings("cases").Select(node => Judge(rule, node.Mapping("given")));
+
+    /// <summary>What a rule comes to on the subject that a case describes.</summary>
+    /// <param name="rule">The rule.</param>
+    /// <param name="given">What the case gives; null for nothing.</param>
+    public Judgement Judge(Rule rule, MappingNode? given) => Evaluation.Judge.Decide(rule, _reader.Read(rule.Shape, given).Scope);
 
     /// <summary>The value of a formula on the subject that a case describes.</summary>
     /// <param name="formula">The formula.</param>
@@ -58,8 +63,6 @@ public sealed class CaseRunner(RuleSet rules, Problems problems)
 
     /// <summary>How results and messages call a quantity.</summary>
     internal static string OwnerOf(QuantityDefinition quantity) => $"{quantity.Sheet}: {quantity.Shape.Name} {quantity.Slot.Symbol}";
-
-    private Judgement Judge(Rule rule, MappingNode node) => Evaluation.Judge.Decide(rule, _reader.Read(rule.Shape, node.Mapping("given")).Scope);
 
     private static string Details(Judgement judgement) =>
         judgement.Absences is { } absences ? " (" + string.Join("; ", absences.Items) + ")" : "";

@@ -1,0 +1,58 @@
+using Auditor.Documents;
+using Auditor.Engine.RuleSets;
+using Auditor.Engine.RuleTests;
+
+namespace Auditor.Rules.Tests;
+
+/// <summary>Small changes to the shipped rules and sheets, each of which some case must notice.</summary>
+public class MutationTests
+{
+    private static readonly MutationRunner Mutations = new(ShippedRule.Set);
+
+    [Theory]
+    [InlineData(Shipped.Base)]
+    [InlineData(Shipped.UnitedKingdom)]
+    public void The_cases_notice_every_small_change(string set)
+    {
+        var report = new MutationRunner(Shipped.Set(set)).Run();
+        Assert.InRange(report.Count, Shipped.Set(set).Rules.Count, int.MaxValue);
+        Assert.Equal("", ProblemText.Render(report.Survivors.Select(mutation => mutation.Unnoticed())));
+    }
+
+    [Fact]
+    public void Survivors_are_told_with_their_place_and_change()
+    {
+        var rule = WithCases(ShippedRule.Of("disconnection-tn"), "well inside the limit", "the earthing system is not stated");
+        var survivors = Mutations.Run(rule).Survivors;
+        Assert.Contains(survivors, mutation => mutation is { Owner: "disconnection-tn", Change: "`Zs_max` is lowered by 1 %" } && mutation.Span.Text == "Zs_max");
+        Assert.Contains(survivors, mutation => mutation.Change == "this part of the condition is dropped" && mutation.Span.Text == "shock == 'ADS'");
+        Assert.DoesNotContain(survivors, mutation => mutation.Change == "`at-most` becomes `at-least`");
+    }
+
+    [Fact]
+    public void A_rule_without_a_case_lets_every_change_pass()
+    {
+        var report = Mutations.Run(WithCases(ShippedRule.Of("disconnection-tn")));
+        Assert.Equal(report.Count, report.Survivors.Count);
+        Assert.InRange(report.Count, 9, int.MaxValue);
+    }
+
+    [Fact]
+    public void The_same_set_gives_the_same_report()
+    {
+        var first = Mutations.Run();
+        var second = Mutations.Run();
+        Assert.Equal(first.Count, second.Count);
+        Assert.Equal(first.Survivors, second.Survivors);
+    }
+
+    /// <summary>The rule with only some of its cases.</summary>
+    private static Rule WithCases(Rule rule, params string[] names)
+    {
+        var cases = new SequenceNode(rule.Node.Span, [.. ShippedRule.Cases(rule).Where(node => names.Contains(node.Text("name")))]);
+        return rule with
+        {
+            Node = new MappingNode(rule.Node.Span, [.. rule.Node.Entries.Select(entry => entry.Key.Value == "cases" ? entry with { Value = cases } : entry)]),
+        };
+    }
+}

@@ -28,7 +28,7 @@ internal sealed class Auditing(string? ruleSet, DateOnly asOf, Problems problems
 
         var own = new Problems();
         rules.Schema.Validation.Validate(file.Root, own);
-        var design = own.HasErrors ? null : DesignBuilder.Build(file, new Evaluator(rules), own);
+        var design = DesignBuilder.Build(file, new Evaluator(rules), own);
         var result = design is null ? null : Audit.Run(design, asOf, own);
         foreach (var problem in own.All)
         {

@@ -14,7 +14,7 @@ internal static class Tool
     /// <summary>Runs a command line in a folder, with further environment variables as <c>NAME=value</c> before the arguments.</summary>
     public static ToolResult RunIn(string folder, IReadOnlyList<string> arguments, params (string Name, string Value)[] environment)
     {
-        var start = new ProcessStartInfo("dotnet") { WorkingDirectory = folder, RedirectStandardOutput = true, RedirectStandardError = true, RedirectStandardInput = true };
+        var start = new ProcessStartInfo("dotnet") { UseShellExecute = false, WorkingDirectory = folder, RedirectStandardOutput = true, RedirectStandardError = true, RedirectStandardInput = true };
         start.ArgumentList.Add(Program);
         foreach (var argument in arguments)
         {

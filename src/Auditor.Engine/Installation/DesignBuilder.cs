@@ -3,7 +3,10 @@ using Auditor.Engine.Evaluation;
 
 namespace Auditor.Engine.Installation;
 
-/// <summary>Makes the tree of subjects from a design file that the schema has accepted, and checks what a schema cannot say.</summary>
+/// <summary>
+/// Makes the tree of subjects from a design file and checks what a schema cannot say. A file that the schema refuses gets its tree
+/// checked as well, so that all problems are told in one run; what has not the right form there is passed over.
+/// </summary>
 public sealed class DesignBuilder
 {
     private readonly Design _design;

@@ -26,7 +26,13 @@ internal static class SupplyTree
             sound &= Root(boards[i], isFirst: i == 0, problems);
         }
 
-        return sound && boards.All(board => ReachesOrigin(board, problems));
+        var told = new HashSet<DesignSubject>();
+        foreach (var board in boards)
+        {
+            sound &= ReachesOrigin(board, told, problems);
+        }
+
+        return sound;
     }
 
     private static bool Feed(DesignSubject circuit, ScalarNode feeds, Dictionary<string, DesignSubject> boards, Problems problems)
@@ -71,22 +77,24 @@ internal static class SupplyTree
         return false;
     }
 
-    private static bool ReachesOrigin(DesignSubject board, Problems problems)
+    /// <summary>Follows the supply of a board; a circle is told once, at its first board.</summary>
+    private static bool ReachesOrigin(DesignSubject board, HashSet<DesignSubject> told, Problems problems)
     {
-        var way = new List<string> { board.Key };
+        var way = new List<DesignSubject> { board };
         for (var at = board.Parent; at is not null; at = at.Parent)
         {
-            if (at == board)
+            if (at.Shape != board.Shape)
             {
-                problems.Add(DesignMessages.FeedsItself(board.Node.Find("id")!.Span, string.Join(" feeds ", way.Append(board.Key).Reverse())));
+                continue;
+            }
+
+            if (way.Contains(at))
+            {
+                TellCircle(way[way.IndexOf(at)..], told, problems);
                 return false;
             }
 
-            if (at.Shape == board.Shape)
-            {
-                way.Add(at.Key);
-            }
-
+            way.Add(at);
             if (way.Count > MostDeep)
             {
                 problems.Add(DesignMessages.TooDeep(board.Node.Find("id")!.Span, MostDeep));
@@ -95,5 +103,14 @@ internal static class SupplyTree
         }
 
         return true;
+    }
+
+    private static void TellCircle(List<DesignSubject> circle, HashSet<DesignSubject> told, Problems problems)
+    {
+        if (circle.TrueForAll(told.Add))
+        {
+            var names = circle.Append(circle[0]).Reverse().Select(board => board.Key);
+            problems.Add(DesignMessages.FeedsItself(circle[0].Node.Find("id")!.Span, string.Join(" feeds ", names)));
+        }
     }
 }

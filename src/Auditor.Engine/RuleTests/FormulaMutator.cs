@@ -1,4 +1,3 @@
-using System.Text.RegularExpressions;
 using Auditor.Documents;
 using Auditor.Formulas;
 using Auditor.Formulas.Binding;
@@ -10,7 +9,7 @@ namespace Auditor.Engine.RuleTests;
 /// <summary>Changes the text of formulas and binds them again. A change that does not bind is none.</summary>
 /// <param name="shape">Shape of the subject of the formulas.</param>
 /// <param name="world">Tables, curves and parameters.</param>
-internal sealed partial class FormulaMutator(SubjectShape shape, FormulaWorld world)
+internal sealed class FormulaMutator(SubjectShape shape, FormulaWorld world)
 {
     private static readonly Dictionary<string, string[]> Turns = new()
     {
@@ -31,9 +30,11 @@ internal sealed partial class FormulaMutator(SubjectShape shape, FormulaWorld wo
         select mutant;
 
     /// <summary>The right side of every comparison of more and less, shifted up and down.</summary>
-    public IEnumerable<FormulaMutant> Shifted(Formula formula) =>
+    /// <param name="formula">The formula.</param>
+    /// <param name="isCount">Whether a right side counts something, so that only a whole step is a change.</param>
+    public IEnumerable<FormulaMutant> Shifted(Formula formula, Func<string, bool> isCount) =>
         FormulaOutline.Comparisons(formula.Text).Where(comparison => comparison.IsOrdered)
-            .SelectMany(comparison => Shifted(formula, comparison.Right, Count().IsMatch(comparison.Right.Text)));
+            .SelectMany(comparison => Shifted(formula, comparison.Right, isCount(comparison.Right.Text)));
 
     /// <summary>A whole formula shifted up and down.</summary>
     /// <param name="formula">The formula.</param>
@@ -44,6 +45,15 @@ internal sealed partial class FormulaMutator(SubjectShape shape, FormulaWorld wo
     /// <summary>The formula with parts of its text left out or put in place of the whole; null where that does not bind.</summary>
     public FormulaMutant? Rewritten(Formula formula, string text, FormulaPart place, string change) =>
         Bind(text, formula.Type) is { } bound ? new FormulaMutant(bound, formula.Source.SpanOf(place.Start, place.Text.Length), change) : null;
+
+    /// <summary>A formula bound from a text; null where it does not bind.</summary>
+    /// <param name="text">The text.</param>
+    /// <param name="type">What it must give; null where anything will do.</param>
+    public Formula? Bind(string text, FormulaType? type)
+    {
+        var source = new SourceText("changed", text);
+        return FormulaBinder.Bind(new ScalarNode(new SourceSpan(source, 0, text.Length), text, ScalarKind.Text), shape, world, type, new Problems());
+    }
 
     private IEnumerable<FormulaMutant> Shifted(Formula formula, FormulaPart part, bool isCount)
     {
@@ -64,16 +74,6 @@ internal sealed partial class FormulaMutator(SubjectShape shape, FormulaWorld wo
 
     private FormulaMutant? Replaced(Formula formula, FormulaPart part, string text, string change) =>
         Rewritten(formula, formula.Text[..part.Start] + text + formula.Text[part.End..], part, change);
-
-    private Formula? Bind(string text, FormulaType type)
-    {
-        var source = new SourceText("changed", text);
-        return FormulaBinder.Bind(new ScalarNode(new SourceSpan(source, 0, text.Length), text, ScalarKind.Text), shape, world, type, new Problems());
-    }
-
-    /// <summary>A bare whole number, alone or added to a name, counts something.</summary>
-    [GeneratedRegex(@"^([A-Za-z][\w.]* [+-] )?\d+$", RegexOptions.ExplicitCapture, matchTimeoutMilliseconds: 1000)]
-    private static partial Regex Count();
 
     /// <summary>A limit of nil stays nil however it is multiplied.</summary>
     private static bool IsZero(string text)

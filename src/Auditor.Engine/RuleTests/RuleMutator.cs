@@ -84,18 +84,26 @@ internal sealed class RuleMutator(Rule rule, RuleSet rules, CaseRunner runner)
         rule with { Check = rule.Check with { Limits = [.. rule.Check.Limits.Select((limit, i) => i == index ? changed : limit)] } };
 
     private IEnumerable<(Rule, Mutation)> InFormula(Formula formula, Func<Formula, Rule> change) =>
-        _formulas.Turned(formula).Concat(_formulas.Shifted(formula)).Select(mutant => (change(mutant.Formula), Change(mutant.Span, mutant.Change)));
+        _formulas.Turned(formula).Concat(_formulas.Shifted(formula, IsCount)).Select(mutant => (change(mutant.Formula), Change(mutant.Span, mutant.Change)));
 
-    /// <summary>A pure number that is whole in every case, value and limit alike, counts something: a share would not be.</summary>
-    private bool ComparesCounts()
+    /// <summary>Whether the rule compares counts: a pure number that is whole in every case, value and limit alike.</summary>
+    private bool ComparesCounts() =>
+        rule.Check.Value.Type.Dimension.IsNone
+        && AreWhole(runner.Judgements(rule).SelectMany(judgement => judgement.Limits.Append(judgement.Value)));
+
+    /// <summary>
+    /// Whether an operand counts something: a bare whole number, or a pure number that is whole in every case. What is written
+    /// in percent is a share, and operands inside an aggregate belong to other subjects.
+    /// </summary>
+    private bool IsCount(string operand) =>
+        operand.All(char.IsAsciiDigit)
+        || (!operand.Contains("percent", StringComparison.Ordinal)
+            && _formulas.Bind(operand, FormulaType.Number) is { } formula
+            && AreWhole(rule.Node.Mappings("cases").Select(node => runner.Evaluate(formula, rule.Shape, node.Mapping("given")))));
+
+    private static bool AreWhole(IEnumerable<Value> values)
     {
-        if (!rule.Check.Value.Type.Dimension.IsNone)
-        {
-            return false;
-        }
-
-        var numbers = runner.Judgements(rule).SelectMany(judgement => judgement.Limits.Append(judgement.Value))
-            .Where(value => value.Kind == ValueKind.Quantity).Select(value => value.Number).ToArray();
+        var numbers = values.Where(value => value.Kind == ValueKind.Quantity).Select(value => value.Number).ToArray();
         return numbers.Length > 0 && Array.TrueForAll(numbers, number => number == Math.Round(number));
     }
 

@@ -1,3 +1,4 @@
+using System.Globalization;
 using System.Numerics;
 using Auditor.Formulas.Terms;
 using Auditor.Formulas.Types;
@@ -23,14 +24,10 @@ internal sealed partial class Binder
         };
     }
 
-    private static double? NumberOf(ScriptLiteral literal) => literal.Value switch
-    {
-        int number => number,
-        long number => number,
-        double number => number,
-        BigInteger number => (double)number,
-        _ => null,
-    };
+    /// <summary>Reads the number as written: the parser's own large whole numbers do not round to the nearest.</summary>
+    private double? NumberOf(ScriptLiteral literal) => literal.Value is int or long or double or BigInteger
+        ? double.Parse(source.Text.AsSpan(literal.Span.Start.Offset, literal.Span.Length), CultureInfo.InvariantCulture)
+        : null;
 
     /// <summary>A number directly followed by a name: the name must be a unit.</summary>
     private Term? BindQuantityLiteral(ScriptBinaryExpression pair, ScriptLiteral literal, bool negative)

@@ -26,10 +26,10 @@ internal sealed partial class Binder
         }
     }
 
-    private Term? BindNegative(SourceSpan span, ScriptExpression operand, Site site) => BindQuantity(operand, site, "`-`") switch
+    private Term? BindNegative(SourceSpan span, ScriptExpression operand, Site site) => BindFactor(operand, site, "`-`") switch
     {
         null => null,
-        { Type.Dimension.IsTemperature: true } number => Fail(FormulaMessages.Needs(number.Span, "`-`", NoTemperature, number.Type)),
+        LiteralTerm literal => new LiteralTerm(literal.Type, span, Value.Of(-literal.Constant.Number), literal.Unit),
         var number => new NegateTerm(span, number),
     };
 
@@ -97,26 +97,29 @@ internal sealed partial class Binder
         return null;
     }
 
-    private ArithmeticTerm? BindProduct(ScriptBinaryExpression binary, Site site, Arithmetic operation)
+    private Term? BindProduct(ScriptBinaryExpression binary, Site site, Arithmetic operation)
     {
-        if (BindBoth(binary, site) is not var (left, right))
+        var sign = operation == Arithmetic.Multiply ? "`*`" : "`/`";
+        var left = BindFactor(binary.Left!, site, sign);
+        var right = BindFactor(binary.Right!, site, sign);
+        if (left is null || right is null)
         {
             return null;
         }
 
-        var dimension = Dimension.None;
-        var fits = left.Type.Kind == FormulaKind.Quantity && right.Type.Kind == FormulaKind.Quantity
-            && (operation == Arithmetic.Multiply
-                ? left.Type.Dimension.TryTimes(right.Type.Dimension, out dimension)
-                : left.Type.Dimension.TryOver(right.Type.Dimension, out dimension));
-        if (fits)
-        {
-            return new ArithmeticTerm(FormulaType.Of(dimension), SpanOf(binary), operation, left, right);
-        }
-
-        Fail(FormulaMessages.Dimensions(SpanOf(binary), operation == Arithmetic.Multiply ? "multiply" : "divide", left.Type, right.Type));
-        return null;
+        var exists = operation == Arithmetic.Multiply
+            ? left.Type.Dimension.TryTimes(right.Type.Dimension, out var dimension)
+            : left.Type.Dimension.TryOver(right.Type.Dimension, out dimension);
+        return exists
+            ? new ArithmeticTerm(FormulaType.Of(dimension), SpanOf(binary), operation, left, right)
+            : Fail(FormulaMessages.Overflow(SpanOf(binary)));
     }
+
+    private Term? BindFactor(ScriptExpression factor, Site site, string sign) => BindQuantity(factor, site, sign) switch
+    {
+        { Type.Dimension.IsTemperature: true } term => Fail(FormulaMessages.Needs(term.Span, sign, NoTemperature, term.Type)),
+        var term => term,
+    };
 
     private ArithmeticTerm? BindPower(ScriptBinaryExpression binary, Site site)
     {
@@ -191,16 +194,17 @@ internal sealed partial class Binder
             return null;
         }
 
-        var ordered = relation is not (Relation.Equal or Relation.NotEqual);
-        var comparable = left.Type.Equals(right.Type) && left.Type.Kind switch
+        var fault = (left.Type.Equals(right.Type), left.Type.Kind) switch
         {
-            FormulaKind.Quantity => true,
-            FormulaKind.Text or FormulaKind.Flag => !ordered,
-            _ => false,
+            (false, _) => FormulaMessages.Dimensions(SpanOf(binary), "compare", left.Type, right.Type),
+            (true, FormulaKind.Words) => FormulaMessages.Needs(left.Span, "a comparison", "single values (ask a list `has(list, 'word')`)", left.Type),
+            (true, not FormulaKind.Quantity) when relation is not (Relation.Equal or Relation.NotEqual) =>
+                FormulaMessages.Needs(left.Span, "a comparison by size", "quantities", left.Type),
+            _ => null,
         };
-        if (!comparable)
+        if (fault is not null)
         {
-            Fail(FormulaMessages.Dimensions(SpanOf(binary), "compare", left.Type, right.Type));
+            Fail(fault);
             return null;
         }
 

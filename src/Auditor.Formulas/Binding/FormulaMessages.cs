@@ -22,10 +22,10 @@ internal static class FormulaMessages
         "formula-not-allowed", $"{what} may not stand in a formula", span, "write `choose(condition, then, otherwise)` for a choice; there are no assignments, loops, pipes or indexes");
 
     public static Problem UnknownName(SourceSpan span, string name, string shape, string? nearest) => Problem.Error(
-        "unknown-symbol", $"a {shape} has no `{name}`", span, nearest is null ? "name a quantity of a sheet or an input of the design" : $"did you mean `{nearest}`?");
+        "unknown-symbol", $"{A(shape)} has no `{name}`", span, nearest is null ? "name a quantity of a sheet or an input of the design" : $"did you mean `{nearest}`?");
 
     public static Problem UnknownWayTarget(SourceSpan span, string way, string name, string shape, string? nearest) => Problem.Error(
-        "unknown-symbol", $"`{way}` may lead to a {shape}, which has no `{name}`", span, nearest is null ? null : $"did you mean `{nearest}`?");
+        "unknown-symbol", $"`{way}` may lead to {A(shape)}, which has no `{name}`", span, nearest is null ? null : $"did you mean `{nearest}`?");
 
     public static Problem UnknownParameter(SourceSpan span, string name, string? nearest) => Problem.Error(
         "unknown-parameter", $"the rule set has no parameter `{name}`", span, nearest is null ? "give it in the set file" : $"did you mean `param.{nearest}`?");
@@ -65,7 +65,7 @@ internal static class FormulaMessages
         "collection-alone", $"`{name}` is a list of subjects", span, $"gather it: `sum_of({name}, …)`, min_of, max_of, count_of, all_of, any_of");
 
     public static Problem NotCollection(SourceSpan span, string shape, IEnumerable<string> names) => Problem.Error(
-        "not-a-collection", $"a {shape} has no such list of subjects", span, "it has: " + string.Join(", ", names.DefaultIfEmpty("none")));
+        "not-a-collection", $"{A(shape)} has no such list of subjects", span, "it has: " + string.Join(", ", names.DefaultIfEmpty("none")));
 
     public static Problem WayAlone(SourceSpan span, string name) => Problem.Error(
         "way-alone", $"`{name}` is a way to another subject, not a value", span, $"write what is meant there, as in `{name}.Zs`");
@@ -89,4 +89,6 @@ internal static class FormulaMessages
 
     public static Problem WrongResult(SourceSpan span, FormulaType declared, FormulaType got) => Problem.Error(
         "wrong-result", $"the formula gives {got}, and {declared} is declared", span, "change the formula, or the declared unit");
+
+    private static string A(string shape) => (shape[0] is 'a' or 'e' or 'i' or 'o' or 'u' ? "an " : "a ") + shape;
 }

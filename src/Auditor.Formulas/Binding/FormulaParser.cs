@@ -33,7 +33,9 @@ internal static class FormulaParser
             return null;
         }
 
-        if (!FormulaTokens.Check(source, Lexing, problems))
+        // A formula is one expression, so a line break in it means no more than a blank.
+        text = text.Replace('\n', ' ');
+        if (!FormulaTokens.Check(source, text, Lexing, problems))
         {
             return null;
         }
@@ -86,10 +88,10 @@ internal static class FormulaParser
         return error.Message.Contains("depth limit", StringComparison.Ordinal) ? FormulaMessages.TooDeep(span, MostDeep) : FormulaMessages.Unreadable(span);
     }
 
-    private static SourceSpan SpanOfError(ScalarNode source, Scriban.Parsing.SourceSpan span) =>
-        span.End.Offset < span.Start.Offset || span.Start.Offset >= source.Text.Length || (span.Start.Offset == 0 && span.End.Offset == 0)
-            ? source.Span
-            : SpanOf(source, span.Start.Offset, span.End.Offset + 1);
+    /// <summary>The parser places an error at the end of the formula before its start.</summary>
+    private static SourceSpan SpanOfError(ScalarNode source, Scriban.Parsing.SourceSpan span) => span.Start.Offset < 0
+        ? SpanOf(source, source.Text.Length, source.Text.Length)
+        : SpanOf(source, span.Start.Offset, Math.Max(span.End.Offset, span.Start.Offset) + 1);
 
     /// <summary>Where a stretch of the formula stands in the rule file; cut to the formula.</summary>
     public static SourceSpan SpanOf(ScalarNode source, int start, int end)

@@ -11,10 +11,14 @@ namespace Auditor.Formulas.Binding;
 internal static class FormulaTokens
 {
     /// <summary>Adds a problem for each token that may not stand in a formula; whether there was none.</summary>
-    public static bool Check(ScalarNode source, LexerOptions options, Problems problems)
+    /// <param name="source">The scalar that holds the formula.</param>
+    /// <param name="text">Its text with line breaks as blanks.</param>
+    /// <param name="options">How the parser will read it.</param>
+    /// <param name="problems">Receives what is wrong.</param>
+    public static bool Check(ScalarNode source, string text, LexerOptions options, Problems problems)
     {
         var sound = true;
-        foreach (var token in new Lexer(source.Text, "formula", options))
+        foreach (var token in new Lexer(text, "formula", options))
         {
             if (token.Type == TokenType.Eof)
             {

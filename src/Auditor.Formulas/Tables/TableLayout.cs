@@ -77,7 +77,7 @@ internal sealed class TableLayout
             ScalarNode[] parts = node is SequenceNode list ? [.. list.Items.OfType<ScalarNode>()] : [(ScalarNode)node];
             if (parts.Length != across.Count)
             {
-                problems.Add(TableMessages.RowLength(node.Span, across.Count, parts.Length));
+                problems.Add(TableMessages.ColumnKeys(node.Span, across.Count, parts.Length));
                 continue;
             }
 
@@ -119,6 +119,12 @@ internal sealed class TableLayout
 
     private static object? KeyOf(LookupKey key, ScalarNode scalar, Problems problems)
     {
+        if (scalar.Kind == ScalarKind.Null)
+        {
+            problems.Add(TableMessages.NoKey(scalar.Span));
+            return null;
+        }
+
         if (key.Unit is null)
         {
             return scalar.Text;

@@ -35,8 +35,13 @@ internal static class TableMessages
     public static Problem RowLength(SourceSpan span, int wanted, int got) => Problem.Error(
         "table-row-length", $"this row has {got} values, and {wanted} are due", span, "a row holds its keys, then one value for each column; write null for an empty cell");
 
+    public static Problem ColumnKeys(SourceSpan span, int wanted, int got) => Problem.Error(
+        "table-column-keys", $"this column has {got} key values, and `across` names {wanted}", span, "head each column by one value for each key across");
+
+    public static Problem NoKey(SourceSpan span) => Problem.Error("table-no-key", "a row or column without a key stands for nothing", span, "write its key");
+
     public static Problem NotNumber(SourceSpan span, string unit) => Problem.Error(
-        "table-not-a-number", $"a number in {unit} is due here", span, "tables hold bare numbers in the unit of their lookup");
+        "table-not-a-number", unit == "1" ? "a number is due here" : $"a number in {unit} is due here", span, "tables hold bare numbers in the unit of their lookup");
 
     public static Problem NotPositive(SourceSpan span) => Problem.Error(
         "curve-not-positive", "currents and times of a curve are greater than zero", span, null);

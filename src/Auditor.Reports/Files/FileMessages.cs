@@ -12,9 +12,7 @@ internal static class FileMessages
 
     public static Problem NoFolder(string path) => NotWritten(path, "its folder does not exist", "make the folder first");
 
-    public static Problem Denied(string path) => NotWritten(path, "permission is denied", "write to a folder of your own, or change the permissions");
-
-    public static Problem Failed(string path, string reason) => NotWritten(path, reason, null);
+    public static Problem Failed(string path, string reason) => NotWritten(path, reason, "write to another folder, or put right what stands in the way");
 
     private static Problem NotWritten(string path, string reason, string? help) => Problem.Error(
         "report-not-written", $"{ProblemText.Quote(path)} cannot be written: {reason}; what was there is unchanged", null, help);

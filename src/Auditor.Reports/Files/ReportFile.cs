@@ -14,26 +14,22 @@ public static class ReportFile
     {
         var full = Path.GetFullPath(path);
         var folder = Path.GetDirectoryName(full);
-        if (Directory.Exists(full) || !Directory.Exists(folder))
+        if (!Directory.Exists(folder))
         {
-            problems.Add(Directory.Exists(full) ? FileMessages.IsFolder(path) : FileMessages.NoFolder(path));
+            problems.Add(FileMessages.NoFolder(path));
             return false;
         }
 
-        var beside = Path.Combine(folder, $".{Path.GetFileName(full)}.{Path.GetRandomFileName()}");
+        var beside = Path.Combine(folder, "." + Path.GetRandomFileName());
         try
         {
             WriteWhole(beside, bytes);
             File.Move(beside, full, overwrite: true);
             return true;
         }
-        catch (UnauthorizedAccessException)
+        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
         {
-            problems.Add(FileMessages.Denied(path));
-        }
-        catch (IOException fault)
-        {
-            problems.Add(FileMessages.Failed(path, Reason(fault)));
+            problems.Add(Directory.Exists(full) ? FileMessages.IsFolder(path) : FileMessages.Failed(path, Reason(fault)));
         }
 
         Remove(beside);
@@ -48,7 +44,7 @@ public static class ReportFile
     }
 
     /// <summary>The reason without the paths of the machine that the system's message ends with.</summary>
-    private static string Reason(IOException fault) => fault.Message.Split(" : '", 2)[0].TrimEnd('.').ToLowerInvariant();
+    private static string Reason(Exception fault) => fault is UnauthorizedAccessException ? "permission is denied" : fault.Message.Split(" : '", 2)[0].TrimEnd('.').ToLowerInvariant();
 
     private static void Remove(string path)
     {

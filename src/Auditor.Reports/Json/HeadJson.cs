@@ -42,7 +42,7 @@ internal static class HeadJson
 
     private static void Basis(JsonOutput output, AuditResult result) => output.Object("basis", () =>
     {
-        output.Text("stage", AuditBasis.Of(result.Design).Stage ?? AuditBasis.UsualStage);
+        output.Text("stage", AuditBasis.StageOf(result.Design) ?? AuditBasis.UsualStage);
         output.Text("decision", AuditBasis.Decision);
         output.Text("asOf", result.AsOf is { } day ? DayText.Of(day) : null);
     });

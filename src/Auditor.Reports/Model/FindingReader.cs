@@ -21,7 +21,7 @@ internal sealed class FindingReader(
             Rule = rule.Id,
             Title = rule.Title,
             Subject = finding.Subject.Key,
-            SubjectName = SubjectText.NameToShow(finding.Subject),
+            SubjectLabel = SubjectText.Label(finding.Subject),
             Verdict = finding.VerdictText,
             IsRequirement = rule.Provision == Provision.Requirement,
             ClauseType = rule.Clause.Type,

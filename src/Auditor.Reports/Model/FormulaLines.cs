@@ -4,14 +4,19 @@ using Auditor.Engine.RuleSets;
 
 namespace Auditor.Reports.Model;
 
-/// <summary>Writes the formulas behind findings. Where a rule names a quantity of its subject, the formula shown is that of the quantity.</summary>
+/// <summary>
+/// Writes the formulas behind findings. Where a rule names a quantity of its subject, the formula shown is that of the quantity; one that
+/// reads nothing is left out, for the finding shows what it gives.
+/// </summary>
 internal sealed class FormulaLines(RuleSet rules)
 {
     /// <summary>Shared by all findings, so that each quantity is unfolded once only: of the unfolding, the lines need none.</summary>
     private readonly EvidenceBuilder _evidence = new(rules);
 
     public IReadOnlyList<FormulaLine> Of(Finding finding) =>
-        [.. _evidence.Of(finding).Where(derivation => derivation.Symbol != "applies").Select(derivation => new FormulaLine(derivation.Symbol, Line(finding, derivation)))];
+        [.. _evidence.Of(finding)
+            .Where(derivation => derivation.Symbol != "applies" && derivation.From.Count > 0)
+            .Select(derivation => new FormulaLine(derivation.Symbol, Line(finding, derivation)))];
 
     private string Line(Finding finding, Derivation derivation)
     {

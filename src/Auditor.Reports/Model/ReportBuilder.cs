@@ -66,14 +66,9 @@ internal sealed class ReportBuilder
         return new ReportProject(said("title") ?? "", said("reference") ?? "", said("revision") ?? "", said("designer") ?? "", said("checker") ?? "");
     }
 
-    private ReportBasis Basis()
-    {
-        var basis = AuditBasis.Of(_result.Design);
-        var decision = basis.AsksGuarded
-            ? "simple acceptance: values as stated (the design asks for guarded acceptance, which was not applied)"
-            : "simple acceptance: values as stated";
-        return new ReportBasis(_places.Design, basis.Stage ?? "not stated", decision, _result.AsOf is { } day ? DayText.Of(day) : "");
-    }
+    private ReportBasis Basis() => new(
+        _places.Design, AuditBasis.StageOf(_result.Design) ?? "not stated", $"{AuditBasis.Decision} acceptance: values as stated",
+        _result.AsOf is { } day ? DayText.Of(day) : "");
 
     private ReportRuleSet RuleSet()
     {

@@ -15,8 +15,8 @@ public sealed record ReportFinding
     /// <summary>Key of the subject.</summary>
     public required string Subject { get; init; }
 
-    /// <summary>Name of the subject.</summary>
-    public required string SubjectName { get; init; }
+    /// <summary>The subject as people name it: key and name.</summary>
+    public required string SubjectLabel { get; init; }
 
     /// <summary>The verdict, with the assumption that it hangs on.</summary>
     public required string Verdict { get; init; }

@@ -1,6 +1,7 @@
 using Auditor.Documents;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Registers;
+using Auditor.Reports.Reading;
 using Auditor.Reports.Schedules;
 
 namespace Auditor.Reports.Model;
@@ -63,5 +64,6 @@ public sealed record ReportModel
     /// <param name="result">The audit.</param>
     /// <param name="register">The register of requirements.</param>
     /// <param name="schedule">Columns of the schedule of circuits.</param>
-    public static ReportModel Build(AuditResult result, Register register, Schedule schedule) => new ReportBuilder(result, register, schedule).Build();
+    public static ReportModel Build(AuditResult result, Register register, Schedule schedule) =>
+        Invariantly.Make(() => new ReportBuilder(result, register, schedule).Build());
 }

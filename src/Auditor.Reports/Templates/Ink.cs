@@ -14,26 +14,45 @@ internal abstract class Ink
     /// <summary>Text that is shown as code.</summary>
     public abstract string Code(string text);
 
+    /// <summary>Text in which backquotes set off names, as the sentences of rules and absences write it.</summary>
+    public virtual string Prose(string text) => Inert(text, startsBlock: true);
+
     /// <summary>The last touch to a whole report.</summary>
     public abstract string Finish(string text);
 
-    /// <summary>One line, with � for characters that show nothing or turn the text around.</summary>
+    /// <summary>
+    /// One line: each break, with the blanks around it, becomes one blank; � stands for characters that show nothing or turn the text around.
+    /// </summary>
     protected static string OneLine(string text)
     {
         var line = new StringBuilder(text.Length);
+        var afterBreak = false;
         foreach (var rune in text.EnumerateRunes())
         {
-            if (Rune.IsWhiteSpace(rune) && rune.Value != '\u00A0' && rune.Value != '\u202F')
+            var isBreak = rune.Value is '\t' or '\n' or '\r' or 0x85 or 0x2028 or 0x2029;
+            if (isBreak && !afterBreak)
             {
-                line.Append(line.Length == 0 || line[^1] == ' ' ? "" : " ");
+                TrimEnd(line).Append(' ');
             }
-            else
+            else if (!isBreak && !(afterBreak && rune.Value == ' '))
             {
                 line.Append(IsShown(rune) ? rune.ToString() : "\uFFFD");
             }
+
+            afterBreak = isBreak || (afterBreak && rune.Value == ' ');
         }
 
-        return line.ToString().TrimEnd(' ');
+        return line.ToString();
+    }
+
+    private static StringBuilder TrimEnd(StringBuilder line)
+    {
+        while (line.Length > 0 && line[^1] == ' ')
+        {
+            line.Length--;
+        }
+
+        return line;
     }
 
     private static bool IsShown(Rune rune) => Rune.GetUnicodeCategory(rune) is not (UnicodeCategory.Control or UnicodeCategory.Format

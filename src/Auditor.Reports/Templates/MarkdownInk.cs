@@ -22,13 +22,22 @@ internal sealed class MarkdownInk : Ink
             });
         }
 
-        return startsBlock ? WithoutBlockStart(inert.ToString()) : inert.ToString();
+        return startsBlock ? WithoutBlockStart(inert.ToString().TrimStart(' ')) : inert.ToString();
     }
 
     public override string Code(string text)
     {
-        var line = OneLine(text);
+        var line = OneLine(text).Trim(' ');
         return line.Length == 0 || line.AsSpan().ContainsAny('`', '|') ? $"<code>{Inert(text, startsBlock: false)}</code>" : $"`{line}`";
+    }
+
+    /// <summary>Backquotes in pairs set off code; a lone one is shown as it is.</summary>
+    public override string Prose(string text)
+    {
+        var parts = text.Split('`');
+        return parts.Length % 2 == 0
+            ? Inert(text, startsBlock: true)
+            : string.Concat(parts.Select((part, index) => index % 2 == 1 ? Code(part) : Inert(part, startsBlock: index == 0)));
     }
 
     public override string Finish(string text) => text.TrimEnd('\n') + "\n";

@@ -1,3 +1,4 @@
+using System.Collections;
 using System.Globalization;
 using System.Text;
 using Auditor.Documents;
@@ -78,13 +79,16 @@ internal sealed class ReportContext : TemplateContext
         functions.SetValue("array", new ArrayFunctions(), readOnly: true);
         functions.SetValue("string", new StringFunctions(), readOnly: true);
         functions.SetValue("include", new IncludePart(), readOnly: true);
+        functions.SetValue("prose", DynamicCustomFunction.Create((string text) => new Markup(ink.Prose(text))), readOnly: true);
         functions.SetValue("code", DynamicCustomFunction.Create((string text) => new Markup(ink.Code(text))), readOnly: true);
         return functions;
     }
 
     private static bool MissMember(TemplateContext context, Scriban.Parsing.SourceSpan span, object target, string member, out object? value)
     {
-        var known = target.GetType().GetProperties().Select(property => StandardMemberRenamer.Rename(property.Name)).Order(StringComparer.Ordinal).ToArray();
+        string[] known = target is IEnumerable
+            ? ["size"]
+            : [.. target.GetType().GetProperties().Select(property => StandardMemberRenamer.Rename(property.Name)).Order(StringComparer.Ordinal)];
         throw new TemplateFault(span, at => TemplateMessages.UnknownMember(at, member, NearestWord.Find(member, known), known));
     }
 

@@ -16,7 +16,7 @@ internal static class NumbersPutIn
         foreach (var reading in Outermost(readings, whole))
         {
             text.Append(whole.Source.Text, at, reading.Term.Start - at);
-            text.Append(Shown(reading));
+            text.Append(Shown(reading, IsBracketed(whole.Source.Text, reading.Term)));
             at = reading.Term.End;
         }
 
@@ -31,10 +31,13 @@ internal static class NumbersPutIn
         return words is [">-" or ">" or "|" or "|-", .. var rest] ? string.Join(' ', rest) : string.Join(' ', words);
     }
 
-    private static string Shown(Tracer.Reading reading)
+    private static bool IsBracketed(string text, SourceSpan term) =>
+        term.Start > 0 && text[term.Start - 1] == '(' && term.End < text.Length && text[term.End] == ')';
+
+    private static string Shown(Tracer.Reading reading, bool isBracketed)
     {
         var shown = ValueText.Show(reading.Value, reading.Unit ?? Quantities.Unit.One);
-        return shown.Contains(' ') ? $"({shown})" : shown;
+        return shown.Contains(' ') && !isBracketed ? $"({shown})" : shown;
     }
 
     private static List<Tracer.Reading> Outermost(IReadOnlyList<Tracer.Reading> readings, SourceSpan whole)

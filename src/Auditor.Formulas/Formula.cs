@@ -11,7 +11,7 @@ namespace Auditor.Formulas;
 /// <summary>A formula of a rule file, checked against what its subject has and ready to be evaluated.</summary>
 /// <param name="Source">The scalar that holds it in the rule file.</param>
 /// <param name="Root">The bound expression.</param>
-/// <param name="References">The quantities that it reads, each once per direction.</param>
+/// <param name="References">The inputs and quantities that it reads, each once per route.</param>
 public sealed record Formula(ScalarNode Source, Term Root, IReadOnlyList<Reference> References)
 {
     /// <summary>The formula as written.</summary>

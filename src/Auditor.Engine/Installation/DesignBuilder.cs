@@ -112,7 +112,7 @@ public sealed class DesignBuilder
 
     private DesignSubject Subject(Formulas.Subjects.SubjectShape shape, string key, MappingNode node)
     {
-        var subject = new DesignSubject(_design, shape, key, node, _design.Evaluator);
+        var subject = new DesignSubject(_design, shape, key, node, _design.Evaluator) { Index = _subjects.Count };
         _subjects.Add(subject);
         return subject;
     }

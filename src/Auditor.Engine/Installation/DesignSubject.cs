@@ -50,6 +50,9 @@ public sealed class DesignSubject : ISubject
 
     internal Evaluator Evaluator { get; }
 
+    /// <summary>Place among all subjects of the design.</summary>
+    internal int Index { get; init; }
+
     /// <summary>The legs of a circuit's cable run; empty for any other subject.</summary>
     public IReadOnlyList<DesignSubject> Legs => Shape.Collection("legs") is { } legs ? Collections[legs.Index] : [];
 
@@ -79,13 +82,31 @@ public sealed class DesignSubject : ISubject
 
         if (_open[slot])
         {
-            return Value.Missing(new Absence(AbsenceKind.NotFinite, Key, Shape.Quantities[slot].Symbol, "the calculation runs in a circle", ""));
+            return InCircle(Key, Shape.Quantities[slot]);
         }
 
         _open[slot] = true;
         _quantities[slot] = Evaluator.Compute(Shape, slot, Scope);
         _known[slot] = true;
         return _quantities[slot];
+    }
+
+    /// <summary>What stands for a quantity that turns out to need itself.</summary>
+    internal static Value InCircle(string subject, QuantitySlot slot) =>
+        Value.Missing(new Absence(AbsenceKind.NotFinite, subject, slot.Symbol, "the calculation runs in a circle", ""));
+
+    /// <summary>Reads every input and computes every quantity, so that from then on any number of threads may read this subject.</summary>
+    internal void Settle()
+    {
+        for (var slot = 0; slot < _inputs.Length; slot++)
+        {
+            Input(slot);
+        }
+
+        for (var slot = 0; slot < _quantities.Length; slot++)
+        {
+            Quantity(slot);
+        }
     }
 
     /// <inheritdoc/>

@@ -1,4 +1,5 @@
 using Auditor.Documents;
+using Auditor.Formulas;
 using Auditor.Formulas.Subjects;
 
 namespace Auditor.Engine.RuleSets;
@@ -46,14 +47,20 @@ internal sealed class CircleCheck(QuantityDefinition[][] quantities, Problems pr
 
         _states[key] = State.Open;
         _path.Add((definition, into));
-        foreach (var reference in definition.Formula.References)
+        foreach (var (shape, slot, direction) in QuantitiesOf(definition.Formula))
         {
-            Visit(quantities[reference.Shape.Index][reference.Slot.Index], reference.Direction);
+            Visit(quantities[shape.Index][slot.Index], direction);
         }
 
         _path.RemoveAt(_path.Count - 1);
         _states[key] = State.Done;
     }
+
+    private static IEnumerable<(SubjectShape Shape, QuantitySlot Slot, Direction Direction)> QuantitiesOf(Formula formula) =>
+        formula.References
+            .Where(reference => reference.Quantity is not null)
+            .Select(reference => (reference.Shape, reference.Quantity!, reference.Direction))
+            .Distinct();
 
     private void Judge(QuantityDefinition definition, Direction closing)
     {

@@ -1,5 +1,4 @@
 using Auditor.Documents;
-using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Tables;
 using Auditor.Formulas.Terms;
 using Auditor.Formulas.Types;
@@ -123,7 +122,7 @@ internal sealed partial class Binder
             return Fail(FormulaMessages.NotCollection(SpanOf(arguments[0]), site.Shape.Name, site.Shape.Collections.Select(list => list.Name)));
         }
 
-        var inner = new Site(collection.Items, site.Direction | Direction.Down, site);
+        var inner = site.In(collection);
         var gathers = name is "sum_of" or "min_of" or "max_of";
         var item = gathers ? BindQuantity(arguments[1], inner, $"`{name}`") : BindFlag(arguments[1], inner, $"`{name}`");
         if (item is null)

@@ -88,8 +88,7 @@ internal sealed partial class Binder
         Term? first = null;
         foreach (var target in way.Targets)
         {
-            var there = new Site(target, site.Direction | way.Direction, null);
-            var term = BindPath(span, parts, from + 1, there);
+            var term = BindPath(span, parts, from + 1, site.At(way, target));
             if (term is null)
             {
                 return null;
@@ -112,12 +111,13 @@ internal sealed partial class Binder
     {
         if (site.Shape.Quantity(name) is { } quantity)
         {
-            _references.Add(new Reference(site.Shape, quantity, site.Direction));
+            _references.Add(new Reference(site.Route, site.Shape, null, quantity));
             return new QuantityTerm(span, quantity);
         }
 
         if (site.Shape.Input(name) is { } input)
         {
+            _references.Add(new Reference(site.Route, site.Shape, input, null));
             return new InputTerm(span, input);
         }
 

@@ -29,7 +29,7 @@ internal sealed partial class Binder(ScalarNode source, FormulaWorld world, Prob
         }
 
         var binder = new Binder(source, world, problems);
-        var root = binder.Bind(expression, new Site(shape, Direction.Same, null));
+        var root = binder.Bind(expression, new Site(shape, null, null));
         return root is null ? null : new Formula(source, root, [.. binder._references]);
     }
 

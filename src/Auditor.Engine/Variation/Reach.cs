@@ -1,0 +1,25 @@
+using Auditor.Engine.Installation;
+
+namespace Auditor.Engine.Variation;
+
+/// <summary>Everything that one input may have a part in: quantities, and rules at subjects.</summary>
+public sealed class Reach
+{
+    private readonly Dictionary<int, ulong[]> _quantities;
+
+    internal Reach(IReadOnlyList<SubjectInput> inputs, Dictionary<int, ulong[]> quantities, IReadOnlyList<RuleAt> rules)
+    {
+        Inputs = inputs;
+        _quantities = quantities;
+        Rules = rules;
+    }
+
+    /// <summary>The rules that may come out otherwise when the input changes: subjects in the order of the design, then rules by id.</summary>
+    public IReadOnlyList<RuleAt> Rules { get; }
+
+    /// <summary>The input, and the groups that it lies in where the design gives nothing of them.</summary>
+    internal IReadOnlyList<SubjectInput> Inputs { get; }
+
+    /// <summary>One bit for each quantity of a subject; null where none of them is reached.</summary>
+    internal ulong[]? QuantitiesOf(DesignSubject subject) => _quantities.GetValueOrDefault(subject.Index);
+}

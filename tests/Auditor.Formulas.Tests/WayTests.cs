@@ -36,14 +36,14 @@ public class WayTests
 
     [Theory]
     [InlineData("Zs * 2 + Zs", "circuit Zs Same")]
-    [InlineData("R + Z", "")]
-    [InlineData("up.Zdb", "board Zdb Up")]
+    [InlineData("R + Z", "circuit R Same, circuit Z Same")]
+    [InlineData("up.Zdb + up.rated_current * (0 ohm) / I", "board Zdb Up, board rated_current Up, circuit I Same")]
     [InlineData("fed.Zdb + Zs", "board Zdb Down, circuit Zs Same")]
     [InlineData("fed.up.Zs", "circuit Zs Up Down, installation Zs Up Down")]
-    [InlineData("any_of(legs, up.Zs > 1 ohm)", "circuit Zs Up Down")]
+    [InlineData("any_of(legs, up.Zs > 1 ohm && buried)", "circuit Zs Up Down, leg buried Down")]
     [InlineData("any_of(legs, this.Zs > 1 ohm)", "circuit Zs Same")]
-    [InlineData("origin.Zs + up.origin.Zs", "installation Zs Up")]
+    [InlineData("origin.Zs + up.up.Zs", "installation Zs Up, circuit Zs Up, installation Zs Up")]
     public void A_formula_knows_what_it_reads_and_which_way_it_looks(string formula, string references) =>
-        Assert.Equal(references, string.Join(", ", Bound.Formula(formula).References
-            .Select(reference => $"{reference.Shape.Name} {reference.Slot.Symbol} {reference.Direction.ToString().Replace(",", "")}")));
+        Assert.Equal(references, string.Join(", ", Bound.Formula(formula).References.Select(reference =>
+            $"{reference.Shape.Name} {reference.Quantity?.Symbol ?? reference.Input!.Name} {reference.Direction.ToString().Replace(",", "")}")));
 }

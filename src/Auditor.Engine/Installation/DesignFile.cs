@@ -28,6 +28,17 @@ public sealed record DesignFile(string Path, MappingNode Root, IReadOnlyList<Inp
         return null;
     }
 
+    /// <summary>
+    /// A path as reports show it: a file of the design relative to its folder, so that nothing depends on where the audit was started;
+    /// any other path as it is.
+    /// </summary>
+    public string Shown(string displayPath)
+    {
+        var folder = Path[..(Path.LastIndexOf('/') + 1)];
+        var isOfDesign = displayPath == Path || (displayPath.StartsWith(folder, StringComparison.Ordinal) && Inputs.Any(input => input.Path == displayPath));
+        return isOfDesign ? displayPath[folder.Length..] : displayPath;
+    }
+
     /// <summary>The rule set that the design asks for; null where it leaves the choice open.</summary>
     public ScalarNode? RuleSet => Root.Scalar("rule-set");
 }

@@ -128,4 +128,7 @@ public sealed class DesignSubject : ISubject
 
     /// <summary>The scalar in the design file that gives an input, wherever it stands; null when the design does not give it.</summary>
     public ScalarNode? Source(InputSlot slot) => _design.Find(this, slot) as ScalarNode;
+
+    /// <summary>The node that gives an input, wherever it stands: a scalar, a list or a group; null when the design does not give it.</summary>
+    internal Node? Given(InputSlot slot) => _design.Find(this, slot);
 }

@@ -5,7 +5,6 @@ using Auditor.Engine.Installation;
 using Auditor.Engine.RuleSets;
 using Auditor.Formulas.Tables;
 using Auditor.Quantities;
-using Auditor.Reports.Reading;
 
 namespace Auditor.Reports.Json;
 

@@ -7,28 +7,17 @@ namespace Auditor.Reports.Reading;
 /// Names places in files as reports do: files of the design relative to its folder, so that a report does not depend on where
 /// the audit was started; files of the rule set as the rule set shows them.
 /// </summary>
-internal sealed class Places
+internal sealed class Places(DesignFile file)
 {
-    private readonly string _folder;
-    private readonly HashSet<string> _ofDesign;
-
-    public Places(DesignFile file)
-    {
-        _folder = file.Path[..(file.Path.LastIndexOf('/') + 1)];
-        _ofDesign = [.. file.Inputs.Select(input => input.Path), file.Path];
-        Design = Path(file.Path);
-        Inputs = [.. file.Inputs.Select(input => input with { Path = Path(input.Path) }).OrderBy(input => input.Path, StringComparer.Ordinal)];
-    }
-
     /// <summary>File name of the design.</summary>
-    public string Design { get; }
+    public string Design { get; } = file.Shown(file.Path);
 
     /// <summary>The files of the design, by path.</summary>
-    public IReadOnlyList<InputFile> Inputs { get; }
+    public IReadOnlyList<InputFile> Inputs { get; } =
+        [.. file.Inputs.Select(input => input with { Path = file.Shown(input.Path) }).OrderBy(input => input.Path, StringComparer.Ordinal)];
 
     /// <summary>A path as reports show it.</summary>
-    public string Path(string displayPath) =>
-        _ofDesign.Contains(displayPath) && displayPath.StartsWith(_folder, StringComparison.Ordinal) ? displayPath[_folder.Length..] : displayPath;
+    public string Path(string displayPath) => file.Shown(displayPath);
 
     /// <summary>A place as <c>path:line:column</c>.</summary>
     public string Text(SourceSpan span) => $"{Path(span.Source.Path)}:{span.StartLocation}";

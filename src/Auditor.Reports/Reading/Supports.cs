@@ -1,5 +1,6 @@
 using Auditor.Engine.Evidence;
 using Auditor.Engine.Findings;
+using Auditor.Engine.Installation;
 using Auditor.Formulas.Types;
 using Auditor.Formulas.Values;
 

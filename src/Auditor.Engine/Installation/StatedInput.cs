@@ -1,10 +1,9 @@
 using Auditor.Documents;
-using Auditor.Engine.Installation;
 using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Types;
 using Auditor.Quantities;
 
-namespace Auditor.Reports.Reading;
+namespace Auditor.Engine.Installation;
 
 /// <summary>An input as the design states it.</summary>
 /// <param name="Subject">The subject that has it.</param>
@@ -13,38 +12,33 @@ namespace Auditor.Reports.Reading;
 /// <param name="Standing">How it came to be known.</param>
 /// <param name="From">Where it was said: <c>subject</c>, <c>type</c> or <c>defaults</c>.</param>
 /// <param name="Span">Where it stands.</param>
-internal sealed record StatedInput(DesignSubject Subject, InputSlot Slot, string Text, Standing Standing, string From, SourceSpan Span)
+public sealed record StatedInput(DesignSubject Subject, InputSlot Slot, string Text, Standing Standing, string From, SourceSpan Span)
 {
     /// <summary>Every input that the design states of a subject, in the order of its shape.</summary>
     public static IEnumerable<StatedInput> Of(DesignSubject subject) =>
         subject.Shape.Inputs.Where(slot => slot.Type.Kind != FormulaKind.Group).Select(slot => Of(subject, slot)).OfType<StatedInput>();
 
-    private static StatedInput? Of(DesignSubject subject, InputSlot slot)
+    private static StatedInput? Of(DesignSubject subject, InputSlot slot) => subject.Given(slot) switch
     {
-        var own = Walk(subject.Node, slot);
-        if (own is SequenceNode list)
-        {
-            var words = list.Items.OfType<ScalarNode>().Select(item => item.Text);
-            return new StatedInput(subject, slot, string.Join(", ", words), Standing.Designed, "subject", list.Span);
-        }
+        ScalarNode scalar => new StatedInput(subject, slot, scalar.Text, StandingOf(slot, scalar), FromOf(subject, slot, scalar), scalar.Span),
+        SequenceNode list => new StatedInput(subject, slot, Words(list), Standing.Designed, FromOf(subject, slot, list), list.Span),
+        _ => null,
+    };
 
-        return subject.Source(slot) is { } scalar
-            ? new StatedInput(subject, slot, scalar.Text, StandingOf(slot, scalar), FromOf(subject, slot, own, scalar), scalar.Span)
-            : null;
-    }
+    private static string Words(SequenceNode list) => string.Join(", ", list.Items.OfType<ScalarNode>().Select(item => item.Text));
 
     private static Standing StandingOf(InputSlot slot, ScalarNode scalar) =>
         slot.Type.Kind == FormulaKind.Quantity && QuantityText.TryParse(scalar.Text, out var stated, out _) ? stated.Standing : Standing.Designed;
 
-    private static string FromOf(DesignSubject subject, InputSlot slot, Node? own, ScalarNode scalar)
+    private static string FromOf(DesignSubject subject, InputSlot slot, Node node)
     {
-        if (ReferenceEquals(own, scalar))
+        if (ReferenceEquals(Walk(subject.Node, slot), node))
         {
             return "subject";
         }
 
         var defaults = subject.Parent?.Parent?.Node.Mapping("defaults");
-        return defaults is not null && ReferenceEquals(Walk(defaults, slot), scalar) ? "defaults" : "type";
+        return defaults is not null && ReferenceEquals(Walk(defaults, slot), node) ? "defaults" : "type";
     }
 
     private static Node? Walk(MappingNode start, InputSlot slot)

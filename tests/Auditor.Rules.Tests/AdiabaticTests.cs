@@ -9,8 +9,11 @@ public class AdiabaticTests
     public static IEnumerable<TheoryDataRow<string, string, string, string>> Entries() =>
         from entry in Shipped.Lookup("k-factor").Cells()
         where !entry.Cell.IsEmpty
-        select new TheoryDataRow<string, string, string, string>((string)entry.Keys[0], (string)entry.Keys[1], (string)entry.Keys[2], (string)entry.Keys[3])
-        { TestDisplayName = "k · " + string.Join(" · ", entry.Keys) };
+        let keys = entry.Keys.Cast<string>().ToArray()
+        select new TheoryDataRow<string, string, string, string>(keys[0], keys[1], keys[2], keys[3])
+        {
+            TestDisplayName = "k · " + string.Join(" · ", keys),
+        };
 
     [Theory]
     [MemberData(nameof(Entries))]
@@ -22,7 +25,8 @@ public class AdiabaticTests
         var derived = Prefactor(material) * Math.Sqrt(Math.Log(Warmth("final") / Warmth("initial"))) * PerSquareMillimetre;
         Assert.Equal(derived, tabulated, 1.0);
 
-        double Warmth(string moment) => Figure("adiabatic-beta", material) + Figure("k-temperature", material, insulation, role, size, moment);
+        double Warmth(string moment) =>
+            Figure("adiabatic-beta", material) + Figure("k-temperature", material, insulation, role, size, moment);
     }
 
     [Theory]
@@ -36,8 +40,11 @@ public class AdiabaticTests
         Assert.Equal(printed, Figure("adiabatic-k0", material) * 1e-6, 1e-9);
     }
 
-    private static double Prefactor(string material) =>
-        Math.Sqrt(Figure("adiabatic-heat-capacity", material) * (Figure("adiabatic-beta", material) + 20) / Figure("adiabatic-resistivity", material));
+    private static double Prefactor(string material)
+    {
+        var (heat, beta) = (Figure("adiabatic-heat-capacity", material), Figure("adiabatic-beta", material));
+        return Math.Sqrt(heat * (beta + 20) / Figure("adiabatic-resistivity", material));
+    }
 
     private static double Figure(string lookup, params IReadOnlyList<string> keys) => LookupFigure.Of(Shipped.Lookup(lookup), [.. keys]);
 }

@@ -14,19 +14,23 @@ public class CapacityFormulaTests
 
     public static IEnumerable<TheoryDataRow<string, string, double, double, double>> Cells() =>
         from name in Lookups
-        let keys = Shipped.Lookup(name).Keys.Select(key => key.Name).ToList()
         from entry in Shipped.Lookup(name).Cells()
-        let key = new Func<string, object?>(wanted => keys.Contains(wanted) ? entry.Keys[keys.IndexOf(wanted)] : null)
-        where !entry.Cell.IsEmpty && Equals(key("material"), "copper")
-            && IsFitted(name, key("construction") as string, (string)key("method")!, (double)key("csa")! / SquareMillimetre)
-        let row = new TheoryDataRow<string, string, double, double, double>(
-            (string)key("insulation")!, (string)key("method")!, (double)key("loaded")!, (double)key("csa")! / SquareMillimetre, entry.Cell.Number)
-        where Formula(row.Data.Item1, row.Data.Item2, row.Data.Item3, row.Data.Item4) is not null
-        select Named(row, name + " · " + string.Join(" · ", entry.Keys) + " · " + entry.Cell.Table.Id);
+        where !entry.Cell.IsEmpty && Equals(Key(name, entry.Keys, "material"), "copper")
+        let csa = (double)Key(name, entry.Keys, "csa")! / SquareMillimetre
+        let method = (string)Key(name, entry.Keys, "method")!
+        where IsFitted(name, Key(name, entry.Keys, "construction") as string, method, csa)
+        let insulation = (string)Key(name, entry.Keys, "insulation")!
+        let loaded = (double)Key(name, entry.Keys, "loaded")!
+        where Formula(insulation, method, loaded, csa) is not null
+        select new TheoryDataRow<string, string, double, double, double>(insulation, method, loaded, csa, entry.Cell.Number)
+        {
+            TestDisplayName = $"capacity · {name} · {string.Join(" · ", entry.Keys)} · {entry.Cell.Table.Id}",
+        };
 
     [Theory]
     [MemberData(nameof(Cells))]
-    public void A_tabulated_capacity_follows_the_fitted_formula(string insulation, string method, double loaded, double csa, double tabulated)
+    public void A_tabulated_capacity_follows_the_fitted_formula(
+        string insulation, string method, double loaded, double csa, double tabulated)
     {
         var fitted = Formula(insulation, method, loaded, csa)!.Value;
         Assert.Equal(fitted, tabulated, Math.Max(1, 0.02 * fitted));
@@ -55,13 +59,14 @@ public class CapacityFormulaTests
 
     private static double? Coefficient(string lookup, string insulation, double loaded, string method, double csa)
     {
-        var value = Shipped.Lookup(lookup).Find([Value.Of(insulation), Value.Of(loaded), Value.Of(method), Value.Of(csa * SquareMillimetre)], null);
+        Value[] keys = [Value.Of(insulation), Value.Of(loaded), Value.Of(method), Value.Of(csa * SquareMillimetre)];
+        var value = Shipped.Lookup(lookup).Find(keys, null);
         return value.IsMissing ? null : value.Number;
     }
 
-    private static TheoryDataRow<string, string, double, double, double> Named(TheoryDataRow<string, string, double, double, double> row, string name)
+    private static object? Key(string lookup, IReadOnlyList<object> keys, string wanted)
     {
-        row.TestDisplayName = "capacity · " + name;
-        return row;
+        var at = Shipped.Lookup(lookup).Keys.Select(key => key.Name).ToList().IndexOf(wanted);
+        return at < 0 ? null : keys[at];
     }
 }

@@ -22,7 +22,8 @@ public class ConditionTests
     {
         var rule = ShippedRule.Of(id);
         var formula = Bind(rule, part);
-        var values = ShippedRule.Cases(rule).Select(node => ShippedRule.Runner.Evaluate(formula, rule.Shape, node.Mapping("given"))).ToArray();
+        var values = ShippedRule.Cases(rule)
+            .Select(node => ShippedRule.Runner.Evaluate(formula, rule.Shape, node.Mapping("given"))).ToArray();
         Assert.Contains(values, value => value.IsTrue);
         Assert.Contains(values, value => value.IsFalse);
     }
@@ -31,8 +32,8 @@ public class ConditionTests
     {
         var problems = new Problems();
         var source = new SourceText("condition", text);
-        var formula = FormulaBinder.Bind(
-            new ScalarNode(new SourceSpan(source, 0, text.Length), text, ScalarKind.Text), rule.Shape, ShippedRule.Set.World, FormulaType.Flag, problems);
+        var node = new ScalarNode(new SourceSpan(source, 0, text.Length), text, ScalarKind.Text);
+        var formula = FormulaBinder.Bind(node, rule.Shape, ShippedRule.Set.World, FormulaType.Flag, problems);
         Assert.Equal("", ProblemText.Render(problems.All));
         return formula!;
     }

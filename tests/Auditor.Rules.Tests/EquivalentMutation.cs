@@ -21,7 +21,8 @@ internal sealed record EquivalentMutation(string Owner, string Change, string Be
             new EquivalentMutation(node.Text("owner")!, node.Text("change")!, node.Text("before")!, node.Text("reason")!));
     }
 
-    public bool Is(Mutation mutation) => mutation.Owner == Owner && mutation.Change == Change && TextBefore(mutation.Span).EndsWith(Before, StringComparison.Ordinal);
+    public bool Is(Mutation mutation) =>
+        mutation.Owner == Owner && mutation.Change == Change && TextBefore(mutation.Span).EndsWith(Before, StringComparison.Ordinal);
 
     private static string TextBefore(SourceSpan span) => span.Source.Text[..span.Start].TrimEnd();
 }

@@ -6,7 +6,9 @@ public class FormulaOutlineTests
 {
     [Fact]
     public void A_formula_is_split_at_and_outside_brackets_and_words() =>
-        Assert.Equal(["has(serves ?? none, 'a && b')", "(x || y)", "z > 3"], Texts(FormulaOutline.Conjuncts("has(serves ?? none, 'a && b') && (x || y) && z > 3")));
+        Assert.Equal(
+            ["has(serves ?? none, 'a && b')", "(x || y)", "z > 3"],
+            Texts(FormulaOutline.Conjuncts("has(serves ?? none, 'a && b') && (x || y) && z > 3")));
 
     [Theory]
     [InlineData("a && b || c")]
@@ -36,8 +38,10 @@ public class FormulaOutlineTests
     public void Places_are_those_of_the_text()
     {
         const string Formula = "a &&  load.power > 0.37 kW ";
-        Assert.Equal("load.power > 0.37 kW", Formula[FormulaOutline.Conjuncts(Formula)[1].Start..FormulaOutline.Conjuncts(Formula)[1].End]);
-        Assert.Equal(">", Formula[FormulaOutline.Comparisons(Formula)[0].Operator.Start..FormulaOutline.Comparisons(Formula)[0].Operator.End]);
+        var second = FormulaOutline.Conjuncts(Formula)[1];
+        var sign = FormulaOutline.Comparisons(Formula)[0].Operator;
+        Assert.Equal("load.power > 0.37 kW", Formula[second.Start..second.End]);
+        Assert.Equal(">", Formula[sign.Start..sign.End]);
     }
 
     private static IEnumerable<string> Texts(IEnumerable<FormulaPart> parts) => parts.Select(part => part.Text);

@@ -8,7 +8,9 @@ internal static class Inputs
 
     private static readonly string[] Lists = ["boards", "circuits", "earthing.bonding"];
 
-    /// <summary>Whether there is such an input of any subject, of the cable of a circuit or of the boards, or such a list of subjects.</summary>
+    /// <summary>
+    /// Whether there is such an input of any subject, of the cable of a circuit or of the boards, or such a list of subjects.
+    /// </summary>
     public static bool Has(string path) =>
         Lists.Contains(path) || HasInput(path)
         || (path.StartsWith(Cable, StringComparison.Ordinal) && HasInput(path[Cable.Length..]))

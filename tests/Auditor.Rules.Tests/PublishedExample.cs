@@ -53,7 +53,7 @@ internal sealed record PublishedExample(string Id, MappingNode Root)
     }
 
     private static Dictionary<string, PublishedExample> ReadAll() =>
-        Directory.EnumerateFiles(Repository.PathOf(Folder), "???-*.yaml").Select(file => Path.GetFileName(file)).Order(StringComparer.Ordinal)
-            .Select(file => new PublishedExample(Path.GetFileNameWithoutExtension(file), Read(file)))
+        Directory.EnumerateFiles(Repository.PathOf(Folder), "???-*.yaml").Select(file => Path.GetFileName(file))
+            .Order(StringComparer.Ordinal).Select(file => new PublishedExample(Path.GetFileNameWithoutExtension(file), Read(file)))
             .ToDictionary(example => example.Id);
 }

@@ -50,7 +50,12 @@ public class TradeFactTests
     [InlineData(1.98, "nonconforming")]
     public void An_installation_below_two_megohms_is_looked_into(double megohm, string verdict) =>
         Assert.Equal(verdict, RuleVerdict.Of("insulation-whole-advice",
-            $"basis.stage: verification\nall_circuits: [{{ readings.insulation.live_to_live: {megohm} Mohm, readings.insulation.live_to_earth: {megohm} Mohm }}]"));
+            $$"""
+            basis.stage: verification
+            all_circuits:
+              - readings.insulation.live_to_live: {{megohm}} Mohm
+                readings.insulation.live_to_earth: {{megohm}} Mohm
+            """));
 
     private const string TnFinalCircuit =
         """
@@ -60,7 +65,8 @@ public class TradeFactTests
         feeds_board: false
         """;
 
-    private static string Device(string curve, int rating) => $"device.standard: EN 60898\ndevice.curve: {curve}\ndevice.rating: {rating} A";
+    private static string Device(string curve, int rating) =>
+        $"device.standard: EN 60898\ndevice.curve: {curve}\ndevice.rating: {rating} A";
 
     private static double Circuit(string symbol, string given) => Shipped.Compute(Shipped.UnitedKingdom, "circuit", symbol, given);
 }

@@ -42,7 +42,7 @@ public class ZsTableTests
             Assert.NotNull(row.Table.Text("trust"));
         });
 
-    /// <summary>A standard that designs no longer name has a curve, but its devices cannot be described: the curve is read directly.</summary>
+    /// <summary>A standard that designs no longer name has a curve, but its devices cannot be described: then the curve is read.</summary>
     private static double Zs_max(ZsTableRow row)
     {
         var set = Shipped.Set(Shipped.UnitedKingdom);

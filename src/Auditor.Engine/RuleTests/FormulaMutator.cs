@@ -44,7 +44,9 @@ internal sealed class FormulaMutator(SubjectShape shape, FormulaWorld world)
 
     /// <summary>The formula with parts of its text left out or put in place of the whole; null where that does not bind.</summary>
     public FormulaMutant? Rewritten(Formula formula, string text, FormulaPart place, string change) =>
-        Bind(text, formula.Type) is { } bound ? new FormulaMutant(bound, formula.Source.SpanOf(place.Start, place.Text.Length), change) : null;
+        Bind(text, formula.Type) is { } bound
+            ? new FormulaMutant(bound, formula.Source.SpanOf(place.Start, place.Text.Length), change)
+            : null;
 
     /// <summary>A formula bound from a text; null where it does not bind.</summary>
     /// <param name="text">The text.</param>
@@ -52,7 +54,8 @@ internal sealed class FormulaMutator(SubjectShape shape, FormulaWorld world)
     public Formula? Bind(string text, FormulaType? type)
     {
         var source = new SourceText("changed", text);
-        return FormulaBinder.Bind(new ScalarNode(new SourceSpan(source, 0, text.Length), text, ScalarKind.Text), shape, world, type, new Problems());
+        var node = new ScalarNode(new SourceSpan(source, 0, text.Length), text, ScalarKind.Text);
+        return FormulaBinder.Bind(node, shape, world, type, new Problems());
     }
 
     private IEnumerable<FormulaMutant> Shifted(Formula formula, FormulaPart part, bool isCount)

@@ -17,7 +17,8 @@ public sealed class MutationRunner(RuleSet rules)
     {
         var quantities = rules.Quantities.ToArray();
         var reports = new MutationReport[rules.Rules.Count + quantities.Length];
-        Parallel.For(0, reports.Length, i => reports[i] = i < rules.Rules.Count ? Run(rules.Rules[i]) : Run(quantities[i - rules.Rules.Count]));
+        Parallel.For(0, reports.Length, i =>
+            reports[i] = i < rules.Rules.Count ? Run(rules.Rules[i]) : Run(quantities[i - rules.Rules.Count]));
         return Together(reports);
     }
 

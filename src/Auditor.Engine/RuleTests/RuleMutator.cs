@@ -30,7 +30,7 @@ internal sealed class RuleMutator(Rule rule, RuleSet rules, CaseRunner runner)
         };
         return how == rule.Check.How
             ? []
-            : [(rule with { Check = rule.Check with { How = how } }, Change(rule.Check.Limits[0].Source.Span, MutationMessages.Turned(from, to)))];
+            : [(With(rule.Check with { How = how }), Change(rule.Check.Limits[0].Source.Span, MutationMessages.Turned(from, to)))];
     }
 
     private IEnumerable<(Rule, Mutation)> Dropped()
@@ -56,7 +56,7 @@ internal sealed class RuleMutator(Rule rule, RuleSet rules, CaseRunner runner)
         rule.When is { } when ? InFormula(when, changed => rule with { When = changed }) : [];
 
     private IEnumerable<(Rule, Mutation)> InValue() =>
-        InFormula(rule.Check.Value, changed => rule with { Check = rule.Check with { Value = changed } });
+        InFormula(rule.Check.Value, changed => With(rule.Check with { Value = changed }));
 
     private IEnumerable<(Rule, Mutation)> InLimits()
     {
@@ -81,10 +81,13 @@ internal sealed class RuleMutator(Rule rule, RuleSet rules, CaseRunner runner)
         limit.Type.Kind == FormulaKind.Quantity && rule.Check.How is CheckKind.AtMost or CheckKind.AtLeast or CheckKind.Within;
 
     private Rule WithLimit(int index, Formula changed) =>
-        rule with { Check = rule.Check with { Limits = [.. rule.Check.Limits.Select((limit, i) => i == index ? changed : limit)] } };
+        With(rule.Check with { Limits = [.. rule.Check.Limits.Select((limit, i) => i == index ? changed : limit)] });
+
+    private Rule With(Check check) => rule with { Check = check };
 
     private IEnumerable<(Rule, Mutation)> InFormula(Formula formula, Func<Formula, Rule> change) =>
-        _formulas.Turned(formula).Concat(_formulas.Shifted(formula, IsCount)).Select(mutant => (change(mutant.Formula), Change(mutant.Span, mutant.Change)));
+        _formulas.Turned(formula).Concat(_formulas.Shifted(formula, IsCount))
+            .Select(mutant => (change(mutant.Formula), Change(mutant.Span, mutant.Change)));
 
     /// <summary>Whether the rule compares counts: a pure number that is whole in every case, value and limit alike.</summary>
     private bool ComparesCounts() =>

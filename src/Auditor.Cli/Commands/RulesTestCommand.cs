@@ -1,5 +1,6 @@
 using System.CommandLine;
 using Auditor.Documents;
+using Auditor.Engine.RuleSets;
 using Auditor.Engine.RuleTests;
 
 namespace Auditor.Cli.Commands;
@@ -10,18 +11,23 @@ internal static class RulesTestCommand
     public static Command Make(Terminal terminal)
     {
         var rules = RuleSetOption.Make();
+        var mutate = new Option<bool>("--mutate")
+        {
+            Description = "Turn comparisons round, shift limits by 1 %, drop conditions, and list every change that no case notices.",
+        };
         var command = new Command("test", """
             Run every case of every sheet and rule.
 
             Examples:
               auditor rules test
               auditor rules test --rules house/firm.set.yaml
-            """) { rules };
-        command.SetAction(parsed => Run(terminal, parsed.GetValue(rules)));
+              auditor rules test --mutate
+            """) { rules, mutate };
+        command.SetAction(parsed => Run(terminal, parsed.GetValue(rules), parsed.GetValue(mutate)));
         return command;
     }
 
-    private static int Run(Terminal terminal, string? name)
+    private static int Run(Terminal terminal, string? name, bool mutate)
     {
         var problems = new Problems();
         var set = RuleSetOption.Load(name, problems);
@@ -40,6 +46,29 @@ internal static class RulesTestCommand
 
         var failed = results.Count(result => result.Failure is not null);
         terminal.Output.WriteLine($"{results.Count - failed} passed, {failed} failed");
-        return problems.HasErrors ? ExitCode.Problems : failed == 0 ? ExitCode.Clean : ExitCode.Found;
+        if (problems.HasErrors)
+        {
+            return ExitCode.Problems;
+        }
+
+        return failed > 0 ? ExitCode.Found : mutate ? Mutate(terminal, set) : ExitCode.Clean;
+    }
+
+    private static int Mutate(Terminal terminal, RuleSet set)
+    {
+        var report = new MutationRunner(set).Run();
+        var survivors = new Problems();
+        foreach (var mutation in report.Survivors)
+        {
+            survivors.Add(mutation.Unnoticed());
+        }
+
+        if (report.Survivors.Count > 0)
+        {
+            terminal.Output.WriteLine(ProblemText.Render(survivors.All));
+        }
+
+        terminal.Output.WriteLine($"{report.Count} changes tried, {report.Survivors.Count} noticed by no case");
+        return report.Survivors.Count == 0 ? ExitCode.Clean : ExitCode.Found;
     }
 }

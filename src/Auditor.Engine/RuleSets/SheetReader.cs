@@ -13,7 +13,7 @@ namespace Auditor.Engine.RuleSets;
 /// <param name="problems">Receives what is wrong.</param>
 internal sealed class SheetReader(Shapes shapes, Problems problems)
 {
-    private readonly List<Declared> _declared = [];
+    private readonly Dictionary<(SubjectShape, string), Declared> _declared = [];
 
     /// <summary>Declares the quantities of a sheet.</summary>
     /// <param name="file">The sheet's file.</param>
@@ -29,14 +29,14 @@ internal sealed class SheetReader(Shapes shapes, Problems problems)
                 continue;
             }
 
-            var earlier = _declared.Find(declared => declared.Shape == shape && declared.Slot.Symbol == symbol.Text);
+            var earlier = _declared.GetValueOrDefault((shape, symbol.Text));
             if (earlier is null && shape.AddQuantity(symbol.Text, type, unit))
             {
-                _declared.Add(new Declared(shape, shape.Quantity(symbol.Text)!, node, file.Root.Text("sheet")!, set));
+                _declared.Add((shape, symbol.Text), new Declared(shape, shape.Quantity(symbol.Text)!, node, file.Root.Text("sheet")!, set));
             }
             else if (earlier is not null && earlier.Set < set && earlier.Slot.Type.Equals(type))
             {
-                _declared[_declared.IndexOf(earlier)] = earlier with { Node = node, Sheet = file.Root.Text("sheet")!, Set = set };
+                _declared[(shape, symbol.Text)] = earlier with { Node = node, Sheet = file.Root.Text("sheet")!, Set = set };
             }
             else
             {
@@ -50,7 +50,7 @@ internal sealed class SheetReader(Shapes shapes, Problems problems)
     public QuantityDefinition[][] Bind(FormulaWorld world)
     {
         var all = shapes.All.Select(shape => new QuantityDefinition[shape.Quantities.Count]).ToArray();
-        foreach (var declared in _declared)
+        foreach (var declared in _declared.Values)
         {
             var formula = FormulaBinder.Bind(declared.Node.Scalar("formula")!, declared.Shape, world, declared.Slot.Type, problems);
             if (formula is not null)

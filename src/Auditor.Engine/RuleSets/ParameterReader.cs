@@ -10,7 +10,7 @@ namespace Auditor.Engine.RuleSets;
 /// <summary>Reads the parameters of a chain of sets; a later set's value goes before an earlier one's.</summary>
 internal static class ParameterReader
 {
-    public static IReadOnlyList<Parameter> Read(IReadOnlyList<SetFile> chain)
+    public static IReadOnlyList<Parameter> Read(IReadOnlyList<SetFile> chain, Problems problems)
     {
         var byId = new Dictionary<string, MappingNode>();
         var order = new List<string>();
@@ -22,10 +22,22 @@ internal static class ParameterReader
                 order.Add(id);
             }
 
-            byId[id] = Merge((MappingNode)entry.Value, byId.GetValueOrDefault(id));
+            var (later, earlier) = ((MappingNode)entry.Value, byId.GetValueOrDefault(id));
+            CheckKind(id, later, earlier, problems);
+            byId[id] = Merge(later, earlier);
         }
 
         return [.. order.Order(StringComparer.Ordinal).Select((id, index) => Make(id, index, byId[id]))];
+    }
+
+    private static void CheckKind(string id, MappingNode later, MappingNode? earlier, Problems problems)
+    {
+        var value = later.Scalar("value")!;
+        var type = Literal(value).Type;
+        if (earlier is not null && Literal(earlier.Scalar("value")!).Type is var before && !type.Equals(before))
+        {
+            problems.Add(RuleMessages.ParameterKind(value.Span, id, type, before));
+        }
     }
 
     /// <summary>A house set need only state the new value: what it leaves out stays as the set before it says.</summary>

@@ -20,10 +20,19 @@ internal static class RuleMessages
 
     public static Problem NoSuchPath(SourceSpan span, string path) => Problem.Error("rules-not-found", $"there is no `{path}`", span, "paths are relative to the folder of the set's rule data");
 
+    public static Problem ExtendsOutside(SourceSpan span, string path) => Problem.Error(
+        "extends-outside-folder", $"`{path}` lies outside the folder of this set", span, "name a shipped set, or keep the set that this one builds on in the same folder");
+
+    public static Problem ExtendsTooLong(SourceSpan span, int most) => Problem.Error(
+        "extends-too-long", $"more than {most} sets build on one another", span, "build on a set nearer to the base");
+
+    public static Problem ParameterKind(SourceSpan span, string id, FormulaType value, FormulaType before) => Problem.Error(
+        "parameter-kind", $"parameter `{id}` is {before}, and this is {value}", span, "a set may give a parameter another value, not another kind of value or unit");
+
     public static Problem ExtendsCircle(SourceSpan span, string name) => Problem.Error("extends-in-a-circle", $"set `{name}` extends itself", span, null);
 
     public static Problem SecondSymbol(SourceSpan span, string symbol, string shape, string other) => Problem.Error(
-        "duplicate-symbol", $"a {shape} has a `{symbol}` already", span, $"it is {other}; choose another symbol");
+        "duplicate-symbol", $"there is a `{symbol}` of the {shape} already", span, $"it is {other}; choose another symbol");
 
     public static Problem SecondRule(SourceSpan span, string id, string otherPath) => Problem.Error(
         "duplicate-rule", $"there is a rule `{id}` already", span, $"it stands in {otherPath}; a house set may replace a rule, a set may not have it twice");
@@ -39,8 +48,9 @@ internal static class RuleMessages
     public static Problem Compare(SourceSpan span, string how, FormulaType value, FormulaType limit) => Problem.Error(
         "unit-mismatch", $"`{how}` cannot compare {value} with {limit}", span, "value and limit need the same kind of value and the same unit");
 
-    public static Problem NotOrdered(SourceSpan span, string how, FormulaType value) => Problem.Error(
-        "wrong-type", $"`{how}` compares quantities, and this is {value}", span, "use `equals` or `one-of` for words, `require` for flags");
+    public static Problem NotComparable(SourceSpan span, string how, FormulaType value) => Problem.Error(
+        "wrong-type", $"`{how}` cannot compare {value}", span,
+        "at-most, at-least and within are for quantities, equals and one-of for single words as well; `require: has(list, 'word')` asks a list");
 
     public static Problem CompareOnce(SourceSpan span) => Problem.Error(
         "compare-once", "`compare` has a `value` and exactly one of at-most, at-least, within, equals, one-of", span, null);

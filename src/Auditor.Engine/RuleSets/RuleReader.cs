@@ -26,6 +26,12 @@ internal sealed class RuleReader(Shapes shapes, FormulaWorld world, Problems pro
     public Rule? Read(RuleFile file)
     {
         var node = file.Root;
+        var id = node.Scalar("rule")!;
+        if (Path.GetFileNameWithoutExtension(file.Path) != id.Text)
+        {
+            problems.Add(RuleMessages.NameIsNotFile(id.Span, id.Text, Path.GetFileName(file.Path)));
+        }
+
         var shape = shapes.Find(node.Text("of")!)!;
         var when = node.Scalar("when") is { } condition ? Bind(condition, shape, FormulaType.Flag) : null;
         var check = node.Mapping("compare") is { } compare ? ReadComparison(compare, shape) : ReadRequirement(node.Scalar("require")!, shape);
@@ -37,7 +43,7 @@ internal sealed class RuleReader(Shapes shapes, FormulaWorld world, Problems pro
 
         return new Rule
         {
-            Id = node.Text("rule")!,
+            Id = id.Text,
             Title = node.Text("title")!,
             Covers = node.Texts("covers"),
             Clause = ClauseReader.Read(node),
@@ -82,10 +88,16 @@ internal sealed class RuleReader(Shapes shapes, FormulaWorld world, Problems pro
             return null;
         }
 
-        if (how is CheckKind.AtMost or CheckKind.AtLeast or CheckKind.Within && value.Type.Kind != FormulaKind.Quantity)
+        var isOrdered = how is CheckKind.AtMost or CheckKind.AtLeast or CheckKind.Within;
+        if (value.Type.Kind == FormulaKind.Words || (isOrdered && value.Type.Kind != FormulaKind.Quantity))
         {
-            problems.Add(RuleMessages.NotOrdered(valueNode.Span, entry.Key.Value, value.Type));
+            problems.Add(RuleMessages.NotComparable(valueNode.Span, entry.Key.Value, value.Type));
             return null;
+        }
+
+        foreach (var limit in limits)
+        {
+            FormulaBinder.CheckWords(value, limit!, problems);
         }
 
         return new Check(how, value, limits!, value.Root.Unit ?? limits[0]!.Unit);

@@ -39,7 +39,7 @@ public sealed class RuleSetLoader
     {
         var files = chain.Select(set => _reader.Read(set.Files(["tables", "curves", "sheets", "provisions"], _problems))).ToArray();
         var schema = schemaTask.GetAwaiter().GetResult();
-        var parameters = ParameterReader.Read(chain);
+        var parameters = ParameterReader.Read(chain, _problems);
         var world = World(files, parameters);
 
         var sheets = new SheetReader(schema.Shapes, _problems);

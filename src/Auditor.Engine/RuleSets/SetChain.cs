@@ -28,9 +28,15 @@ internal sealed class SetChain(RuleHome home, RuleFileReader reader, Problems pr
                 return [];
             }
 
-            if (!seen.Add(full) || seen.Count > MostLinks)
+            if (!seen.Add(full))
             {
                 problems.Add(RuleMessages.ExtendsCircle(asked!.Value, name));
+                return [];
+            }
+
+            if (seen.Count > MostLinks)
+            {
+                problems.Add(RuleMessages.ExtendsTooLong(asked!.Value, MostLinks));
                 return [];
             }
 
@@ -40,10 +46,17 @@ internal sealed class SetChain(RuleHome home, RuleFileReader reader, Problems pr
             }
 
             var (root, rootShown) = RootOf(full, shown!);
-            chain.Insert(0, new SetFile(file.Root, root, rootShown));
+            var set = new SetFile(file.Root, root, rootShown);
+            chain.Insert(0, set);
             if (file.Root.Scalar("extends") is not { } next)
             {
                 return chain;
+            }
+
+            if (IsPath(next.Text) && !set.Holds(Path.GetFullPath(Path.Combine(Path.GetDirectoryName(full)!, next.Text))))
+            {
+                problems.Add(RuleMessages.ExtendsOutside(next.Span, next.Text));
+                return [];
             }
 
             (name, folder, display, asked) = (next.Text, Path.GetDirectoryName(full)!, Path.GetDirectoryName(shown!)!.Replace('\\', '/'), next.Span);
@@ -52,13 +65,13 @@ internal sealed class SetChain(RuleHome home, RuleFileReader reader, Problems pr
 
     private (string? Full, string? Display) Locate(string name, string folder, string display)
     {
-        if (!name.EndsWith(".yaml", StringComparison.Ordinal) && !name.Contains('/'))
+        if (!IsPath(name))
         {
             // A copy of the shipped sets is built on its own base, not on the shipped one.
             var beside = Path.Combine(folder, name + ".yaml");
             if (Path.GetFileName(folder) == "sets" && File.Exists(beside))
             {
-                return (beside, $"{display}/{name}.yaml");
+                return (beside, display.Length == 0 ? $"{name}.yaml" : $"{display}/{name}.yaml");
             }
 
             var shipped = home.SetPath(name);
@@ -67,6 +80,8 @@ internal sealed class SetChain(RuleHome home, RuleFileReader reader, Problems pr
 
         return (Path.GetFullPath(Path.Combine(folder, name)), display.Length == 0 ? Shown(name) : $"{display}/{name}");
     }
+
+    private static bool IsPath(string name) => name.EndsWith(".yaml", StringComparison.Ordinal) || name.Contains('/');
 
     /// <summary>Reports name no place of a machine: an absolute path is shown by its last folder and name.</summary>
     private static string Shown(string name)

@@ -11,7 +11,7 @@ internal sealed record SetFile(MappingNode Root, string Folder, string Display)
     /// <summary>Its name.</summary>
     public string Id => Root.Text("set")!;
 
-    /// <summary>The files of one kind that it uses, each with the path to show, in the order of the set and then by name.</summary>
+    /// <summary>The files of some kinds that it uses, each once and with the path to show, in the order of the set and then by name.</summary>
     /// <param name="kinds">Keys of <c>uses</c>.</param>
     /// <param name="problems">Receives paths that are not there or lead outside.</param>
     public IReadOnlyList<(string Full, string Display)> Files(IEnumerable<string> kinds, Problems problems)
@@ -22,13 +22,13 @@ internal sealed record SetFile(MappingNode Root, string Folder, string Display)
             files.AddRange(Expand(path, problems));
         }
 
-        return files;
+        return [.. files.DistinctBy(file => file.Item1)];
     }
 
     private List<(string Full, string Display)> Expand(ScalarNode path, Problems problems)
     {
         var full = System.IO.Path.GetFullPath(System.IO.Path.Combine(Folder, path.Text));
-        if (!IsInside(full))
+        if (!Holds(full))
         {
             problems.Add(RuleMessages.OutsideRoot(path.Span, path.Text));
             return [];
@@ -49,8 +49,8 @@ internal sealed record SetFile(MappingNode Root, string Folder, string Display)
         return [.. Directory.EnumerateFiles(full, "*.yaml", options).Order(StringComparer.Ordinal).Select(file => (file, Show(file)))];
     }
 
-    /// <summary>Whether a path lies in the folder, symbolic links along it followed.</summary>
-    private bool IsInside(string full)
+    /// <summary>Whether a path lies in the folder, and no symbolic link along it leads elsewhere.</summary>
+    public bool Holds(string full)
     {
         var root = Folder.TrimEnd('/') + "/";
         if (full != Folder && !full.StartsWith(root, StringComparison.Ordinal))

@@ -208,13 +208,13 @@ internal sealed partial class Binder
             return null;
         }
 
-        CheckWord(left, right);
-        CheckWord(right, left);
+        CheckWord(left, right, problems);
+        CheckWord(right, left, problems);
         return new CompareTerm(SpanOf(binary), relation, left, right);
     }
 
     /// <summary>Tells of a word written out that the input beside it can never be.</summary>
-    private void CheckWord(Term words, Term literal)
+    public static void CheckWord(Term words, Term literal, Problems problems)
     {
         if (words.Type is { Kind: FormulaKind.Text, Vocabulary: { } allowed } && literal is LiteralTerm { Constant.Text: { } word } && !allowed.Contains(word))
         {

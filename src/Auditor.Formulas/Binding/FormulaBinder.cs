@@ -25,4 +25,14 @@ public static class FormulaBinder
         problems.Add(FormulaMessages.WrongResult(source.Span, declared, formula.Type));
         return null;
     }
+
+    /// <summary>Tells of a word that a formula writes out and that the input it is compared with can never be.</summary>
+    /// <param name="value">The formula of the value.</param>
+    /// <param name="limit">The formula that it is compared with.</param>
+    /// <param name="problems">Receives the word.</param>
+    public static void CheckWords(Formula value, Formula limit, Problems problems)
+    {
+        Binder.CheckWord(value.Root, limit.Root, problems);
+        Binder.CheckWord(limit.Root, value.Root, problems);
+    }
 }

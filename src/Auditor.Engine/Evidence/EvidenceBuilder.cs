@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Installation;
 using Auditor.Engine.RuleSets;
@@ -15,13 +16,13 @@ namespace Auditor.Engine.Evidence;
 /// <param name="rules">The rule set.</param>
 public sealed class EvidenceBuilder(RuleSet rules)
 {
-    private readonly HashSet<(string Subject, string Symbol)> _told = [];
+    private readonly HashSet<(ISubject Subject, string Symbol)> _told = [];
 
     /// <summary>How a quantity of a subject was computed, down to design lines and table cells; each quantity is unfolded once.</summary>
     public Derivation Of(ISubject subject, QuantitySlot slot)
     {
         var definition = rules.Quantity(subject.Shape, slot.Index);
-        _told.Add((subject.Key, slot.Symbol));
+        _told.Add((subject, slot.Symbol));
         var about = new Heading(slot.Symbol, definition.Name, slot.Unit, definition.Clause.References, definition.Note);
         return Derive(subject, definition.Formula, about);
     }
@@ -58,7 +59,7 @@ public sealed class EvidenceBuilder(RuleSet rules)
     private List<EvidenceSource> Sources(Tracer tracer, in Value value)
     {
         var sources = new List<EvidenceSource>();
-        var seen = new HashSet<(string, string)>();
+        var seen = new HashSet<(object, string)>();
         foreach (var reading in tracer.Readings)
         {
             foreach (var source in SourcesOf(reading, seen))
@@ -77,15 +78,15 @@ public sealed class EvidenceBuilder(RuleSet rules)
         return sources;
     }
 
-    private IEnumerable<EvidenceSource> SourcesOf(Tracer.Reading reading, HashSet<(string, string)> seen)
+    private IEnumerable<EvidenceSource> SourcesOf(Tracer.Reading reading, HashSet<(object, string)> seen)
     {
-        if (reading is { Input: { } input, Subject: { } holder } && seen.Add((holder.Key, input.Name)))
+        if (reading is { Input: { } input, Subject: { } holder } && seen.Add((holder, input.Name)))
         {
             yield return InputSource(holder, input, reading.Value);
         }
-        else if (reading is { Quantity: { } quantity, Subject: { } subject } && seen.Add((subject.Key, quantity.Symbol)))
+        else if (reading is { Quantity: { } quantity, Subject: { } subject } && seen.Add((subject, quantity.Symbol)))
         {
-            var derivation = _told.Contains((subject.Key, quantity.Symbol)) ? null : Of(subject, quantity);
+            var derivation = _told.Contains((subject, quantity.Symbol)) || !RuntimeHelpers.TryEnsureSufficientExecutionStack() ? null : Of(subject, quantity);
             yield return new EvidenceSource(
                 EvidenceKind.Quantity, $"{subject.Key} {quantity.Symbol}", ValueText.Show(reading.Value, quantity.Unit), "", derivation is null ? "told elsewhere" : "", derivation);
         }

@@ -10,29 +10,29 @@ internal static class NumbersPutIn
 {
     public static string Write(Formula formula, IReadOnlyList<Tracer.Reading> readings)
     {
-        var whole = formula.Source.Span;
+        var source = formula.Source;
+        var places = Enumerable.Range(0, source.Text.Length + 1).Select(source.OffsetOf).ToList();
         var text = new StringBuilder();
-        var at = whole.Start;
-        foreach (var reading in Outermost(readings, whole))
+        var at = 0;
+        foreach (var reading in Outermost(readings, source.Span))
         {
-            text.Append(whole.Source.Text, at, reading.Term.Start - at);
-            text.Append(Shown(reading, IsBracketed(whole.Source.Text, reading.Term)));
-            at = reading.Term.End;
+            var start = IndexOf(places, reading.Term.Start);
+            var end = IndexOf(places, reading.Term.End);
+            text.Append(source.Text, at, start - at);
+            text.Append(Shown(reading, IsBracketed(source.Text, start, end)));
+            at = end;
         }
 
-        text.Append(whole.Source.Text, at, whole.End - at);
-        return OneLine(text.ToString());
+        return OneLine(text.Append(source.Text, at, source.Text.Length - at).ToString());
     }
 
-    /// <summary>A formula as written, on one line and without the marks that YAML puts around it.</summary>
-    public static string OneLine(string text)
-    {
-        var words = text.Split([' ', '\t', '\r', '\n'], StringSplitOptions.RemoveEmptyEntries);
-        return words is [">-" or ">" or "|" or "|-", .. var rest] ? string.Join(' ', rest) : string.Join(' ', words);
-    }
+    /// <summary>A formula on one line.</summary>
+    public static string OneLine(string text) => string.Join(' ', text.Split([' ', '\t', '\r', '\n'], StringSplitOptions.RemoveEmptyEntries));
 
-    private static bool IsBracketed(string text, SourceSpan term) =>
-        term.Start > 0 && text[term.Start - 1] == '(' && term.End < text.Length && text[term.End] == ')';
+    /// <summary>The index in the formula of the first character that stands at or after an offset of the file.</summary>
+    private static int IndexOf(List<int> places, int offset) => places.FindIndex(place => place >= offset) is >= 0 and var index ? index : places.Count - 1;
+
+    private static bool IsBracketed(string text, int start, int end) => start > 0 && text[start - 1] == '(' && end < text.Length && text[end] == ')';
 
     private static string Shown(Tracer.Reading reading, bool isBracketed)
     {

@@ -6,8 +6,7 @@ using Auditor.Reports.Templates;
 
 namespace Auditor.Reports.Tests;
 
-/// <summary>Reports depend on their input alone. The tests of this class change what the whole process shares, so they run one after another.</summary>
-[Collection(nameof(DeterminismTests))]
+/// <summary>Reports depend on their input alone.</summary>
 public class DeterminismTests
 {
     [Fact]

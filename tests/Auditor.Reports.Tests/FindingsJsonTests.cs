@@ -2,12 +2,14 @@ using System.Text;
 using System.Text.Json;
 using Auditor.Documents;
 using Auditor.Reports.Json;
+using Auditor.Testing;
 
 namespace Auditor.Reports.Tests;
 
 public class FindingsJsonTests
 {
-    private static readonly Schema Findings = Schema.Parse(new SourceText("findings.schema.json", File.ReadAllText(Sheds.Data("rules/schema/findings.schema.json"))));
+    private static readonly Schema Findings =
+        Schema.Parse(new SourceText("findings.schema.json", File.ReadAllText(Repository.PathOf("rules/schema/findings.schema.json"))));
 
     [Theory]
     [InlineData("garden", false)]
@@ -86,12 +88,15 @@ public class FindingsJsonTests
     [InlineData("A/2/leg 2", "length", "14 m, measured", "measured", "subject", "garden/circuits.yaml:13:31")]
     [InlineData("A/1", "serves", "lighting", "designed", "subject", "garden/circuits.yaml:6:13")]
     [InlineData("-", "supply.phases", "1", "designed", "subject", "garden.design.yaml:9:33")]
-    public void What_the_design_states_is_told_with_where_it_was_said(string subject, string input, string text, string standing, string from, string place)
+    public void What_the_design_states_is_told_with_where_it_was_said(
+        string subject, string input, string text, string standing, string from, string place)
     {
         using var json = Parse("garden", evidence: true);
         var stated = json.RootElement.GetProperty("stated").GetProperty(subject).GetProperty(input);
 
-        Assert.Equal((text, standing, from), (stated.GetProperty("text").GetString(), stated.GetProperty("standing").GetString(), stated.GetProperty("from").GetString()));
+        Assert.Equal(
+            (text, standing, from),
+            (stated.GetProperty("text").GetString(), stated.GetProperty("standing").GetString(), stated.GetProperty("from").GetString()));
         Assert.Equal(place, PlaceOf(stated));
     }
 
@@ -121,10 +126,13 @@ public class FindingsJsonTests
 
         Assert.Equal(JsonValueKind.Null, run.GetProperty("value").ValueKind);
         var gap = Assert.Single(run.GetProperty("missing").EnumerateArray());
-        Assert.Equal(("A/4/leg 1", "length", "`length` is not given"), (gap.GetProperty("subject").GetString(), gap.GetProperty("name").GetString(), gap.GetProperty("reason").GetString()));
+        Assert.Equal(
+            ("A/4/leg 1", "length", "`length` is not given"),
+            (gap.GetProperty("subject").GetString(), gap.GetProperty("name").GetString(), gap.GetProperty("reason").GetString()));
     }
 
-    private static string Write(string design, bool evidence) => Encoding.UTF8.GetString(FindingsJson.Write(Sheds.Audit(design), Sheds.Register, new FindingsOptions(evidence)));
+    private static string Write(string design, bool evidence) =>
+        Encoding.UTF8.GetString(FindingsJson.Write(Sheds.Audit(design), Sheds.Register, new FindingsOptions(evidence)));
 
     private static JsonDocument Parse(string design, bool evidence) => JsonDocument.Parse(Write(design, evidence));
 

@@ -13,7 +13,8 @@ public class OwnTemplateTests
         var report = Sheds.Render("garden", ReportFormat.Markdown, Sheds.Template("templates/house/house.scriban-md"));
 
         Assert.StartsWith("# Three sheds in one garden\n", report, StringComparison.Ordinal);
-        Assert.Contains("- nonconforming: 4 `load-within-capacity` `run-sensible` `air-not-too-warm` `device-known`\n", report, StringComparison.Ordinal);
+        Assert.Contains(
+            "- nonconforming: 4 `load-within-capacity` `run-sensible` `air-not-too-cold` `device-known`\n", report, StringComparison.Ordinal);
         Assert.Contains("- departed: 1 `bonding-enough`\n", report, StringComparison.Ordinal);
     }
 

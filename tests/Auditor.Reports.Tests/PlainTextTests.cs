@@ -54,7 +54,8 @@ public class PlainTextTests
     [InlineData("hostile")]
     public void No_line_of_the_shipped_report_is_longer_than_a_hundred_columns(string design) =>
         Assert.All(
-            Sheds.Render(design, ReportFormat.Text, TemplateFile.Shipped(ReportFormat.Text)).Split('\n'), line => Assert.True(line.Length <= 100, line));
+            Sheds.Render(design, ReportFormat.Text, TemplateFile.Shipped(ReportFormat.Text)).Split('\n'),
+            line => Assert.True(line.Length <= 100, line));
 
     [Fact]
     public void Text_is_shown_as_it_is_but_for_breaks_and_what_turns_it_around() =>

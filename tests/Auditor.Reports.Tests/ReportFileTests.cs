@@ -84,7 +84,9 @@ public class ReportFileTests
         Assert.Equal(before, File.ReadAllText(path));
     }
 
-    /// <summary>A file that is there in a folder that takes no new one. Permissions do not stop a privileged user; the process folder stops everybody.</summary>
+    /// <summary>
+    /// A file that is there, in a folder that takes no new one. Permissions do not stop a privileged user; the folder of processes stops everybody.
+    /// </summary>
     private static (string Path, string Content) FileInUnwritableFolder(TemporaryFolder folder)
     {
         var path = folder.Write("closed/report.md", "old");

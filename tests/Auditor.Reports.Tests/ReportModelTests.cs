@@ -19,7 +19,7 @@ public class ReportModelTests
 
     [Fact]
     public void Broken_requirements_need_action_in_the_order_of_the_design() =>
-        Assert.Equal(["load-within-capacity:A/2", "air-not-too-warm:A/2/leg 2", "device-known:A/3"], _garden.Action.Select(finding => finding.Key));
+        Assert.Equal(["load-within-capacity:A/2", "air-not-too-cold:A/2/leg 2", "device-known:A/3"], _garden.Action.Select(finding => finding.Key));
 
     [Fact]
     public void Groups_go_from_the_gravest_verdict_to_the_best() =>
@@ -28,12 +28,20 @@ public class ReportModelTests
     [Fact]
     public void A_finding_shows_value_limit_and_margin_with_their_units()
     {
-        var warm = _garden.Action[1];
+        var cold = _garden.Action[1];
 
-        Assert.Equal(("45 °C", "at most 40 °C", "-12.5 %", "-5 K"), (warm.Value, warm.Limit, warm.RelativeMargin, warm.AbsoluteMargin));
-        Assert.Equal("A/2/leg 2 Pump", warm.SubjectLabel);
-        Assert.Equal("garden/circuits.yaml:13:58", warm.Location);
-        Assert.Equal(["from memory: param.warm_air: 40 °C"], warm.RestsOn);
+        Assert.Equal(("-5 °C", "at least 0 °C", "-5 K"), (cold.Value, cold.Limit, cold.Margin));
+        Assert.Equal("A/2/leg 2 Pump", cold.SubjectLabel);
+        Assert.Equal("garden/circuits.yaml:13:58", cold.Location);
+        Assert.Equal(["from memory: param.cold_air: 0 °C"], cold.RestsOn);
+    }
+
+    [Fact]
+    public void A_margin_is_shown_as_a_share_and_in_the_unit()
+    {
+        var load = _garden.Action[0];
+
+        Assert.Equal(("-4.2 %", "-1 A", "-4.2 % (-1 A)"), (load.RelativeMargin, load.AbsoluteMargin, load.Margin));
     }
 
     [Fact]
@@ -64,7 +72,7 @@ public class ReportModelTests
     {
         var pump = _garden.Schedule.Rows.Single(row => row.Key == "A/2");
 
-        Assert.Equal(("nonconforming", "-12.5 %", "air-not-too-warm"), (pump.Verdict, pump.Margin, pump.MarginRule));
+        Assert.Equal(("nonconforming", "-10.0 %", "run-sensible"), (pump.Verdict, pump.Margin, pump.MarginRule));
         Assert.Equal(["EN 60898 C 20 A", "2.5 mm² / 4 mm²", "25 A", "24 A"], pump.Cells);
     }
 
@@ -75,7 +83,13 @@ public class ReportModelTests
     [Fact]
     public void Departures_say_what_became_of_them() =>
         Assert.Equal(
-            ["in force", "not needed: nothing nonconforming to accept", "refused: the rule allows no departure", "expired: its last day is past", "matches no finding of this audit"],
+            [
+                "in force",
+                "not needed: nothing nonconforming to accept",
+                "refused: the rule allows no departure",
+                "expired: its last day is past",
+                "matches no finding of this audit",
+            ],
             _garden.Departures.Select(departure => departure.State));
 
     [Fact]
@@ -91,7 +105,9 @@ public class ReportModelTests
     {
         var assumption = Assert.Single(_garden.Assumptions);
 
-        Assert.Equal(("A/1/leg 1", "length", "12 m ± 2 m, assumed", "garden/circuits.yaml:5:34"), (assumption.Subject, assumption.Input, assumption.Text, assumption.Location));
+        Assert.Equal(
+            ("A/1/leg 1", "length", "12 m ± 2 m, assumed", "garden/circuits.yaml:5:34"),
+            (assumption.Subject, assumption.Input, assumption.Text, assumption.Location));
         Assert.Equal(["run-sensible:A/1"], assumption.Findings);
     }
 
@@ -102,13 +118,13 @@ public class ReportModelTests
     [Fact]
     public void Figures_from_memory_list_the_findings_that_rest_on_them()
     {
-        Assert.Equal(["Shed table 1", "param.warm_air"], _garden.MemoryFigures.Select(figure => figure.Name));
+        Assert.Equal(["Shed table 1", "param.cold_air"], _garden.MemoryFigures.Select(figure => figure.Name));
         Assert.Equal(["load-within-capacity:A/2", "load-within-capacity:A/3"], _garden.MemoryFigures[0].Findings);
     }
 
     [Fact]
     public void Rules_that_applied_nowhere_are_listed() =>
-        Assert.Equal(["air-not-too-warm", "bonding-enough"], Sheds.Model("hostile").NotApplied.Select(rule => rule.Id));
+        Assert.Equal(["air-not-too-cold", "bonding-enough"], Sheds.Model("hostile").NotApplied.Select(rule => rule.Id));
 
     [Fact]
     public void Requirements_that_no_rule_decides_are_listed_by_part_with_judgement_apart()

@@ -1,3 +1,4 @@
+using System.Text;
 using Auditor.Reports.Files;
 using Auditor.Reports.Json;
 using Auditor.Reports.Templates;
@@ -23,7 +24,8 @@ public class ReportTests
 
     [Fact]
     public void The_findings_file_is_as_approved() =>
-        Golden.Match(System.Text.Encoding.UTF8.GetString(FindingsJson.Write(Sheds.Audit("garden"), Sheds.Register, new FindingsOptions())), $"{Designs}/garden", "json");
+        Golden.Match(
+            Encoding.UTF8.GetString(FindingsJson.Write(Sheds.Audit("garden"), Sheds.Register, new FindingsOptions())), $"{Designs}/garden", "json");
 
     [Fact]
     public void No_golden_file_is_left_over() => Assert.Empty(Golden.OrphansBelow("tests/Auditor.Reports.Tests/data"));

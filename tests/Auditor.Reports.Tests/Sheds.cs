@@ -8,6 +8,7 @@ using Auditor.Reports.Files;
 using Auditor.Reports.Model;
 using Auditor.Reports.Schedules;
 using Auditor.Reports.Templates;
+using Auditor.Testing;
 
 namespace Auditor.Reports.Tests;
 
@@ -17,14 +18,20 @@ internal static class Sheds
     /// <summary>The day on which the tests judge departures.</summary>
     public static readonly DateOnly Day = new(2026, 9, 1);
 
-    private static readonly RuleHome Home = new(Data("rules"), "rules");
-
     public static RuleSet Rules { get; } = LoadRules();
 
-    public static Register Register { get; } = Faultless(problems => Register.Load(Home, problems));
+    public static Register Register { get; } = new(
+        [
+            new RegisterRow("shed-capacity", "shed", "Conductors carry their load.", "quantitative"),
+            new RegisterRow("shed-device", "shed", "Devices are of allowed kinds.", "categorical"),
+            new RegisterRow("shed-terminal", "shed", "There is a main earthing terminal.", "categorical"),
+            new RegisterRow("shed-roof", "shed", "The roof keeps | rain off the board.", "quantitative"),
+            new RegisterRow("shed-neat", "shed", "The work is neat.", "judgement"),
+            new RegisterRow("tools-sharp", "tools", "Tools are sharp.", "judgement"),
+        ]);
 
     /// <summary>Full path of a file of the test data.</summary>
-    public static string Data(string path) => Path.Combine(AppContext.BaseDirectory, "data", path);
+    public static string Data(string path) => Repository.PathOf("tests/Auditor.Reports.Tests/data/" + path);
 
     /// <summary>Audits a design.</summary>
     /// <param name="design">Its name.</param>
@@ -49,9 +56,10 @@ internal static class Sheds
 
     /// <summary>A report from a template that has no fault.</summary>
     public static string Render(string design, ReportFormat format, TemplateFile template) =>
-        Faultless(problems => System.Text.Encoding.UTF8.GetString(TemplateReport.Render(Model(design), format, template, problems)!));
+        System.Text.Encoding.UTF8.GetString(Faultless(problems => TemplateReport.Render(Model(design), format, template, problems)!));
 
-    private static RuleSet LoadRules() => Faultless(problems => RuleSetLoader.Load(Home, "shed", Data("designs"), null, problems)!);
+    private static RuleSet LoadRules() => Faultless(problems =>
+        RuleSetLoader.Load(new RuleHome(Repository.PathOf("rules"), "rules"), "rules/sets/shed.yaml", Data(""), null, problems)!);
 
     private static T Faultless<T>(Func<Problems, T> make)
     {

@@ -10,7 +10,8 @@ public class TemplateFaultTests
     private static readonly TemplateLimits Narrow = TemplateLimits.Default with { LoopSteps = 1_000, Evaluations = 20_000, Characters = 20_000 };
 
     public static TheoryData<string> Faults =>
-        [.. Directory.EnumerateFiles(Sheds.Data("faults"), "*.scriban-md").Select(path => Path.GetFileNameWithoutExtension(path)).Order(StringComparer.Ordinal)];
+        [.. Directory.EnumerateFiles(Sheds.Data("faults"), "*.scriban-md").Select(path => Path.GetFileNameWithoutExtension(path))
+            .Order(StringComparer.Ordinal)];
 
     [Theory]
     [MemberData(nameof(Faults))]
@@ -18,7 +19,8 @@ public class TemplateFaultTests
     {
         var problems = new Problems();
 
-        var report = TemplateReport.Render(Sheds.Model("garden"), ReportFormat.Markdown, Sheds.Template($"faults/{name}.scriban-md"), problems, Narrow);
+        var template = Sheds.Template($"faults/{name}.scriban-md");
+        var report = TemplateReport.Render(Sheds.Model("garden"), ReportFormat.Markdown, template, problems, Narrow);
 
         Assert.Null(report);
         Golden.Match(ProblemText.Render(problems.All), $"tests/Auditor.Reports.Tests/data/faults/{name}");
@@ -34,8 +36,8 @@ public class TemplateFaultTests
         using var folder = new TemporaryFolder();
         var problems = new Problems();
 
-        var report = TemplateReport.Render(
-            Sheds.Model("garden"), ReportFormat.Text, new TemplateFile(folder.Write("t.scriban-txt", "{{ report.caution }}" + hostile), "t.scriban-txt"), problems);
+        var template = new TemplateFile(folder.Write("t.scriban-txt", "{{ report.caution }}" + hostile), "t.scriban-txt");
+        var report = TemplateReport.Render(Sheds.Model("garden"), ReportFormat.Text, template, problems);
 
         Assert.Null(report);
         Assert.Contains(problems.All, problem => problem.Code is "template-limit" or "template-fault");

@@ -44,7 +44,10 @@ public static class ReportFile
     }
 
     /// <summary>The reason without the paths of the machine that the system's message ends with.</summary>
-    private static string Reason(Exception fault) => fault is UnauthorizedAccessException ? "permission is denied" : fault.Message.Split(" : '", 2)[0].TrimEnd('.').ToLowerInvariant();
+    private static string Reason(Exception fault) =>
+        fault is UnauthorizedAccessException
+            ? "permission is denied"
+            : fault.Message.Split([" : '", " '"], 2, StringSplitOptions.None)[0].ToLowerInvariant();
 
     private static void Remove(string path)
     {

@@ -67,7 +67,8 @@ internal static class EvidenceJson
                 output.Text("formula", derivation.Formula);
                 output.Text("withNumbers", derivation.WithNumbers);
                 FindingJson.Clause(output, definition.Clause);
-                output.Array("from", Readings.Of(definition.Formula, subject), antecedent => output.Object(null, () => From(output, antecedent, rules)));
+                var readings = Readings.Of(definition.Formula, subject);
+                output.Array("from", readings, antecedent => output.Object(null, () => From(output, antecedent, rules)));
                 FindingJson.Gaps(output, value.IsMissing ? value.Absences : null, subject.Key);
                 output.Location(definition.Formula.Source.Span);
             });

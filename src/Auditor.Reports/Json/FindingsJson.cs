@@ -12,7 +12,8 @@ public static class FindingsJson
     /// <param name="register">The register of requirements.</param>
     /// <param name="options">What to add.</param>
     /// <returns>Indented JSON in UTF-8 without a byte order mark; lines end with LF.</returns>
-    public static byte[] Write(AuditResult result, Register register, FindingsOptions options) => Invariantly.Make(() => Whole(result, register, options));
+    public static byte[] Write(AuditResult result, Register register, FindingsOptions options) =>
+        Invariantly.Make(() => Whole(result, register, options));
 
     private static byte[] Whole(AuditResult result, Register register, FindingsOptions options)
     {

@@ -36,8 +36,8 @@ internal sealed class Readings : ITrace
         foreach (var cell in cells.Where(cell => !cell.IsEmpty))
         {
             var column = cell.Column.Length == 0 ? "" : $", column {cell.Column}";
-            var held = cell.Word is { } word ? Value.Of(word) : Value.Of(cell.Number);
-            Add(new Antecedent("table", null, $"{cell.Table.Title}, row {cell.Row}{column}", held, cell.Word is null ? lookup.Unit ?? Unit.One : null) { Cell = cell });
+            var (held, heldIn) = cell.Word is { } word ? (Value.Of(word), null) : (Value.Of(cell.Number), lookup.Unit ?? Unit.One);
+            Add(new Antecedent("table", null, $"{cell.Table.Title}, row {cell.Row}{column}", held, heldIn) { Cell = cell });
         }
     }
 

@@ -15,6 +15,8 @@ internal sealed class FindingReader(
     public ReportFinding Read(Finding finding)
     {
         var rule = finding.Rule;
+        var relative = finding.Judgement.Margin?.Relative is { } share ? ValueText.ShowMargin(share) : "";
+        var absolute = finding.MarginShown ?? "";
         return new ReportFinding
         {
             Key = finding.Key,
@@ -29,8 +31,9 @@ internal sealed class FindingReader(
             ClauseNote = rule.Clause.Note,
             Value = finding.ValueShown,
             Limit = finding.LimitShown,
-            RelativeMargin = finding.Judgement.Margin?.Relative is { } relative ? ValueText.ShowMargin(relative) : "",
-            AbsoluteMargin = finding.MarginShown ?? "",
+            Margin = relative.Length == 0 ? absolute : $"{relative} ({absolute})",
+            RelativeMargin = relative,
+            AbsoluteMargin = absolute,
             Sentence = finding.Message,
             Why = rule.Why,
             PutRightBy = rule.PutRightBy,

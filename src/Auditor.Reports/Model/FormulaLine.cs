@@ -2,5 +2,7 @@ namespace Auditor.Reports.Model;
 
 /// <summary>One formula of a finding, on one line.</summary>
 /// <param name="Role">What it gives: the value, the limit, or whether the statement holds.</param>
-/// <param name="Text">Symbol, formula, the formula with numbers put in, and result, joined by "="; whatever would only repeat its neighbour is left out.</param>
+/// <param name="Text">
+/// Symbol, formula, the formula with numbers put in, and result, joined by "="; whatever would only repeat its neighbour is left out.
+/// </param>
 public sealed record FormulaLine(string Role, string Text);

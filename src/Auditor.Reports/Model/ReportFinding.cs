@@ -39,7 +39,10 @@ public sealed record ReportFinding
     /// <summary>The limit with its sense and unit.</summary>
     public required string Limit { get; init; }
 
-    /// <summary>Distance to the limit as a share of it, with sign.</summary>
+    /// <summary>Distance to the limit: as a share of it where that means something, and in the unit.</summary>
+    public required string Margin { get; init; }
+
+    /// <summary>Distance to the limit as a share of it, with sign; empty where such a share means nothing, as with temperatures.</summary>
     public required string RelativeMargin { get; init; }
 
     /// <summary>Distance to the limit in the unit of the value.</summary>

@@ -14,5 +14,7 @@ internal static class AuditBasis
 
     /// <summary>Stage of the job; null where the design states none.</summary>
     public static string? StageOf(Design design) =>
-        design.Installation.Shape.Input("basis.stage") is { } slot && design.Installation.Input(slot.Index) is { Kind: ValueKind.Text } value ? value.Text : null;
+        design.Installation.Shape.Input("basis.stage") is { } slot && design.Installation.Input(slot.Index) is { Kind: ValueKind.Text } value
+            ? value.Text
+            : null;
 }

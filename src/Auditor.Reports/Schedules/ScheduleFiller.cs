@@ -21,12 +21,14 @@ internal sealed class ScheduleFiller(AuditResult result, Schedule schedule)
     private ScheduleRow Row(DesignSubject circuit)
     {
         var findings = _findings[circuit].ToArray();
-        var governing = findings.Where(finding => finding.Judgement.Margin?.Relative is not null).MinBy(finding => finding.Judgement.Margin!.Relative);
+        var governing = findings.Where(finding => Margin(finding) is not null).MinBy(Margin);
         return new ScheduleRow(
             circuit.Key, Reading.SubjectText.OwnName(circuit) ?? "", [.. schedule.Columns.Select(column => Cell(circuit, column))],
             findings.Length == 0 ? "" : Gravest(findings).Word(),
-            governing is null ? "" : ValueText.ShowMargin(governing.Judgement.Margin!.Relative!.Value), governing?.Rule.Id ?? "");
+            governing is null ? "" : ValueText.ShowMargin(Margin(governing)!.Value), governing?.Rule.Id ?? "");
     }
+
+    private static double? Margin(Finding finding) => finding.Judgement.Margin?.Relative;
 
     private static Verdict Gravest(Finding[] findings)
     {

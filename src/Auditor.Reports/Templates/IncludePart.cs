@@ -23,6 +23,7 @@ internal sealed class IncludePart : IScriptCustomFunction
     public object Invoke(TemplateContext context, ScriptNode? callerContext, ScriptArray arguments, ScriptBlockStatement? blockStatement) =>
         new Markup(_include.Invoke(context, callerContext, arguments, blockStatement)?.ToString() ?? "");
 
-    public ValueTask<object?> InvokeAsync(TemplateContext context, ScriptNode? callerContext, ScriptArray arguments, ScriptBlockStatement? blockStatement) =>
+    public ValueTask<object?> InvokeAsync(
+        TemplateContext context, ScriptNode? callerContext, ScriptArray arguments, ScriptBlockStatement? blockStatement) =>
         ValueTask.FromResult<object?>(Invoke(context, callerContext, arguments, blockStatement));
 }

@@ -13,6 +13,9 @@ namespace Auditor.Reports.Templates;
 /// <summary>What a template can reach while it is written, and the one gate through which everything that it inserts goes.</summary>
 internal sealed class ReportContext : TemplateContext
 {
+    /// <summary>Marks of lists and quotations before a text are looked for so far back.</summary>
+    private const int LongestLead = 64;
+
     private readonly Ink _ink;
     private readonly TemplateFolder _folder;
     private long _evaluations;
@@ -100,7 +103,8 @@ internal sealed class ReportContext : TemplateContext
     private bool StartsBlock()
     {
         var written = Output is StringBuilderOutput output ? output.Builder : new StringBuilder();
-        for (var i = written.Length - 1; i >= 0 && written[i] != '\n'; i--)
+        var farthest = Math.Max(0, written.Length - LongestLead);
+        for (var i = written.Length - 1; i >= farthest && written[i] != '\n'; i--)
         {
             if (!(written[i] is ' ' or '\t' or '>' or '*' or '+' or '-' or '.' or ')' || char.IsAsciiDigit(written[i])))
             {

@@ -9,6 +9,6 @@ namespace Auditor.Reports.Templates;
 /// <param name="Bytes">Bytes of a template file.</param>
 public sealed record TemplateLimits(int LoopSteps, long Evaluations, int Characters, int IncludeDepth, int Nesting, long Bytes)
 {
-    /// <summary>A million steps, fifty million evaluations, 64 Mi characters, 8 includes, 64 levels, 1 MiB.</summary>
-    public static TemplateLimits Default { get; } = new(1_000_000, 50_000_000, 64 * 1024 * 1024, 8, 64, 1024 * 1024);
+    /// <summary>Five million steps, a hundred million evaluations, 64 Mi characters, 8 includes, 64 levels, 256 KiB.</summary>
+    public static TemplateLimits Default { get; } = new(5_000_000, 100_000_000, 64 * 1024 * 1024, 8, 64, 256 * 1024);
 }

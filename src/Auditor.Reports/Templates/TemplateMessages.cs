@@ -20,10 +20,12 @@ internal static class TemplateMessages
         (nearest is null ? "" : $"did you mean `{nearest}`? ") + (known.Count == 0 ? "it has no members" : "there are: " + string.Join(", ", known)));
 
     public static Problem UnknownVariable(SourceSpan span, string name, string? nearest) => Problem.Error(
-        "template-unknown-name", $"`{name}` is not defined", span, nearest is null ? "everything to show is under `report`" : $"did you mean `{nearest}`?");
+        "template-unknown-name", $"`{name}` is not defined", span,
+        nearest is null ? "everything to show is under `report`" : $"did you mean `{nearest}`?");
 
     public static Problem OutsideFolder(SourceSpan span, string name) => Problem.Error(
-        "template-outside-folder", $"{ProblemText.Quote(name)} does not lie in the folder of the template", span, "include files of that folder by their relative path");
+        "template-outside-folder", $"{ProblemText.Quote(name)} does not lie in the folder of the template", span,
+        "include files of that folder by their relative path");
 
     public static Problem NotIncluded(SourceSpan span, string name) => Problem.Error(
         "template-not-included", $"{ProblemText.Quote(name)} cannot be included", span, "see the problem in that file");
@@ -32,7 +34,8 @@ internal static class TemplateMessages
         "template-refused", $"`{word}` is not available in report templates", span, "put the part into a file of its own and `include` it");
 
     public static Problem WithoutCaution(SourceSpan span) => Problem.Error(
-        "template-without-caution", "this template leaves out the caution", span, "every report shows it: write {{ report.caution }} where it is read");
+        "template-without-caution", "this template leaves out the caution", span,
+        "every report shows it: write {{ report.caution }} where it is read");
 
     private static Problem Limit(SourceSpan span, string message) => Problem.Error(
         "template-limit", message, span, "a template has bounds, so that none can hold up the program; show less, or loop over less");

@@ -9,7 +9,8 @@ namespace Auditor.Reports.Templates;
 /// <summary>
 /// Writes a report from a template in the Scriban language. A template reaches the model as <c>report</c>, the functions
 /// <c>array.*</c> and <c>string.*</c>, <c>code</c> (a text set as code), <c>prose</c> (a sentence whose backquotes set off code) and
-/// <c>include</c> (a file in the folder of the template), and nothing else: no file, no environment, no clock. Whatever it inserts is made inert; only its own fixed text is markup.
+/// <c>include</c> (a file in the folder of the template), and nothing else: no file, no environment, no clock.
+/// Whatever it inserts is made inert; only its own fixed text is markup.
 /// </summary>
 public static class TemplateReport
 {

@@ -34,7 +34,7 @@ internal static class StrongComponents
     }
 
     /// <summary>The nodes in the order in which a walk into the depth leaves them.</summary>
-    private static IEnumerable<int> Finished(IReadOnlyList<IReadOnlyList<int>> next)
+    private static List<int> Finished(IReadOnlyList<IReadOnlyList<int>> next)
     {
         var order = new List<int>(next.Count);
         var seen = new bool[next.Count];

@@ -1,9 +1,12 @@
 using Auditor.Documents;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Registers;
+using Auditor.Reports.Csv;
 using Auditor.Reports.Files;
 using Auditor.Reports.Json;
+using Auditor.Reports.JUnit;
 using Auditor.Reports.Model;
+using Auditor.Reports.Sarif;
 using Auditor.Reports.Schedules;
 using Auditor.Reports.Templates;
 
@@ -39,11 +42,32 @@ internal sealed record ReportTarget(string Path, ReportFormat Format)
     /// <summary>Writes the report of an audit; false with problems added when it cannot be written.</summary>
     public bool Write(AuditResult result, Register register, string? template, FindingsOptions options, Problems problems)
     {
-        var bytes = Format.TemplateName is null
-            ? FindingsJson.Write(result, register, options)
-            : Render(result, register, template is null ? TemplateFile.Shipped(Format) : TemplateFile.At(template), problems);
+        var bytes = Bytes(result, register, template, options, problems);
         var path = Path.Replace(Name, DesignPaths.BaseName(result.Design.File.Path), StringComparison.Ordinal);
         return bytes is not null && ReportFile.Write(path, bytes, problems);
+    }
+
+    private byte[]? Bytes(AuditResult result, Register register, string? template, FindingsOptions options, Problems problems)
+    {
+        if (Format == ReportFormat.Json)
+        {
+            return FindingsJson.Write(result, register, options);
+        }
+
+        if (Format == ReportFormat.Sarif)
+        {
+            return SarifReport.Write(result);
+        }
+
+        if (Format == ReportFormat.JUnit)
+        {
+            return JUnitReport.Write(result);
+        }
+
+        var own = template is null ? null : TemplateFile.At(template);
+        return Format == ReportFormat.Csv
+            ? Schedule.For(own, result.Rules, problems) is { } schedule ? CsvSchedule.Write(result, schedule) : null
+            : Render(result, register, own ?? TemplateFile.Shipped(Format), problems);
     }
 
     private byte[]? Render(AuditResult result, Register register, TemplateFile template, Problems problems)

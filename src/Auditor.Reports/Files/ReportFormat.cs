@@ -22,8 +22,17 @@ public sealed class ReportFormat
     /// <summary>Findings for programs.</summary>
     public static ReportFormat Json { get; } = new(".json", null, null);
 
+    /// <summary>Results for code review: SARIF 2.1.0.</summary>
+    public static ReportFormat Sarif { get; } = new(".sarif", null, null);
+
+    /// <summary>Test results: JUnit XML.</summary>
+    public static ReportFormat JUnit { get; } = new(".xml", null, null);
+
+    /// <summary>The schedule of circuits for spreadsheets.</summary>
+    public static ReportFormat Csv { get; } = new(".csv", null, null);
+
     /// <summary>All formats.</summary>
-    public static IReadOnlyList<ReportFormat> All { get; } = [Text, Markdown, Json];
+    public static IReadOnlyList<ReportFormat> All { get; } = [Text, Markdown, Json, Sarif, JUnit, Csv];
 
     /// <summary>The ending, with its dot.</summary>
     public string Ending { get; }

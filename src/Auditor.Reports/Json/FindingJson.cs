@@ -60,7 +60,7 @@ internal static class FindingJson
         output.Text("subject", finding.Subject.Key);
         output.Text("verdict", finding.Verdict.Word());
         output.Flag("onAssumption", finding.OnAssumption);
-        output.Text("provision", finding.Rule.Provision == Provision.Requirement ? "requirement" : "recommendation");
+        output.Text("provision", finding.Rule.Provision.Word());
     }
 
     private static void Figures(JsonOutput output, Finding finding)

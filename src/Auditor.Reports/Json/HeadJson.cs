@@ -17,8 +17,8 @@ internal static class HeadJson
         output.Whole("format", Format);
         output.Object("tool", () =>
         {
-            output.Text("name", "auditor");
-            output.Text("version", typeof(HeadJson).Assembly.GetName().Version!.ToString(3));
+            output.Text("name", ThisTool.Name);
+            output.Text("version", ThisTool.Version);
         });
         output.Array("inputs", output.Places.Inputs, file => output.Object(null, () =>
         {

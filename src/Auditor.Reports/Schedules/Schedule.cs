@@ -17,14 +17,14 @@ public sealed record Schedule(IReadOnlyList<ScheduleColumn> Columns)
     private static readonly Lazy<Schema> Validation = new(ReadSchema);
 
     /// <summary>Reads the schedule that belongs to a template: the one in its folder, else the shipped one.</summary>
-    /// <param name="template">The template.</param>
+    /// <param name="template">The template; null for a report that has none, and so the shipped schedule.</param>
     /// <param name="rules">The rule set that has to fill the columns.</param>
     /// <param name="problems">Receives what is wrong; a name that the rule set does not know is a warning, and its column is left out.</param>
     /// <returns>The schedule; null when the file cannot be used.</returns>
-    public static Schedule? For(TemplateFile template, RuleSet rules, Problems problems)
+    public static Schedule? For(TemplateFile? template, RuleSet rules, Problems problems)
     {
-        var file = template.Beside(FileName);
-        return Read(File.Exists(file.FullPath) ? file : TemplateFile.ShippedAs(FileName), rules, problems);
+        var file = template?.Beside(FileName);
+        return Read(file is not null && File.Exists(file.FullPath) ? file : TemplateFile.ShippedAs(FileName), rules, problems);
     }
 
     private static Schedule? Read(TemplateFile file, RuleSet rules, Problems problems)

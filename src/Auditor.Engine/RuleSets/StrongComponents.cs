@@ -14,7 +14,7 @@ internal static class StrongComponents
         Array.Fill(component, -1);
         var previous = Reversed(next);
         var found = 0;
-        foreach (var root in Finished(next).Reverse().Where(root => component[root] < 0))
+        foreach (var root in Finished(next).AsEnumerable().Reverse().Where(root => component[root] < 0))
         {
             var open = new Stack<int>([root]);
             component[root] = found;

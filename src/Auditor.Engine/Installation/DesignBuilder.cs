@@ -41,9 +41,15 @@ public sealed class DesignBuilder
         var ids = new Dictionary<string, SourceSpan>();
         foreach (var node in installation.Node.Mappings("boards"))
         {
-            if (Id(node, "id", "boards", ids) is { } id)
+            if (node.Scalar("id") is not { } id)
             {
-                _boards.Add(MakeBoard(node, id));
+                continue;
+            }
+
+            var board = MakeBoard(node, id.Text);
+            if (IsFirst(id, "boards", ids))
+            {
+                _boards.Add(board);
             }
         }
 
@@ -61,9 +67,10 @@ public sealed class DesignBuilder
         var ids = new Dictionary<string, SourceSpan>();
         foreach (var circuitNode in node.Mappings("circuits"))
         {
-            if (Id(circuitNode, "id", $"circuits on board `{id}` called", ids) is { } circuitId)
+            if (circuitNode.Scalar("id") is { } circuitId)
             {
-                circuits.Add(MakeCircuit(circuitNode, board, $"{id}/{circuitId}"));
+                IsFirst(circuitId, $"circuits on board `{id}` called", ids);
+                circuits.Add(MakeCircuit(circuitNode, board, $"{id}/{circuitId.Text}"));
             }
         }
 
@@ -99,9 +106,10 @@ public sealed class DesignBuilder
         var names = new Dictionary<string, SourceSpan>();
         foreach (var node in installation.Node.Mapping("earthing")?.Mappings("bonding") ?? [])
         {
-            if (Id(node, "to", "bonding conductors to", names) is { } name)
+            if (node.Scalar("to") is { } name)
             {
-                var bonding = Subject(_shapes.Bonding, "bonding/" + name, node);
+                IsFirst(name, "bonding conductors to", names);
+                var bonding = Subject(_shapes.Bonding, "bonding/" + name.Text, node);
                 bonding.Parent = installation;
                 bondings.Add(bonding);
             }
@@ -117,19 +125,15 @@ public sealed class DesignBuilder
         return subject;
     }
 
-    private string? Id(MappingNode node, string key, string what, Dictionary<string, SourceSpan> seen)
+    /// <summary>Whether an id is new; a problem otherwise. What bears it is made all the same, so that nothing else is told to be missing.</summary>
+    private bool IsFirst(ScalarNode id, string what, Dictionary<string, SourceSpan> seen)
     {
-        if (node.Scalar(key) is not { } scalar)
+        var isFirst = seen.TryAdd(id.Text, id.Span);
+        if (!isFirst)
         {
-            return null;
+            _problems.Add(DesignMessages.SecondId(id.Span, what, id.Text, seen[id.Text]));
         }
 
-        if (seen.TryAdd(scalar.Text, scalar.Span))
-        {
-            return scalar.Text;
-        }
-
-        _problems.Add(DesignMessages.SecondId(scalar.Span, what, scalar.Text, seen[scalar.Text]));
-        return null;
+        return isFirst;
     }
 }

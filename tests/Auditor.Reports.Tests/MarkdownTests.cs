@@ -60,6 +60,10 @@ public class MarkdownTests
         Assert.Equal("&lt;b>A\\|B\n", Write("{{ '<b>' + (report.project.title | string.upcase) }}", "a|b"));
 
     [Fact]
+    public void Nothing_is_nothing_as_code_and_as_prose() =>
+        Assert.Equal("<code></code>.\n", Write("{{ code report.action[0].departure }}.{{ prose report.action[0].departure }}", ""));
+
+    [Fact]
     public void An_included_part_is_made_inert_once()
     {
         using var folder = new TemporaryFolder();

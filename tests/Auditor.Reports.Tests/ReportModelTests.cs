@@ -33,7 +33,7 @@ public class ReportModelTests
         Assert.Equal(("-5 °C", "at least 0 °C", "-5 K"), (cold.Value, cold.Limit, cold.Margin));
         Assert.Equal("A/2/leg 2 Pump", cold.SubjectLabel);
         Assert.Equal("garden/circuits.yaml:13:58", cold.Location);
-        Assert.Equal(["from memory: param.cold_air: 0 °C"], cold.RestsOn);
+        Assert.Equal(["a figure from memory, param.cold_air: 0 °C"], cold.RestsOn);
     }
 
     [Fact]

@@ -49,9 +49,9 @@ internal sealed class FindingReader(
     {
         if (foundation.Kind == FoundationKind.AssumedInput)
         {
-            return $"assumed: {foundation.Subject} {foundation.Name}: {foundation.Text} ({places.Text(foundation.Span!.Value)})";
+            return $"an assumed input, {foundation.Subject} {foundation.Name}: {foundation.Text} ({places.Text(foundation.Span!.Value)})";
         }
 
-        return foundation.Text.Length == 0 ? $"from memory: {foundation.Name}" : $"from memory: {foundation.Name}: {foundation.Text}";
+        return "a figure from memory, " + (foundation.Text.Length == 0 ? foundation.Name : $"{foundation.Name}: {foundation.Text}");
     }
 }

@@ -82,8 +82,8 @@ internal sealed class ReportContext : TemplateContext
         functions.SetValue("array", new ArrayFunctions(), readOnly: true);
         functions.SetValue("string", new StringFunctions(), readOnly: true);
         functions.SetValue("include", new IncludePart(), readOnly: true);
-        functions.SetValue("prose", DynamicCustomFunction.Create((string text) => new Markup(ink.Prose(text))), readOnly: true);
-        functions.SetValue("code", DynamicCustomFunction.Create((string text) => new Markup(ink.Code(text))), readOnly: true);
+        functions.SetValue("prose", DynamicCustomFunction.Create((string? text) => new Markup(ink.Prose(text ?? ""))), readOnly: true);
+        functions.SetValue("code", DynamicCustomFunction.Create((string? text) => new Markup(ink.Code(text ?? ""))), readOnly: true);
         return functions;
     }
 

@@ -53,7 +53,7 @@ public class SarifPlaceTests
         var file = new SarifFile(Sheds.Audit("garden"));
         var subjects = file.Run["logicalLocations"]!.AsArray();
         var names = new List<string>();
-        var place = file.Result("air-not-too-warm:A/2/leg 2")["locations"]![0]!["logicalLocations"]![0]!;
+        var place = file.Result("air-not-too-cold:A/2/leg 2")["locations"]![0]!["logicalLocations"]![0]!;
         for (int? at = Number(place["index"]); at is { } index; at = subjects[index]!["parentIndex"]?.GetValue<int>())
         {
             names.Add(Text(subjects[index]!["fullyQualifiedName"]));

@@ -10,7 +10,7 @@ public class SarifResultTests
     [Fact]
     public void What_conforms_is_no_result() =>
         Assert.Equal(
-            ["bonding-enough:bonding/water", "load-within-capacity:A/2", "run-sensible:A/2", "air-not-too-warm:A/2/leg 2", "device-known:A/3", "load-within-capacity:A/4", "run-sensible:A/4"],
+            ["bonding-enough:bonding/water", "load-within-capacity:A/2", "run-sensible:A/2", "air-not-too-cold:A/2/leg 2", "device-known:A/3", "load-within-capacity:A/4", "run-sensible:A/4"],
             Garden.Results.Select(SarifFile.Fingerprint));
 
     [Theory]

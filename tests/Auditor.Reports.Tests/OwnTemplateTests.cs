@@ -1,6 +1,7 @@
 using Auditor.Documents;
 using Auditor.Reports.Files;
 using Auditor.Reports.Schedules;
+using Auditor.Reports.Templates;
 
 namespace Auditor.Reports.Tests;
 
@@ -31,6 +32,18 @@ public class OwnTemplateTests
 
         Assert.Contains("Device", schedule!.Columns.Select(column => column.Heading));
         Assert.All(problems.All, problem => Assert.Equal("templates/schedule.yaml", problem.Span!.Value.Source.Path));
+    }
+
+    [Fact]
+    public void The_shipped_rules_know_every_column_of_the_shipped_schedule()
+    {
+        var problems = new Problems();
+
+        var schedule = Schedule.For(TemplateFile.Shipped(ReportFormat.Markdown), ExampleAudit.Rules, problems);
+
+        Assert.Empty(problems.All);
+        Assert.Equal(
+            ["Device", "Conductors", "Length", "Ib", "In", "Iz", "Zs", "Zs at most", "Voltage drop"], schedule!.Columns.Select(column => column.Heading));
     }
 
     [Theory]

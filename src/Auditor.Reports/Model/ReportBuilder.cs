@@ -11,8 +11,6 @@ namespace Auditor.Reports.Model;
 /// <summary>Builds the model of an audit.</summary>
 internal sealed class ReportBuilder
 {
-    private static readonly Verdict[] GravestFirst = [Verdict.Nonconforming, Verdict.Undetermined, Verdict.Departed, Verdict.Conforms];
-
     private readonly AuditResult _result;
     private readonly Register _register;
     private readonly Schedule _schedule;
@@ -44,9 +42,9 @@ internal sealed class ReportBuilder
             Basis = Basis(),
             RuleSet = RuleSet(),
             Inputs = _places.Inputs,
-            Counts = [.. GravestFirst.Select(Count)],
+            Counts = [.. VerdictOrder.GravestFirst.Select(Count)],
             Action = [.. findings.Where(pair => pair.Verdict == Verdict.Nonconforming && pair.Shown.IsRequirement).Select(pair => pair.Shown)],
-            Groups = [.. GravestFirst
+            Groups = [.. VerdictOrder.GravestFirst
                 .Select(verdict => new FindingGroup(verdict.Word(), [.. findings.Where(pair => pair.Verdict == verdict).Select(pair => pair.Shown)]))
                 .Where(group => group.Findings.Count > 0)],
             Schedule = new ScheduleFiller(_result, _schedule).Fill(),

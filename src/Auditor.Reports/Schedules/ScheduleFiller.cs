@@ -2,6 +2,7 @@ using Auditor.Engine.Findings;
 using Auditor.Engine.Installation;
 using Auditor.Formulas.Values;
 using Auditor.Reports.Model;
+using Auditor.Reports.Reading;
 
 namespace Auditor.Reports.Schedules;
 
@@ -23,18 +24,15 @@ internal sealed class ScheduleFiller(AuditResult result, Schedule schedule)
         var findings = _findings[circuit].ToArray();
         var governing = findings.Where(finding => Margin(finding) is not null).MinBy(Margin);
         return new ScheduleRow(
-            circuit.Key, Reading.SubjectText.OwnName(circuit) ?? "", [.. schedule.Columns.Select(column => Cell(circuit, column))],
+            circuit.Key, SubjectText.OwnName(circuit) ?? "", [.. schedule.Columns.Select(column => Cell(circuit, column))],
             findings.Length == 0 ? "" : Gravest(findings).Word(),
             governing is null ? "" : ValueText.ShowMargin(Margin(governing)!.Value), governing?.Rule.Id ?? "");
     }
 
     private static double? Margin(Finding finding) => finding.Judgement.Margin?.Relative;
 
-    private static Verdict Gravest(Finding[] findings)
-    {
-        Verdict[] gravestFirst = [Verdict.Nonconforming, Verdict.Undetermined, Verdict.Departed, Verdict.Conforms];
-        return gravestFirst.First(verdict => Array.Exists(findings, finding => finding.Verdict == verdict));
-    }
+    private static Verdict Gravest(Finding[] findings) =>
+        VerdictOrder.GravestFirst.First(verdict => Array.Exists(findings, finding => finding.Verdict == verdict));
 
     /// <summary>The legs of a run that say the same are said once; differing ones stand one after the other.</summary>
     private static string Cell(DesignSubject circuit, ScheduleColumn column) =>

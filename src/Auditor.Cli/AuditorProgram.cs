@@ -29,8 +29,9 @@ internal static class AuditorProgram
             noColour,
             verbose,
         };
+        HelpWithExamples.AddTo(root);
         var parsed = root.Parse(args);
-        if (parsed.Errors.Count > 0)
+        if (parsed.Errors.Count > 0 && parsed.Action is not HelpWithExamples)
         {
             foreach (var fault in parsed.Errors)
             {

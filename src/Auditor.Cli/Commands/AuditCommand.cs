@@ -26,15 +26,12 @@ internal static class AuditCommand
             DefaultValueFactory = _ => FailOn.Undetermined,
         };
         var quiet = new Option<bool>("--quiet", "-q") { Description = "Print no summary." };
-        var command = new Command("audit", """
-            Audit design files against a rule set.
-
-            Examples:
-              auditor audit examples/bakery/bakery.design.yaml
-              auditor audit designs --fail-on nonconforming
-              auditor audit site.design.yaml --write site.md --write site.json
-              auditor audit designs --write '{name}.report.md' --as-of 2026-12-01
-            """) { designs, rules, write, template, evidence, asOf, failOn, quiet };
+        var command = new ExampleCommand(
+            "audit", "Audit design files against a rule set.",
+            "auditor audit examples/bakery/bakery.design.yaml",
+            "auditor audit designs --fail-on nonconforming",
+            "auditor audit site.design.yaml --write site.md --write site.json",
+            "auditor audit designs --write '{name}.report.md' --as-of 2026-12-01") { designs, rules, write, template, evidence, asOf, failOn, quiet };
         command.SetAction(parsed => new AuditRun(
             terminal, parsed.GetValue(rules), parsed.GetValue(write) ?? [], parsed.GetValue(template), new FindingsOptions(parsed.GetValue(evidence)),
             parsed.GetValue(failOn), parsed.GetValue(quiet)).Execute(parsed.GetValue(designs)!, parsed.GetValue(asOf)));

@@ -19,14 +19,11 @@ internal static class EvidenceCommand
         };
         var rules = RuleSetOption.Make();
         var asOf = AsOfOption.Make();
-        var command = new Command("evidence", """
-            Show the derivation of a finding or a quantity, down to lines of the design and cells of tables.
-
-            Examples:
-              auditor evidence site.design.yaml disconnection-tn:DB/3
-              auditor evidence site.design.yaml DB/3 Zs
-              auditor evidence site.design.yaml - U0
-            """) { design, key, rules, asOf };
+        var command = new ExampleCommand(
+            "evidence", "Show the derivation of a finding or a quantity, down to lines of the design and cells of tables.",
+            "auditor evidence site.design.yaml disconnection-tn:DB/3",
+            "auditor evidence site.design.yaml DB/3 Zs",
+            "auditor evidence site.design.yaml - U0") { design, key, rules, asOf };
         command.SetAction(parsed => Run(
             terminal, parsed.GetValue(design)!, string.Join(' ', parsed.GetValue(key)!), parsed.GetValue(rules), parsed.GetValue(asOf)));
         return command;

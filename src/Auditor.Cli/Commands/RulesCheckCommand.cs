@@ -9,13 +9,10 @@ internal static class RulesCheckCommand
     public static Command Make(Terminal terminal)
     {
         var rules = RuleSetOption.Make();
-        var command = new Command("check", """
-            Check every file of a rule set: schema, names, units, tables, circles.
-
-            Examples:
-              auditor rules check
-              auditor rules check --rules house/firm.set.yaml
-            """) { rules };
+        var command = new ExampleCommand(
+            "check", "Check every file of a rule set: schema, names, units, tables, circles.",
+            "auditor rules check",
+            "auditor rules check --rules house/firm.set.yaml") { rules };
         command.SetAction(parsed => Run(terminal, parsed.GetValue(rules)));
         return command;
     }

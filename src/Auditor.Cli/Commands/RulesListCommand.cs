@@ -12,13 +12,10 @@ internal static class RulesListCommand
     {
         var rules = RuleSetOption.Make();
         var coverage = new Option<bool>("--coverage") { Description = "Show instead how many rows of the register the rules decide, part by part." };
-        var command = new Command("list", """
-            List the rules and parameters in force, with the file each comes from.
-
-            Examples:
-              auditor rules list
-              auditor rules list --coverage
-            """) { rules, coverage };
+        var command = new ExampleCommand(
+            "list", "List the rules and parameters in force, with the file each comes from.",
+            "auditor rules list",
+            "auditor rules list --coverage") { rules, coverage };
         command.SetAction(parsed => Run(terminal, parsed.GetValue(rules), parsed.GetValue(coverage)));
         return command;
     }

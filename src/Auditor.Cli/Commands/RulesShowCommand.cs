@@ -11,12 +11,9 @@ internal static class RulesShowCommand
     {
         var rules = RuleSetOption.Make();
         var id = new Argument<string>("RULE") { Description = "Rule id, present or former." };
-        var command = new Command("show", """
-            Show one rule: what it compares, its clause, why, and its cases.
-
-            Example:
-              auditor rules show disconnection-tn
-            """) { id, rules };
+        var command = new ExampleCommand(
+            "show", "Show one rule: what it compares, its clause, why, and its cases.",
+            "auditor rules show disconnection-tn") { id, rules };
         command.SetAction(parsed => Run(terminal, parsed.GetValue(id)!, parsed.GetValue(rules)));
         return command;
     }

@@ -15,14 +15,11 @@ internal static class RulesTestCommand
         {
             Description = "Turn comparisons round, shift limits by 1 %, drop conditions, and list every change that no case notices.",
         };
-        var command = new Command("test", """
-            Run every case of every sheet and rule.
-
-            Examples:
-              auditor rules test
-              auditor rules test --rules house/firm.set.yaml
-              auditor rules test --mutate
-            """) { rules, mutate };
+        var command = new ExampleCommand(
+            "test", "Run every case of every sheet and rule.",
+            "auditor rules test",
+            "auditor rules test --rules house/firm.set.yaml",
+            "auditor rules test --mutate") { rules, mutate };
         command.SetAction(parsed => Run(terminal, parsed.GetValue(rules), parsed.GetValue(mutate)));
         return command;
     }

@@ -13,12 +13,9 @@ internal static class SchemaCommand
     {
         var name = new Argument<string>("NAME") { Description = "Name of the schema, such as design, provision or findings." };
         name.CompletionSources.Add(_ => Names().Select(known => new CompletionItem(known)));
-        var command = new Command("schema", """
-            Print the JSON Schema of design files, rule files or findings.
-
-            Example:
-              auditor schema design
-            """) { name };
+        var command = new ExampleCommand(
+            "schema", "Print the JSON Schema of design files, rule files or findings.",
+            "auditor schema design") { name };
         command.SetAction(parsed => Run(terminal, parsed.GetValue(name)!));
         return command;
     }

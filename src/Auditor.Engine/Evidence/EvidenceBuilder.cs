@@ -1,4 +1,5 @@
 using System.Runtime.CompilerServices;
+using Auditor.Documents;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Installation;
 using Auditor.Engine.RuleSets;
@@ -70,8 +71,11 @@ public sealed class EvidenceBuilder(RuleSet rules)
 
         if (value.IsMissing)
         {
+            // What an input or a quantity lacks is told with it.
+            var told = tracer.Readings.Where(reading => reading.Value.IsMissing && (reading.Input is not null || reading.Quantity is not null))
+                .SelectMany(reading => reading.Value.Absences.Items).ToHashSet();
             sources.AddRange(value.Absences.Items
-                .Where(absence => seen.Add(("missing", absence.ToString())))
+                .Where(absence => !told.Contains(absence))
                 .Select(absence => new EvidenceSource(EvidenceKind.Missing, absence.Name, ValueText.Unknown, "", absence.ToString(), null)));
         }
 
@@ -113,10 +117,10 @@ public sealed class EvidenceBuilder(RuleSet rules)
 
     private static EvidenceSource InputSource(ISubject holder, InputSlot input, in Value value)
     {
-        var source = (holder as DesignSubject)?.Source(input);
+        var statement = (holder as DesignSubject)?.Statement(input);
         return new EvidenceSource(
-            value.IsMissing ? EvidenceKind.Missing : EvidenceKind.Input, $"{holder.Key} {input.Path}", source?.Text ?? ValueText.Show(value, input.Unit),
-            source?.Span.ToString() ?? "", value.IsMissing ? "not given in the design" : "", null);
+            value.IsMissing ? EvidenceKind.Missing : EvidenceKind.Input, $"{holder.Key} {input.Path}",
+            (statement as ScalarNode)?.Text ?? ValueText.Show(value, input.Unit), statement?.Span.ToString() ?? "", value.IsMissing ? "not given in the design" : "", null);
     }
 
     private static EvidenceSource CellSource(TableCell cell, Lookup lookup)

@@ -126,8 +126,11 @@ public sealed class DesignSubject : ISubject
     /// <summary>The mappings of this subject whose <c>type</c> names an entry of <c>types</c>, with the list that it is in.</summary>
     internal IEnumerable<(MappingNode Holder, string List)> NamedHolders() => _design.NamedHolders(this);
 
+    /// <summary>The value in the design file that gives an input, wherever it stands; null when the design does not give it.</summary>
+    public Node? Statement(InputSlot slot) => _design.Find(this, slot);
+
     /// <summary>The scalar in the design file that gives an input, wherever it stands; null when the design does not give it.</summary>
-    public ScalarNode? Source(InputSlot slot) => _design.Find(this, slot) as ScalarNode;
+    public ScalarNode? Source(InputSlot slot) => Statement(slot) as ScalarNode;
 
     /// <summary>The node that gives an input, wherever it stands: a scalar, a list or a group; null when the design does not give it.</summary>
     internal Node? Given(InputSlot slot) => _design.Find(this, slot);

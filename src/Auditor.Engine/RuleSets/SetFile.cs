@@ -69,5 +69,9 @@ internal sealed record SetFile(MappingNode Root, string Folder, string Display)
         return true;
     }
 
-    private string Show(string full) => $"{Display}/{System.IO.Path.GetRelativePath(Folder, full).Replace('\\', '/')}";
+    private string Show(string full)
+    {
+        var path = System.IO.Path.GetRelativePath(Folder, full).Replace('\\', '/');
+        return Display == "." ? path : $"{Display}/{path}";
+    }
 }

@@ -1,0 +1,72 @@
+using System.Text;
+using Auditor.Engine.Evidence;
+using Auditor.Engine.Findings;
+using Auditor.Testing;
+
+namespace Auditor.Engine.Tests;
+
+/// <summary>How findings came about, down to the lines of the design and the cells of the tables.</summary>
+public class EvidenceTests
+{
+    private const string Folder = $"{Small.Files}/Evidence";
+    private const string Suffix = ".finding.txt";
+
+    private static readonly AuditResult House = Small.Audit(Small.DesignText("house"));
+
+    public static TheoryData<string> Findings =>
+        [.. Directory.EnumerateFiles(Repository.PathOf(Folder), $"*{Suffix}").Select(file => Path.GetFileName(file).Replace(Suffix, "")).Order(StringComparer.Ordinal)];
+
+    [Theory]
+    [MemberData(nameof(Findings))]
+    public void Evidence_is_told_as_its_golden_file_has_it(string name)
+    {
+        var key = File.ReadAllText(Repository.PathOf($"{Folder}/{name}{Suffix}")).Trim();
+        var text = new StringBuilder();
+        foreach (var derivation in new EvidenceBuilder(House.Rules).Of(House.Find(key)!))
+        {
+            Write(text, derivation, "");
+        }
+
+        Golden.Match(text.ToString(), $"{Folder}/{name}");
+    }
+
+    [Fact]
+    public void Evidence_tells_what_the_audit_computed()
+    {
+        foreach (var finding in House.Findings.Where(finding => finding.ValueShown.Length > 0 && !finding.Judgement.Value.IsMissing))
+        {
+            var derivations = new EvidenceBuilder(House.Rules).Of(finding);
+
+            Assert.Equal(finding.ValueShown, derivations.Single(derivation => derivation.Symbol == "value").Value);
+        }
+    }
+
+    [Fact]
+    public void A_quantity_is_unfolded_once_and_named_thereafter()
+    {
+        var derivations = new EvidenceBuilder(House.Rules).Of(House.Find("zs-cold:DB1/1")!);
+        var all = derivations.SelectMany(AllSources).Where(source => source.Kind == EvidenceKind.Quantity).ToList();
+
+        Assert.All(all.GroupBy(source => source.Label), group => Assert.Single(group, source => source.Derivation is not null));
+        Assert.All(all.Where(source => source.Derivation is null), source => Assert.Equal("told elsewhere", source.Remark));
+    }
+
+    private static IEnumerable<EvidenceSource> AllSources(Derivation derivation) =>
+        derivation.From.SelectMany(source => source.Derivation is null ? [source] : AllSources(source.Derivation).Prepend(source));
+
+    private static void Write(StringBuilder text, Derivation derivation, string indent)
+    {
+        text.AppendLine($"{indent}{derivation.Subject} {derivation.Symbol} ({derivation.Name}) = {derivation.Value}");
+        text.AppendLine($"{indent}  {derivation.Formula}");
+        text.AppendLine($"{indent}  {derivation.WithNumbers}");
+        text.AppendLine($"{indent}  {derivation.Place}{string.Concat(derivation.References.Select(reference => ", " + reference))}{(derivation.Note.Length == 0 ? "" : " — " + derivation.Note)}");
+        foreach (var source in derivation.From)
+        {
+            text.AppendLine($"{indent}  - {source.Kind}: {source.Label} = {source.Text} [{source.Place}]{(source.Remark.Length == 0 ? "" : " " + source.Remark)}");
+            if (source.Derivation is { } inner)
+            {
+                Write(text, inner, indent + "    ");
+            }
+        }
+    }
+}

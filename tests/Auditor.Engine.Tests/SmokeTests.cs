@@ -1,7 +1,0 @@
-namespace Auditor.Engine.Tests;
-
-public class SmokeTests
-{
-    [Fact]
-    public void Runs() => Assert.True(true);
-}

@@ -1,3 +1,4 @@
+using System.Globalization;
 using Auditor.Formulas.Values;
 using Auditor.Quantities;
 
@@ -20,7 +21,8 @@ public static class ValueText
     };
 
     /// <summary>A relative margin, as a percentage with its sign.</summary>
-    public static string ShowMargin(double relative) => $"{(relative > 0 ? "+" : "")}{Math.Round(relative * 100, 1, MidpointRounding.AwayFromZero):0.0} %";
+    public static string ShowMargin(double relative) =>
+        string.Create(CultureInfo.InvariantCulture, $"{(relative > 0 ? "+" : "")}{Math.Round(relative * 100, 1, MidpointRounding.AwayFromZero):0.0} %");
 
     /// <summary>A number with its unit; a pure number stands alone.</summary>
     public static string ShowNumber(double number, Unit unit) =>

@@ -9,6 +9,9 @@ namespace Auditor.Engine.Installation;
 /// </summary>
 public sealed class DesignBuilder
 {
+    private const string InstallationKey = "-";
+    private const string BondingPrefix = "bonding";
+
     private readonly Design _design;
     private readonly Shapes _shapes;
     private readonly Problems _problems;
@@ -44,6 +47,11 @@ public sealed class DesignBuilder
             if (node.Scalar("id") is not { } id)
             {
                 continue;
+            }
+
+            if (id.Text is InstallationKey or BondingPrefix)
+            {
+                _problems.Add(DesignMessages.ReservedId(id.Span, id.Text));
             }
 
             var board = MakeBoard(node, id.Text);
@@ -109,7 +117,7 @@ public sealed class DesignBuilder
             if (node.Scalar("to") is { } name)
             {
                 IsFirst(name, "bonding conductors to", names);
-                var bonding = Subject(_shapes.Bonding, "bonding/" + name.Text, node);
+                var bonding = Subject(_shapes.Bonding, $"{BondingPrefix}/{name.Text}", node);
                 bonding.Parent = installation;
                 bondings.Add(bonding);
             }

@@ -11,6 +11,9 @@ internal static class DesignMessages
     public static Problem SecondId(SourceSpan span, string what, string id, SourceSpan first) => Problem.Error(
         "duplicate-id", $"there are two {what} `{id}`", span, "give each an id of its own", new ProblemLabel(first, "the first stands here"));
 
+    public static Problem ReservedId(SourceSpan span, string id) => Problem.Error(
+        "reserved-id", $"no board may be called `{id}`", span, "findings name the installation or its bonding conductors so; give the board another id");
+
     public static Problem UnknownBoard(SourceSpan span, string id, string? nearest) => Problem.Error(
         "unknown-board", $"there is no board `{id}`", span, nearest is null ? "name the id of a board in this design" : $"did you mean `{nearest}`?");
 

@@ -37,7 +37,7 @@ public class InputTests
     [InlineData("phases: 1", "not known", "not known", "not known")]
     public void The_loop_impedance_is_one_figure_or_two_parts(string line, string whole, string resistance, string ze)
     {
-        var design = Small.Build($"design-format: 1\nsupply:\n  earthing: TN-S\n  voltage: 230 V\n  {line}\n{(line.StartsWith("phases") ? "" : "  phases: 1\n")}boards:\n  - id: A\n");
+        var design = Small.Build($"design-format: 1\nsupply:\n  earthing: TN-S\n  voltage: 230 V\n  {line}\n{(line.StartsWith("phases", StringComparison.Ordinal) ? "" : "  phases: 1\n")}boards:\n  - id: A\n");
 
         Assert.Equal(whole, Shown(design, "-", "supply.loop_impedance"));
         Assert.Equal(resistance, Shown(design, "-", "supply.loop_impedance.resistance"));

@@ -25,6 +25,8 @@ internal static class AuditorProgram
             AuditCommand.Make(terminal),
             EvidenceCommand.Make(terminal),
             RulesCommand.Make(terminal),
+            NewCommand.Make(terminal),
+            ImportCommand.Make(terminal),
             SchemaCommand.Make(terminal),
             noColour,
             verbose,

@@ -1,3 +1,5 @@
+using Auditor.Documents;
+using Auditor.Engine.Installation;
 using Auditor.Engine.RuleSets;
 
 namespace Auditor.Cli;
@@ -10,4 +12,8 @@ internal static class Shipped
 
     /// <summary>The shipped rule data.</summary>
     public static RuleHome Rules { get; } = new(Path.Combine(AppContext.BaseDirectory, "rules"), "rules");
+
+    /// <summary>Reads the shipped schema of design files.</summary>
+    public static DesignSchema DesignSchema() =>
+        Engine.Installation.DesignSchema.Parse(new SourceText($"{Rules.Display}/schema/design.schema.json", File.ReadAllText(Rules.SchemaPath("design"))));
 }

@@ -8,7 +8,7 @@ namespace Auditor.Reports.JUnit;
 /// </summary>
 internal static class XmlText
 {
-    private const char Stand = '\uFFFD';
+    private const string Stand = "\uFFFD";
 
     /// <summary>Writes an attribute.</summary>
     public static void Attribute(this XmlWriter xml, string name, string value) => xml.WriteAttributeString(name, Writable(value));
@@ -22,7 +22,7 @@ internal static class XmlText
         // A half of a surrogate pair that stands alone comes as � from the enumeration itself.
         foreach (var rune in text.EnumerateRunes())
         {
-            _ = rune.IsBmp && !XmlConvert.IsXmlChar((char)rune.Value) ? writable.Append(Stand) : writable.Append(rune.ToString());
+            writable.Append(rune.IsBmp && !XmlConvert.IsXmlChar((char)rune.Value) ? Stand : rune.ToString());
         }
 
         return writable.ToString();

@@ -4,10 +4,10 @@ using Auditor.Testing;
 
 namespace Auditor.Cli.Tests;
 
-/// <summary>The scripts and settings of <c>docs/version-control</c>, in a repository with two revisions of a design.</summary>
+/// <summary>The scripts and settings of <c>examples/version-control</c>, in a repository with two revisions of a design.</summary>
 public sealed class VersionControlTests : IDisposable
 {
-    private const string Documents = "docs/version-control";
+    private const string Documents = "examples/version-control";
 
     private readonly TemporaryFolder _folder = new();
 

@@ -11,4 +11,18 @@ public static class VerdictWords
         Verdict.Departed => "departed",
         _ => "undetermined",
     };
+
+    /// <summary>The verdict of a word; null for any other word.</summary>
+    public static Verdict? Find(string word)
+    {
+        foreach (var verdict in Enum.GetValues<Verdict>())
+        {
+            if (verdict.Word() == word)
+            {
+                return verdict;
+            }
+        }
+
+        return null;
+    }
 }

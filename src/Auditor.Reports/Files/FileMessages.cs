@@ -9,6 +9,9 @@ internal static class FileMessages
         "unknown-report-format", $"{ProblemText.Quote(path)} has no ending that names a report format", null,
         "known endings: " + string.Join(", ", endings));
 
+    public static Problem NeedsAudit(string ending, string name) => Problem.Error(
+        "report-needs-audit", $"{ending} is written of an audit, and {ProblemText.Quote(name)} is a findings file", null, "name the design file");
+
     public static Problem IsFolder(string path) => NotWritten(path, "it is a folder", "give the name of a file");
 
     public static Problem NoFolder(string path) => NotWritten(path, "its folder does not exist", "make the folder first");

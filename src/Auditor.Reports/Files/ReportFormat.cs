@@ -43,12 +43,15 @@ public sealed class ReportFormat
     internal Ink? Ink { get; }
 
     /// <summary>The format of a file to write; null, with a problem that lists the known endings, when its ending is none of them.</summary>
-    public static ReportFormat? Of(string path, Problems problems)
+    public static ReportFormat? Of(string path, Problems problems) => Of(path, All, problems);
+
+    /// <summary>The format of a file to write, of those that come into question; null, with a problem that lists their endings, when its ending is none of them.</summary>
+    public static ReportFormat? Of(string path, IReadOnlyList<ReportFormat> formats, Problems problems)
     {
-        var format = All.FirstOrDefault(format => path.EndsWith(format.Ending, StringComparison.OrdinalIgnoreCase));
+        var format = formats.FirstOrDefault(format => path.EndsWith(format.Ending, StringComparison.OrdinalIgnoreCase));
         if (format is null)
         {
-            problems.Add(FileMessages.UnknownEnding(path, All.Select(known => known.Ending)));
+            problems.Add(FileMessages.UnknownEnding(path, formats.Select(known => known.Ending)));
         }
 
         return format;

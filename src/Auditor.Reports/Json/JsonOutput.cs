@@ -9,7 +9,7 @@ using Auditor.Reports.Reading;
 namespace Auditor.Reports.Json;
 
 /// <summary>Writes the things that findings files are made of. The same values give the same bytes on every machine.</summary>
-internal sealed class JsonOutput(Stream stream, Places places) : IDisposable
+internal sealed class JsonOutput(Stream stream, Places? places = null) : IDisposable
 {
     /// <summary>
     /// Numbers are rounded to so many digits: the last bits of powers, roots and logarithms differ between machines.
@@ -24,8 +24,8 @@ internal sealed class JsonOutput(Stream stream, Places places) : IDisposable
         Encoder = JavaScriptEncoder.UnsafeRelaxedJsonEscaping,
     });
 
-    /// <summary>How places are shown.</summary>
-    public Places Places => places;
+    /// <summary>How spans are shown; to be given where spans are written.</summary>
+    public Places Places => places ?? throw new InvalidOperationException("this output was not told how to show spans");
 
     public void Object(string? name, Action members)
     {
@@ -33,6 +33,20 @@ internal sealed class JsonOutput(Stream stream, Places places) : IDisposable
         _writer.WriteStartObject();
         members();
         _writer.WriteEndObject();
+    }
+
+    /// <summary>An object made of something; null where there is nothing.</summary>
+    public void Nullable<T>(string name, T? thing, Action<T> members)
+        where T : class
+    {
+        if (thing is null)
+        {
+            Null(name);
+        }
+        else
+        {
+            Object(name, () => members(thing));
+        }
     }
 
     public void Array<T>(string? name, IEnumerable<T> items, Action<T> item)
@@ -55,7 +69,11 @@ internal sealed class JsonOutput(Stream stream, Places places) : IDisposable
     /// <summary>A text of which the empty one says nothing, and is null.</summary>
     public void TextOrNull(string name, string text) => Text(name, text.Length == 0 ? null : text);
 
-    public void Whole(string name, int number) => _writer.WriteNumber(name, number);
+    public void Whole(string? name, int number)
+    {
+        Name(name);
+        _writer.WriteNumberValue(number);
+    }
 
     public void Flag(string name, bool flag) => _writer.WriteBoolean(name, flag);
 
@@ -103,7 +121,7 @@ internal sealed class JsonOutput(Stream stream, Places places) : IDisposable
     {
         if (span is { } at)
         {
-            Location(places.Path(at.Source.Path), at.StartLocation);
+            Location(Places.Path(at.Source.Path), at.StartLocation);
         }
         else
         {

@@ -41,7 +41,8 @@ internal static class TailJson
         output.Location(departure.Span);
     }
 
-    private static string State(DepartureState state) => state switch
+    /// <summary>The word for the state of a departure.</summary>
+    public static string State(DepartureState state) => state switch
     {
         DepartureState.InForce => "inForce",
         DepartureState.NotNeeded => "notNeeded",

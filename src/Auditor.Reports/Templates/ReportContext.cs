@@ -20,7 +20,7 @@ internal sealed class ReportContext : TemplateContext
     private readonly TemplateFolder _folder;
     private long _evaluations;
 
-    public ReportContext(ReportModel model, Ink ink, TemplateFolder folder)
+    public ReportContext(object model, Ink ink, TemplateFolder folder)
         : base(Functions(ink))
     {
         _ink = ink;

@@ -1,7 +1,6 @@
 using System.Text;
 using Auditor.Documents;
 using Auditor.Reports.Files;
-using Auditor.Reports.Model;
 using Scriban.Syntax;
 
 namespace Auditor.Reports.Templates;
@@ -15,14 +14,14 @@ namespace Auditor.Reports.Templates;
 public static class TemplateReport
 {
     /// <summary>Writes a report.</summary>
-    /// <param name="model">What to show.</param>
+    /// <param name="model">What to show: texts, flags, whole numbers and lists of such, with their members documented.</param>
     /// <param name="format">Text or Markdown; decides how inserted text is made inert.</param>
     /// <param name="template">The template.</param>
     /// <param name="problems">Receives what is wrong with the template, with its path, line and column.</param>
     /// <param name="limits">How much the template may ask for; null for the default limits.</param>
     /// <returns>The report in UTF-8 without a byte order mark, lines ended by LF; null when there are problems.</returns>
     /// <exception cref="ArgumentException">The format is not written from a template.</exception>
-    public static byte[]? Render(ReportModel model, ReportFormat format, TemplateFile template, Problems problems, TemplateLimits? limits = null)
+    public static byte[]? Render(object model, ReportFormat format, TemplateFile template, Problems problems, TemplateLimits? limits = null)
     {
         var ink = format.Ink ?? throw new ArgumentException($"no template writes {format.Ending}", nameof(format));
         var folder = new TemplateFolder(template, limits ?? TemplateLimits.Default, problems);

@@ -17,11 +17,17 @@ internal sealed class Auditing(string? ruleSet, DateOnly asOf, Problems problems
     private readonly Dictionary<string, RuleSet?> _sets = [];
 
     /// <summary>Audits one design; null, with problems added, when it cannot be done.</summary>
-    public AuditResult? Run(string path)
+    public AuditResult? Run(string path) => Run(Path.GetFullPath(path), path, Environment.CurrentDirectory);
+
+    /// <summary>Audits one design that lies elsewhere than it is shown; null, with problems added, when it cannot be done.</summary>
+    /// <param name="fullPath">Where it lies.</param>
+    /// <param name="path">The path to show.</param>
+    /// <param name="within">Full path of the folder that its rule set may lie in, besides its own folder.</param>
+    public AuditResult? Run(string fullPath, string path, string within)
     {
-        var file = DesignFile.Read(Path.GetFullPath(path), path, problems);
+        var file = DesignFile.Read(fullPath, path, problems);
         Log.Information("Read {Design}", path);
-        if (file is null || RulesFor(file) is not { } rules)
+        if (file is null || RulesFor(file, Path.GetDirectoryName(fullPath)!, within) is not { } rules)
         {
             return null;
         }
@@ -39,7 +45,7 @@ internal sealed class Auditing(string? ruleSet, DateOnly asOf, Problems problems
         return own.HasErrors ? null : result;
     }
 
-    private RuleSet? RulesFor(DesignFile file)
+    private RuleSet? RulesFor(DesignFile file, string folder, string within)
     {
         if (ruleSet is not null)
         {
@@ -51,8 +57,8 @@ internal sealed class Auditing(string? ruleSet, DateOnly asOf, Problems problems
             return Load(Shipped.DefaultSet, Environment.CurrentDirectory, null);
         }
 
-        var folder = Path.GetDirectoryName(Path.GetFullPath(file.Path))!;
-        if (named.Text.Contains('/') && !IsReachable(Path.GetFullPath(Path.Combine(folder, named.Text)), folder))
+        var asked = Path.GetFullPath(Path.Combine(folder, named.Text));
+        if (named.Text.Contains('/') && !IsBelow(asked, folder) && !IsBelow(asked, within))
         {
             problems.Add(CommandMessages.UnreachableRuleSet(named.Span, named.Text));
             return null;
@@ -63,7 +69,7 @@ internal sealed class Auditing(string? ruleSet, DateOnly asOf, Problems problems
 
     private RuleSet? Load(string name, string folder, SourceSpan? asked)
     {
-        var key = name.Contains('/') ? Path.GetFullPath(Path.Combine(folder, name)) : name;
+        var key = name.Contains('/') || name.EndsWith(".yaml", StringComparison.Ordinal) ? Path.GetFullPath(Path.Combine(folder, name)) : name;
         if (!_sets.TryGetValue(key, out var rules))
         {
             rules = RuleSetLoader.Load(Shipped.Rules, name, folder, asked, problems);
@@ -73,9 +79,6 @@ internal sealed class Auditing(string? ruleSet, DateOnly asOf, Problems problems
 
         return rules;
     }
-
-    private static bool IsReachable(string path, string folder) =>
-        IsBelow(path, folder) || IsBelow(path, Environment.CurrentDirectory);
 
     private static bool IsBelow(string path, string folder) => path.StartsWith(folder.TrimEnd('/') + "/", StringComparison.Ordinal);
 }

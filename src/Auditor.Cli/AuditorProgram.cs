@@ -23,6 +23,7 @@ internal static class AuditorProgram
         var root = new RootCommand("Audits low-voltage electrical installations against wiring rules kept as data.")
         {
             AuditCommand.Make(terminal),
+            CompareCommand.Make(terminal),
             EvidenceCommand.Make(terminal),
             RulesCommand.Make(terminal),
             NewCommand.Make(terminal),

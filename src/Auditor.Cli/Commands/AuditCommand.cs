@@ -1,8 +1,11 @@
 using System.CommandLine;
+using Auditor.Cli.Revisions;
 using Auditor.Cli.Summaries;
 using Auditor.Documents;
+using Auditor.Engine.Comparisons;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Registers;
+using Auditor.Reports.Comparisons;
 using Auditor.Reports.Json;
 using Auditor.Reports.Model;
 using Spectre.Console;
@@ -20,10 +23,11 @@ internal static class AuditCommand
         var template = new Option<string?>("--template") { Description = "Template to use instead of the shipped one for .md and .txt.", HelpName = "FILE" };
         var evidence = new Option<bool>("--evidence") { Description = "Put every input and every quantity with its derivation into the .json." };
         var asOf = AsOfOption.Make();
-        var failOn = new Option<FailOn>("--fail-on")
+        var failOn = FailOnOption.Make();
+        var against = new Option<string?>("--against")
         {
-            Description = "Least severe kind of finding that makes the exit code 1; each counts the more severe ones as well.",
-            DefaultValueFactory = _ => FailOn.Undetermined,
+            Description = "Earlier findings (.json), design, or REVISION:path: only what is new or worse since then counts for the exit code. {name} as with --write.",
+            HelpName = "FINDINGS",
         };
         var quiet = new Option<bool>("--quiet", "-q") { Description = "Print no summary." };
         var command = new ExampleCommand(
@@ -31,16 +35,18 @@ internal static class AuditCommand
             "auditor audit examples/bakery/bakery.design.yaml",
             "auditor audit designs --fail-on nonconforming",
             "auditor audit site.design.yaml --write site.md --write site.json",
-            "auditor audit designs --write '{name}.report.md' --as-of 2026-12-01") { designs, rules, write, template, evidence, asOf, failOn, quiet };
+            "auditor audit designs --write '{name}.report.md' --as-of 2026-12-01",
+            "auditor audit designs --against '{name}.findings.json'") { designs, rules, write, template, evidence, asOf, failOn, against, quiet };
         command.SetAction(parsed => new AuditRun(
             terminal, parsed.GetValue(rules), parsed.GetValue(write) ?? [], parsed.GetValue(template), new FindingsOptions(parsed.GetValue(evidence)),
-            parsed.GetValue(failOn), parsed.GetValue(quiet)).Execute(parsed.GetValue(designs)!, parsed.GetValue(asOf)));
+            parsed.GetValue(failOn), parsed.GetValue(against), parsed.GetValue(quiet)).Execute(parsed.GetValue(designs)!, parsed.GetValue(asOf)));
         return command;
     }
 
     /// <summary>One run of the command.</summary>
     private sealed record AuditRun(
-        Terminal Terminal, string? RuleSet, IReadOnlyList<string> Writes, string? Template, FindingsOptions Options, FailOn FailOn, bool Quiet)
+        Terminal Terminal, string? RuleSet, IReadOnlyList<string> Writes, string? Template, FindingsOptions Options, FailOn FailOn, string? Against,
+        bool Quiet)
     {
         public int Execute(string[] arguments, string? asOfText)
         {
@@ -54,9 +60,16 @@ internal static class AuditCommand
                 return ExitCode.Problems;
             }
 
+            if (Against is not null)
+            {
+                ReportTarget.CheckName(Against, paths.Count, problems);
+            }
+
             var register = targets.Count == 0 ? null : Task.Run(() => Register.Load(Shipped.Rules, problems));
             var auditing = new Auditing(RuleSet, asOf, problems);
             var results = paths.Select(auditing.Run).OfType<AuditResult>().ToArray();
+            var reader = new RevisionReader(auditing, problems);
+            var audited = problems.HasErrors ? [] : results.Select(result => new Audited(result, Compare(result, reader))).ToArray();
             if (problems.HasErrors)
             {
                 // No report of a run in which anything could not be audited: a part must not be read as the whole.
@@ -66,25 +79,46 @@ internal static class AuditCommand
 
             foreach (var target in targets)
             {
-                Array.ForEach(results, result => target.Write(result, register!.GetAwaiter().GetResult(), Template, Options, problems));
+                Array.ForEach(audited, one => target.Write(one.Result, one.Against, register!.GetAwaiter().GetResult(), Template, Options, problems));
             }
 
             if (!Quiet)
             {
-                Summarise(results);
+                Summarise(audited);
             }
 
-            return Terminal.Tell(problems) ? ExitCode.Problems : Code(results);
+            return Terminal.Tell(problems) ? ExitCode.Problems : Code(audited);
         }
 
-        private int Code(IEnumerable<AuditResult> results) =>
-            results.SelectMany(result => result.Findings).Any(finding => FailOn.Counts(finding)) ? ExitCode.Found : ExitCode.Clean;
+        private RevisionComparison? Compare(AuditResult result, RevisionReader reader)
+        {
+            var path = result.Design.File.Path;
+            var earlier = Against is null ? null : reader.Read(ReportTarget.Named(Against, path));
+            return earlier is null ? null : RevisionComparison.Of(earlier, Revision.Of(path, result));
+        }
 
-        private void Summarise(AuditResult[] results)
+        private int Code(Audited[] audited)
+        {
+            var counts = audited.Any(one => one.Against is { } comparison
+                ? comparison.Findings.Any(change => FailOn.Counts(change))
+                : one.Result.Findings.Any(finding => FailOn.Counts(finding)));
+            return counts ? ExitCode.Found : ExitCode.Clean;
+        }
+
+        private void Summarise(Audited[] audited)
         {
             var summary = new Summary(Terminal.Console());
-            Array.ForEach(results, summary.Write);
+            Array.ForEach(audited, one => summary.Write(one.Result));
+            var changes = new ComparisonSummary(Terminal.Console());
+            foreach (var comparison in audited.Select(one => one.Against).OfType<RevisionComparison>())
+            {
+                changes.Write(ComparisonModel.Build(comparison));
+            }
+
             Terminal.Console().WriteLine(Caution.Text);
         }
     }
+
+    /// <summary>An audit, and how it stands against an earlier one where the caller named one.</summary>
+    private sealed record Audited(AuditResult Result, RevisionComparison? Against);
 }

@@ -12,7 +12,7 @@ internal static class CommandMessages
         "not-a-date", $"`{text}` is not a day of the calendar", null, "write `--as-of` as year, month and day, for example 2026-09-14");
 
     public static Problem ManyIntoOne(string path) => Problem.Error(
-        "many-designs-one-file", $"several designs cannot be written to one `{path}`", null,
+        "many-designs-one-file", $"several designs cannot share one `{path}`", null,
         "name one design, or write `{name}` in the path: it stands for the path of each design without `.design.yaml`");
 
     public static Problem UnknownKey(string key, string? nearest) => Problem.Error(

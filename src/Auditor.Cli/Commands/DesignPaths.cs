@@ -38,7 +38,8 @@ internal static class DesignPaths
     public static string BaseName(string path) =>
         path.EndsWith(Ending, StringComparison.Ordinal) ? path[..^Ending.Length] : Path.ChangeExtension(path, null);
 
-    private static string Tidy(string path)
+    /// <summary>A path as it is shown: with forward slashes, and without a dot before it.</summary>
+    public static string Tidy(string path)
     {
         var shown = path.Replace('\\', '/');
         return shown.StartsWith("./", StringComparison.Ordinal) ? shown[2..] : shown;

@@ -1,3 +1,4 @@
+using Auditor.Engine.Comparisons;
 using Auditor.Engine.Findings;
 using Auditor.Engine.RuleSets;
 
@@ -23,20 +24,25 @@ internal enum FailOn
 internal static class FailOnThreshold
 {
     /// <summary>Whether a finding lies at or above the threshold.</summary>
-    public static bool Counts(this FailOn threshold, Finding finding) => KindOf(finding) is { } kind && kind <= threshold;
+    public static bool Counts(this FailOn threshold, Finding finding) =>
+        KindOf(finding.Verdict, finding.Rule.Provision == Provision.Requirement, finding.OnAssumption) is { } kind && kind <= threshold;
 
-    private static FailOn? KindOf(Finding finding)
+    /// <summary>Whether a finding that became new or worse lies at or above the threshold.</summary>
+    public static bool Counts(this FailOn threshold, FindingChange change) => change.IsNewOrWorse
+        && KindOf(change.Finding.Verdict, change.Finding.IsRequirement, change.Finding.OnAssumption) is { } kind && kind <= threshold;
+
+    private static FailOn? KindOf(Verdict verdict, bool isRequirement, bool onAssumption)
     {
-        if (finding.Rule.Provision == Provision.Recommendation)
+        if (!isRequirement)
         {
-            return finding.Verdict == Verdict.Nonconforming ? FailOn.Recommendation : null;
+            return verdict == Verdict.Nonconforming ? FailOn.Recommendation : null;
         }
 
-        return finding.Verdict switch
+        return verdict switch
         {
             Verdict.Nonconforming => FailOn.Nonconforming,
             Verdict.Undetermined => FailOn.Undetermined,
-            Verdict.Conforms when finding.OnAssumption => FailOn.Assumption,
+            Verdict.Conforms when onAssumption => FailOn.Assumption,
             _ => null,
         };
     }

@@ -1,7 +1,9 @@
 using Auditor.Documents;
+using Auditor.Engine.Comparisons;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Registers;
 using Auditor.Reports.Csv;
+using Auditor.Reports.Comparisons;
 using Auditor.Reports.Files;
 using Auditor.Reports.Json;
 using Auditor.Reports.JUnit;
@@ -30,24 +32,34 @@ internal sealed record ReportTarget(string Path, ReportFormat Format)
                 targets.Add(new ReportTarget(path, format));
             }
 
-            if (designs > 1 && !path.Contains(Name, StringComparison.Ordinal))
-            {
-                problems.Add(CommandMessages.ManyIntoOne(path));
-            }
+            CheckName(path, designs, problems);
         }
 
         return problems.HasErrors ? null : targets;
     }
 
-    /// <summary>Writes the report of an audit; false with problems added when it cannot be written.</summary>
-    public bool Write(AuditResult result, Register register, string? template, FindingsOptions options, Problems problems)
+    /// <summary>Adds a problem when several designs would share one file.</summary>
+    public static void CheckName(string path, int designs, Problems problems)
     {
-        var bytes = Bytes(result, register, template, options, problems);
-        var path = Path.Replace(Name, DesignPaths.BaseName(result.Design.File.Path), StringComparison.Ordinal);
-        return bytes is not null && ReportFile.Write(path, bytes, problems);
+        if (designs > 1 && !path.Contains(Name, StringComparison.Ordinal))
+        {
+            problems.Add(CommandMessages.ManyIntoOne(path));
+        }
     }
 
-    private byte[]? Bytes(AuditResult result, Register register, string? template, FindingsOptions options, Problems problems)
+    /// <summary>The path of a design's own file.</summary>
+    public static string Named(string path, string design) => path.Replace(Name, DesignPaths.BaseName(design), StringComparison.Ordinal);
+
+    /// <summary>Writes the report of an audit; false with problems added when it cannot be written.</summary>
+    public bool Write(
+        AuditResult result, RevisionComparison? against, Register register, string? template, FindingsOptions options, Problems problems)
+    {
+        var bytes = Bytes(result, against, register, template, options, problems);
+        return bytes is not null && ReportFile.Write(Named(Path, result.Design.File.Path), bytes, problems);
+    }
+
+    private byte[]? Bytes(
+        AuditResult result, RevisionComparison? against, Register register, string? template, FindingsOptions options, Problems problems)
     {
         if (Format == ReportFormat.Json)
         {
@@ -56,7 +68,7 @@ internal sealed record ReportTarget(string Path, ReportFormat Format)
 
         if (Format == ReportFormat.Sarif)
         {
-            return SarifReport.Write(result);
+            return SarifReport.Write(result, against is null ? null : ComparisonReport.Baselines(against));
         }
 
         if (Format == ReportFormat.JUnit)

@@ -59,7 +59,8 @@ public class EvidenceTests
         text.AppendLine($"{indent}{derivation.Subject} {derivation.Symbol} ({derivation.Name}) = {derivation.Value}");
         text.AppendLine($"{indent}  {derivation.Formula}");
         text.AppendLine($"{indent}  {derivation.WithNumbers}");
-        text.AppendLine($"{indent}  {derivation.Place}{string.Concat(derivation.References.Select(reference => ", " + reference))}{(derivation.Note.Length == 0 ? "" : " — " + derivation.Note)}");
+        var note = derivation.Note.Length == 0 ? "" : " — " + derivation.Note;
+        text.AppendLine($"{indent}  {string.Join(", ", derivation.References.Prepend(derivation.Place))}{note}");
         foreach (var source in derivation.From)
         {
             text.AppendLine($"{indent}  - {source.Kind}: {source.Label} = {source.Text} [{source.Place}]{(source.Remark.Length == 0 ? "" : " " + source.Remark)}");

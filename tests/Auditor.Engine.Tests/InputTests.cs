@@ -37,7 +37,18 @@ public class InputTests
     [InlineData("phases: 1", "not known", "not known", "not known")]
     public void The_loop_impedance_is_one_figure_or_two_parts(string line, string whole, string resistance, string ze)
     {
-        var design = Small.Build($"design-format: 1\nsupply:\n  earthing: TN-S\n  voltage: 230 V\n  {line}\n{(line.StartsWith("phases", StringComparison.Ordinal) ? "" : "  phases: 1\n")}boards:\n  - id: A\n");
+        var phases = line.Contains("phases") ? "" : "phases: 1";
+        var design = Small.Build(
+            $$"""
+            design-format: 1
+            supply:
+              earthing: TN-S
+              voltage: 230 V
+              {{line}}
+              {{phases}}
+            boards:
+              - id: A
+            """);
 
         Assert.Equal(whole, Shown(design, "-", "supply.loop_impedance"));
         Assert.Equal(resistance, Shown(design, "-", "supply.loop_impedance.resistance"));
@@ -73,7 +84,16 @@ public class InputTests
     public void An_input_is_read_as_what_the_schema_says_it_is(string line, string input, string value, Marks marks)
     {
         var written = line.Replace("5 A ± 10 %, declared", "\"5 A ± 10 %, declared\"");
-        var design = Small.Build($"design-format: 1\nsupply: {{ earthing: TN-S, phases: 1, voltage: 230 V }}\nboards:\n  - id: A\n    circuits:\n      - id: 1\n        {written}\n");
+        var design = Small.Build(
+            $$"""
+            design-format: 1
+            supply: { earthing: TN-S, phases: 1, voltage: 230 V }
+            boards:
+              - id: A
+                circuits:
+                  - id: 1
+                    {{written}}
+            """);
         var circuit = design.Find("A/1")!;
 
         Assert.Equal(value, Shown(design, "A/1", input));

@@ -110,7 +110,9 @@ public class JudgeTests
 
         Assert.Equal("conforms, on assumption", Judged(compare, "device: { rating: 6 A }, load: { current: \"5 A, assumed\" }")!.VerdictText);
         Assert.Equal("nonconforming", Judged(compare, "device: { rating: 4 A }, load: { current: \"5 A, assumed\" }")!.VerdictText);
-        Assert.Equal("conforms, on assumption", Judged($"when: load.current > 1 A\n{compare.Replace("value: load.current", "value: 1 A")}", "device: { rating: 6 A }, load: { current: \"5 A, assumed\" }")!.VerdictText);
+        Assert.Equal(
+            "conforms, on assumption",
+            Judged($"when: load.current > 1 A\n{compare.Replace("load.current", "1 A")}", "device: { rating: 6 A }, load: { current: \"5 A, assumed\" }")!.VerdictText);
     }
 
     private static Finding? Judged(string check, string circuit, string more = "earthing: {}")

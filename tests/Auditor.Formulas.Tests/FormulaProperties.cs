@@ -9,12 +9,15 @@ namespace Auditor.Formulas.Tests;
 public class FormulaProperties
 {
     private static readonly Gen<string> Fragments = Gen.OneOf(
-        "Z", "n", "kind", "on", "serves", "rcd", "legs", "length", "up", "this", "param", "none", "cmin", "sum_of", "choose", "given", "table", "min", "sqrt", "'", "\"", "`", "'C'",
+        "Z", "n", "kind", "on", "serves", "rcd", "legs", "length", "up", "this", "param", "none", "cmin",
+        "sum_of", "choose", "given", "table", "min", "sqrt", "'", "\"", "`", "'C'",
         "(", ")", "(", ")", "[", "]", "{", "}", ",", ".", "..", "?.", "+", "-", "*", "/", "^", "==", "!=", "<", ">=", "&&", "||", "!", "??", "?", ":", "|", "=", ";", "#", "##",
-        "$", "@", "%", "1", "2.5", "0x1", "1e5", "1e999999999", "V", "mm2", "ohm", "true", "null", "if", "end", "for", "func", "do", "ret", "in", "\\", "\\u", "\n", "\t", "Ω", "🗲", "²", " ", " ", " ");
+        "$", "@", "%", "1", "2.5", "0x1", "1e5", "1e999999999", "V", "mm2", "ohm", "true", "null",
+        "if", "end", "for", "func", "do", "ret", "in", "\\", "\\u", "\n", "\t", "Ω", "🗲", "²", " ", " ", " ");
 
     private static readonly Gen<string> Texts = Gen.OneOf(
-        Fragments.Array[0, 25].Select(string.Concat), Fragments.Array[0, 12].Select(words => string.Join(' ', words)), Gen.Char[' ', '~'].Array[0, 30].Select(chars => new string(chars)),
+        Fragments.Array[0, 25].Select(string.Concat), Fragments.Array[0, 12].Select(words => string.Join(' ', words)),
+        Gen.Char[' ', '~'].Array[0, 30].Select(chars => new string(chars)),
         Gen.String);
 
     [Fact]

@@ -63,7 +63,9 @@ internal static class Grammar
     private static Piece Binary(Piece a, Piece b, char sign)
     {
         var level = sign is '+' or '-' ? 3 : 2;
-        return Piece.Of(level, values => (a.Value(values), b.Value(values)) is (double x, double y) ? Finite(Computed(x, y, sign)) : null, a.Within(level), $" {sign} ", b.Within(level - 1));
+        return Piece.Of(
+            level, values => (a.Value(values), b.Value(values)) is (double x, double y) ? Finite(Computed(x, y, sign)) : null,
+            a.Within(level), $" {sign} ", b.Within(level - 1));
     }
 
     private static double Computed(double x, double y, char sign) => sign switch

@@ -1,6 +1,9 @@
 namespace Auditor.Formulas.Tests;
 
-/// <summary>How what is missing spreads. In the formulas <c>Z</c>, <c>n</c>, <c>kind</c>, <c>wet</c> and <c>serves</c> are missing, <c>R</c>, <c>X</c> and <c>on</c> are given.</summary>
+/// <summary>
+/// How what is missing spreads. In the formulas <c>Z</c>, <c>n</c>, <c>kind</c>, <c>wet</c> and <c>serves</c> are missing; <c>R</c>, <c>X</c> and
+/// <c>on</c> are given.
+/// </summary>
 public class MissingTests
 {
     private static Thing Circuit => new Thing(Plant.Circuit, "MSB/1").Say(("R", "0.4 Ω"), ("X", "0.1 Ω"), ("on", "true"), ("remark", "none"));

@@ -8,9 +8,12 @@ namespace Auditor.Formulas.Tests;
 public class UnitsNetTests
 {
     private static readonly Gen<double> Numbers = Gen.Double[0.001, 1000];
-    private static readonly Gen<(string Name, ElectricPotentialUnit Unit)> Volts = Gen.OneOf(("V", ElectricPotentialUnit.Volt), ("kV", ElectricPotentialUnit.Kilovolt), ("mV", ElectricPotentialUnit.Millivolt));
-    private static readonly Gen<(string Name, ElectricCurrentUnit Unit)> Amperes = Gen.OneOf(("A", ElectricCurrentUnit.Ampere), ("kA", ElectricCurrentUnit.Kiloampere), ("mA", ElectricCurrentUnit.Milliampere));
-    private static readonly Gen<(string Name, DurationUnit Unit)> Times = Gen.OneOf(("s", DurationUnit.Second), ("ms", DurationUnit.Millisecond), ("min", DurationUnit.Minute), ("h", DurationUnit.Hour));
+    private static readonly Gen<(string Name, ElectricPotentialUnit Unit)> Volts = Gen.OneOf(
+        ("V", ElectricPotentialUnit.Volt), ("kV", ElectricPotentialUnit.Kilovolt), ("mV", ElectricPotentialUnit.Millivolt));
+    private static readonly Gen<(string Name, ElectricCurrentUnit Unit)> Amperes = Gen.OneOf(
+        ("A", ElectricCurrentUnit.Ampere), ("kA", ElectricCurrentUnit.Kiloampere), ("mA", ElectricCurrentUnit.Milliampere));
+    private static readonly Gen<(string Name, DurationUnit Unit)> Times = Gen.OneOf(
+        ("s", DurationUnit.Second), ("ms", DurationUnit.Millisecond), ("min", DurationUnit.Minute), ("h", DurationUnit.Hour));
 
     [Fact]
     public void Ohms_law_holds_in_all_units() => Gen.Select(Numbers, Volts, Numbers, Amperes).Sample((u, volts, i, amperes) =>

@@ -3,7 +3,7 @@ using Auditor.Testing;
 
 namespace Auditor.Cli.Tests;
 
-/// <summary>A git repository in a folder that goes when the test ends, with the three revisions of a yard as tags.</summary>
+/// <summary>A git repository in a folder that goes when the test ends.</summary>
 internal sealed class GitRepository : IDisposable
 {
     private const string Revisions = "tests/Auditor.Cli.Tests/revisions";
@@ -11,6 +11,7 @@ internal sealed class GitRepository : IDisposable
 
     private readonly TemporaryFolder _folder = new();
 
+    /// <summary>A repository with the three revisions of a yard as tags.</summary>
     public GitRepository()
     {
         Run("init", "--quiet");
@@ -26,6 +27,15 @@ internal sealed class GitRepository : IDisposable
 
             Commit(revision);
         }
+    }
+
+    /// <summary>A repository of which the first revision, tagged `first`, is a copy of the folder, at the top.</summary>
+    /// <param name="folder">The folder, below the checkout.</param>
+    public GitRepository(string folder)
+    {
+        Run("init", "--quiet");
+        _folder.CopyFrom(Repository.PathOf(folder));
+        Commit("first");
     }
 
     public string Path => _folder.Path;

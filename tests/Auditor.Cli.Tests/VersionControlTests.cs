@@ -85,6 +85,23 @@ public sealed class VersionControlTests : IDisposable
     }
 
     [Fact]
+    public void The_job_tells_what_a_pull_request_changes_in_designs_that_its_target_has()
+    {
+        Tool.RunIn(Design("."), ["new", "house"]);
+        Git("add", ".");
+        Git("commit", "--quiet", "-m", "Revision A");
+        Tool.RunIn(Design("."), ["new", "shed"]);
+        Replace("house.design.yaml", "length: 24 m", "length: 240 m");
+        Git("add", ".");
+
+        var result = Start("sh", Repository.PathOf($"{Documents}/pull-request"), "HEAD");
+
+        Assert.Equal(1, result.Code);
+        Assert.Contains("CU/1/leg 1 length: 24 m → 240 m", File.ReadAllText(Design("house.changes.md")), StringComparison.Ordinal);
+        Assert.False(File.Exists(Design("shed.changes.md")));
+    }
+
+    [Fact]
     public void Diffs_say_which_circuit_and_which_finding_a_change_belongs_to()
     {
         Tool.RunIn(Design("."), ["new", "house"]);

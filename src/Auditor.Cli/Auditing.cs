@@ -1,20 +1,19 @@
-using Auditor.Cli.Commands;
 using Auditor.Documents;
 using Auditor.Engine.Evaluation;
 using Auditor.Engine.Findings;
-using Auditor.Engine.Installation;
-using Auditor.Engine.RuleSets;
+using Auditor.Engine.Guarded;
 using Serilog;
 
 namespace Auditor.Cli;
 
-/// <summary>Reads designs and audits them; a rule set that several designs share is read once.</summary>
+/// <summary>Reads designs and audits them.</summary>
 /// <param name="ruleSet">Rule set named by the caller; null to go by each design.</param>
 /// <param name="asOf">The day on which departures are judged.</param>
 /// <param name="problems">Receives everything that stands in the way.</param>
-internal sealed class Auditing(string? ruleSet, DateOnly asOf, Problems problems)
+/// <param name="acceptance">What to do with tolerances; null to go by each design.</param>
+internal sealed class Auditing(string? ruleSet, DateOnly asOf, Problems problems, Acceptance? acceptance = null)
 {
-    private readonly Dictionary<string, RuleSet?> _sets = [];
+    private readonly Designs _designs = new(ruleSet, problems);
 
     /// <summary>Audits one design; null, with problems added, when it cannot be done.</summary>
     public AuditResult? Run(string path) => Run(Path.GetFullPath(path), path, Environment.CurrentDirectory);
@@ -25,60 +24,19 @@ internal sealed class Auditing(string? ruleSet, DateOnly asOf, Problems problems
     /// <param name="within">Full path of the folder that its rule set may lie in, besides its own folder.</param>
     public AuditResult? Run(string fullPath, string path, string within)
     {
-        var file = DesignFile.Read(fullPath, path, problems);
-        Log.Information("Read {Design}", path);
-        if (file is null || RulesFor(file, Path.GetDirectoryName(fullPath)!, within) is not { } rules)
+        if (_designs.Read(fullPath, path, within) is not { } design)
         {
             return null;
         }
 
         var own = new Problems();
-        rules.Schema.Validation.Validate(file.Root, own);
-        var design = DesignBuilder.Build(file, new Evaluator(rules), own);
-        var result = design is null ? null : Audit.Run(design, asOf, own);
+        var result = Audit.Run(design, asOf, own, acceptance);
         foreach (var problem in own.All)
         {
             problems.Add(problem);
         }
 
-        Log.Information("Evaluated {Design}: {Findings} findings", path, result?.Findings.Count ?? 0);
+        Log.Information("Evaluated {Design}: {Findings} findings", path, result.Findings.Count);
         return own.HasErrors ? null : result;
     }
-
-    private RuleSet? RulesFor(DesignFile file, string folder, string within)
-    {
-        if (ruleSet is not null)
-        {
-            return Load(ruleSet, Environment.CurrentDirectory, null);
-        }
-
-        if (file.RuleSet is not { } named)
-        {
-            return Load(Shipped.DefaultSet, Environment.CurrentDirectory, null);
-        }
-
-        var asked = Path.GetFullPath(Path.Combine(folder, named.Text));
-        if (named.Text.Contains('/') && !IsBelow(asked, folder) && !IsBelow(asked, within))
-        {
-            problems.Add(CommandMessages.UnreachableRuleSet(named.Span, named.Text));
-            return null;
-        }
-
-        return Load(named.Text, folder, named.Span);
-    }
-
-    private RuleSet? Load(string name, string folder, SourceSpan? asked)
-    {
-        var key = name.Contains('/') || name.EndsWith(".yaml", StringComparison.Ordinal) ? Path.GetFullPath(Path.Combine(folder, name)) : name;
-        if (!_sets.TryGetValue(key, out var rules))
-        {
-            rules = RuleSetLoader.Load(Shipped.Rules, name, folder, asked, problems);
-            _sets.Add(key, rules);
-            Log.Information("Read rule set {RuleSet}", name);
-        }
-
-        return rules;
-    }
-
-    private static bool IsBelow(string path, string folder) => path.StartsWith(folder.TrimEnd('/') + "/", StringComparison.Ordinal);
 }

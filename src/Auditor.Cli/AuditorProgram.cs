@@ -25,6 +25,7 @@ internal static class AuditorProgram
             AuditCommand.Make(terminal),
             CompareCommand.Make(terminal),
             EvidenceCommand.Make(terminal),
+            LimitsCommand.Make(terminal),
             RulesCommand.Make(terminal),
             NewCommand.Make(terminal),
             ImportCommand.Make(terminal),

@@ -52,6 +52,25 @@ internal static class Plans
         ],
         [Final("4 mm²", "25 m", 30, 2, "25 A", "C", "18 A", "0.9 ohm", (false, false, true))]);
 
+    /// <summary>One circuit on one board.</summary>
+    public static Plan Single(double ze, Dictionary<string, string> circuit) => new(
+        new Dictionary<(string, string), string>
+        {
+            [("-", "project.title")] = "Plan",
+            [("-", "basis.stage")] = "design",
+            [("-", "basis.supply-ownership")] = "public",
+            [("-", "basis.premises")] = "dwelling",
+            [("-", "basis.ambient")] = "30 °C",
+            [("-", "basis.test-temperature")] = "20 °C",
+            [("-", "supply.earthing")] = "TN-S",
+            [("-", "supply.phases")] = "1",
+            [("-", "supply.voltage")] = "230 V",
+            [("-", "supply.loop-impedance")] = $"{ze} ohm",
+            [("-", "supply.fault-current")] = "1 kA",
+        }.Concat(circuit.Select(entry => KeyValuePair.Create(
+            entry.Key.StartsWith("leg.", StringComparison.Ordinal) ? ("B/1/leg 1", entry.Key[4..]) : ("B/1", entry.Key), entry.Value))).ToDictionary(),
+        [("B", [("1", 1)])]);
+
     private static Gen<Plan> WithTolerance(Gen<string> tolerance) =>
         from final in Final(tolerance).List[1, 3]
         from below in Final(tolerance).List[1, 3]

@@ -4,6 +4,7 @@ using Auditor.Cli.Summaries;
 using Auditor.Documents;
 using Auditor.Engine.Comparisons;
 using Auditor.Engine.Findings;
+using Auditor.Engine.Guarded;
 using Auditor.Engine.Registers;
 using Auditor.Reports.Comparisons;
 using Auditor.Reports.Json;
@@ -29,6 +30,7 @@ internal static class AuditCommand
             Description = "Earlier findings (.json), design, or REVISION:path: only what is new or worse since then counts for the exit code. {name} as with --write.",
             HelpName = "FINDINGS",
         };
+        var acceptance = new AcceptanceOptions();
         var quiet = new Option<bool>("--quiet", "-q") { Description = "Print no summary." };
         var command = new ExampleCommand(
             "audit", "Audit design files against a rule set.",
@@ -36,23 +38,27 @@ internal static class AuditCommand
             "auditor audit designs --fail-on nonconforming",
             "auditor audit site.design.yaml --write site.md --write site.json",
             "auditor audit designs --write '{name}.report.md' --as-of 2026-12-01",
-            "auditor audit designs --against '{name}.findings.json'") { designs, rules, write, template, evidence, asOf, failOn, against, quiet };
+            "auditor audit designs --against '{name}.findings.json'",
+            "auditor audit site.design.yaml --decision guarded --sample 2000") { designs, rules, write, template, evidence, asOf, failOn, against, quiet };
+        acceptance.AddTo(command);
         command.SetAction(parsed => new AuditRun(
-            terminal, parsed.GetValue(rules), parsed.GetValue(write) ?? [], parsed.GetValue(template), new FindingsOptions(parsed.GetValue(evidence)),
-            parsed.GetValue(failOn), parsed.GetValue(against), parsed.GetValue(quiet)).Execute(parsed.GetValue(designs)!, parsed.GetValue(asOf)));
+            terminal, problems => acceptance.Read(parsed, problems), parsed.GetValue(rules), parsed.GetValue(write) ?? [], parsed.GetValue(template),
+            new FindingsOptions(parsed.GetValue(evidence)), parsed.GetValue(failOn), parsed.GetValue(against), parsed.GetValue(quiet))
+            .Execute(parsed.GetValue(designs)!, parsed.GetValue(asOf)));
         return command;
     }
 
     /// <summary>One run of the command.</summary>
     private sealed record AuditRun(
-        Terminal Terminal, string? RuleSet, IReadOnlyList<string> Writes, string? Template, FindingsOptions Options, FailOn FailOn, string? Against,
-        bool Quiet)
+        Terminal Terminal, Func<Problems, Acceptance> Acceptance, string? RuleSet, IReadOnlyList<string> Writes, string? Template,
+        FindingsOptions Options, FailOn FailOn, string? Against, bool Quiet)
     {
         public int Execute(string[] arguments, string? asOfText)
         {
             var problems = new Problems();
             var paths = DesignPaths.Expand(arguments, problems);
             var asOf = AsOfOption.Read(asOfText, problems);
+            var acceptance = Acceptance(problems);
             var targets = ReportTarget.Read(Writes, paths.Count, problems);
             if (targets is null || problems.HasErrors)
             {
@@ -66,7 +72,7 @@ internal static class AuditCommand
             }
 
             var register = targets.Count == 0 ? null : Task.Run(() => Register.Load(Shipped.Rules, problems));
-            var auditing = new Auditing(RuleSet, asOf, problems);
+            var auditing = new Auditing(RuleSet, asOf, problems, acceptance);
             var results = paths.Select(auditing.Run).OfType<AuditResult>().ToArray();
             var reader = new RevisionReader(auditing, problems);
             var audited = problems.HasErrors ? [] : results.Select(result => new Audited(result, Compare(result, reader))).ToArray();

@@ -11,6 +11,19 @@ internal static class CommandMessages
     public static Problem NotDate(string text) => Problem.Error(
         "not-a-date", $"`{text}` is not a day of the calendar", null, "write `--as-of` as year, month and day, for example 2026-09-14");
 
+    public static Problem UnknownSubject(string key, string? nearest) => Problem.Error(
+        "unknown-subject", $"the design has no subject `{key}`", null, nearest is null ? "write board/circuit, or `-` for the installation" : $"did you mean `{nearest}`?");
+
+    public static Problem NotAdjustable(string path, string? nearest, IEnumerable<string> known) => Problem.Error(
+        "not-adjustable", $"the rule set has no adjustment of `{path}`", null,
+        (nearest is null ? "" : $"did you mean `{nearest}`? ") + "adjustable: " + string.Join(", ", known));
+
+    public static Problem UnknownLimitsFormat(string path, IEnumerable<string> endings) => Problem.Error(
+        "unknown-report-format", $"`{path}` has no ending that names a format of limits", null, "known endings: " + string.Join(", ", endings));
+
+    public static Problem NotSamples(int samples, int most) => Problem.Error(
+        "not-a-count", $"{samples} samples cannot be drawn", null, $"give `--sample` a number from 1 to {most}");
+
     public static Problem ManyIntoOne(string path) => Problem.Error(
         "many-designs-one-file", $"several designs cannot share one `{path}`", null,
         "name one design, or write `{name}` in the path: it stands for the path of each design without `.design.yaml`");

@@ -10,6 +10,9 @@ internal enum FailOn
     /// <summary>Requirements that are not kept.</summary>
     Nonconforming,
 
+    /// <summary>Requirements that are kept as stated, but not everywhere within the tolerances.</summary>
+    Unproven,
+
     /// <summary>Requirements that cannot be judged.</summary>
     Undetermined,
 
@@ -35,12 +38,13 @@ internal static class FailOnThreshold
     {
         if (!isRequirement)
         {
-            return verdict == Verdict.Nonconforming ? FailOn.Recommendation : null;
+            return verdict is Verdict.Nonconforming or Verdict.Unproven ? FailOn.Recommendation : null;
         }
 
         return verdict switch
         {
             Verdict.Nonconforming => FailOn.Nonconforming,
+            Verdict.Unproven => FailOn.Unproven,
             Verdict.Undetermined => FailOn.Undetermined,
             Verdict.Conforms when onAssumption => FailOn.Assumption,
             _ => null,

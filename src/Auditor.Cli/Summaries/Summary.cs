@@ -1,4 +1,5 @@
 using Auditor.Engine.Findings;
+using Auditor.Engine.Guarded;
 using Auditor.Engine.RuleSets;
 using Spectre.Console;
 
@@ -24,21 +25,24 @@ internal sealed class Summary(IAnsiConsole console)
         console.WriteLine();
         console.WriteLine(Counts(result));
         console.WriteLine();
-        Nonconforming(result, Provision.Requirement, "Requirements not met, to be put right");
+        List(result, Verdict.Nonconforming, Provision.Requirement, "Requirements not met, to be put right");
+        List(result, Verdict.Unproven, Provision.Requirement, "Requirements met as stated, but not everywhere within the tolerances");
         Gaps(result);
-        Nonconforming(result, Provision.Recommendation, "Recommendations not followed");
+        List(result, Verdict.Nonconforming, Provision.Recommendation, "Recommendations not followed");
+        List(result, Verdict.Unproven, Provision.Recommendation, "Recommendations followed as stated, but not everywhere within the tolerances");
     }
 
     private static string Counts(AuditResult result)
     {
         var assumed = result.Findings.Count(finding => finding.Verdict == Verdict.Conforms && finding.OnAssumption);
         return $"{result.Findings.Count} findings on {result.Design.Subjects.Count} subjects: {result.Count(Verdict.Nonconforming)} nonconforming, " +
+            (result.Decision == Decision.Guarded ? $"{result.Count(Verdict.Unproven)} unproven, " : "") +
             $"{result.Count(Verdict.Undetermined)} undetermined, {result.Count(Verdict.Departed)} departed, {result.Count(Verdict.Conforms)} conforming ({assumed} on an assumption)";
     }
 
-    private void Nonconforming(AuditResult result, Provision provision, string heading)
+    private void List(AuditResult result, Verdict verdict, Provision provision, string heading)
     {
-        var findings = result.Findings.Where(finding => finding.Verdict == Verdict.Nonconforming && finding.Rule.Provision == provision).ToArray();
+        var findings = result.Findings.Where(finding => finding.Verdict == verdict && finding.Rule.Provision == provision).ToArray();
         if (findings.Length == 0)
         {
             return;
@@ -50,11 +54,17 @@ internal sealed class Summary(IAnsiConsole console)
         {
             table.AddRow(
                 Markup.Escape(finding.Subject.Key), Markup.Escape($"{finding.Message} [{finding.Rule.Id}]"),
-                finding.Judgement.Margin?.Relative is { } margin ? Markup.Escape(ValueText.ShowMargin(margin)) : "", Markup.Escape(Place(finding)));
+                Markup.Escape(Margin(finding)), Markup.Escape(Place(finding)));
         }
 
         console.Write(table);
         console.WriteLine();
+    }
+
+    private static string Margin(Finding finding)
+    {
+        var stated = finding.Judgement.Margin?.Relative is { } margin ? ValueText.ShowMargin(margin) : "";
+        return finding.Verdict == Verdict.Unproven && finding.WorstCase!.Margin?.Relative is { } worst ? $"{stated}, worst {ValueText.ShowMargin(worst)}" : stated;
     }
 
     private static string Place(Finding finding)

@@ -40,7 +40,7 @@ public sealed class DepartureReader(RuleSet rules, DateOnly asOf, Problems probl
         null => DepartureState.Unmatched,
         { Rule.AllowsDepartures: false } => DepartureState.Refused,
         _ when expires < asOf => DepartureState.Expired,
-        { Verdict: Verdict.Nonconforming } => DepartureState.InForce,
+        { Verdict: Verdict.Nonconforming or Verdict.Unproven } => DepartureState.InForce,
         _ => DepartureState.NotNeeded,
     };
 

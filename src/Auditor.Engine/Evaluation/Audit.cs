@@ -1,8 +1,8 @@
 using Auditor.Documents;
 using Auditor.Engine.Departures;
 using Auditor.Engine.Findings;
+using Auditor.Engine.Guarded;
 using Auditor.Engine.Installation;
-using Auditor.Engine.RuleSets;
 
 namespace Auditor.Engine.Evaluation;
 
@@ -13,11 +13,11 @@ public static class Audit
     /// <param name="design">The design.</param>
     /// <param name="asOf">The day on which departures are judged to be in force.</param>
     /// <param name="problems">Receives departures that cannot be read.</param>
-    public static AuditResult Run(Design design, DateOnly asOf, Problems problems)
+    /// <param name="acceptance">What to do with tolerances; null to go by the design.</param>
+    public static AuditResult Run(Design design, DateOnly asOf, Problems problems, Acceptance? acceptance = null)
     {
         var rules = design.Evaluator.Rules;
         var findings = new List<Finding>();
-        var applied = new HashSet<Rule>();
         foreach (var subject in design.Subjects)
         {
             foreach (var rule in rules.RulesOf(subject.Shape))
@@ -26,14 +26,19 @@ public static class Audit
                 if (judgement.Verdict is not null)
                 {
                     findings.Add(new Finding(rule, subject, judgement));
-                    applied.Add(rule);
                 }
             }
         }
 
+        var decision = acceptance?.Decision ?? GuardedFindings.AskedBy(design);
+        findings = GuardedFindings.Complete(design, findings, decision, acceptance ?? new Acceptance());
         var departures = Depart(design, findings, asOf, problems);
+        var applied = findings.Select(finding => finding.Rule).ToHashSet();
         return new AuditResult(
-            design, rules, findings, departures, departures.Count > 0 ? asOf : null, [.. rules.Rules.Where(rule => !applied.Contains(rule))]);
+            design, rules, findings, departures, departures.Count > 0 ? asOf : null, [.. rules.Rules.Where(rule => !applied.Contains(rule))])
+        {
+            Decision = decision,
+        };
     }
 
     private static IReadOnlyList<Departure> Depart(Design design, List<Finding> findings, DateOnly asOf, Problems problems)
@@ -52,7 +57,7 @@ public static class Audit
         {
             if (inForce.TryGetValue(findings[i].Key, out var departure))
             {
-                findings[i] = new Finding(findings[i].Rule, findings[i].Subject, findings[i].Judgement, departure);
+                findings[i] = findings[i].With(departure);
             }
         }
 

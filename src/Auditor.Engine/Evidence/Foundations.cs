@@ -1,4 +1,5 @@
 using Auditor.Engine.Findings;
+using Auditor.Engine.Guarded;
 using Auditor.Engine.Installation;
 using Auditor.Formulas;
 using Auditor.Formulas.Subjects;
@@ -18,12 +19,16 @@ public sealed class Foundations(AuditResult result)
     /// <summary>What a finding rests on, in the order of kind and name.</summary>
     public IReadOnlyList<Foundation> Of(Finding finding)
     {
-        if (finding.Judgement.Marks == Marks.None)
+        var found = new HashSet<Foundation>();
+        if (finding.Verdict == Verdict.Unproven)
+        {
+            CollectUncertainties(finding.WorstCase!, found);
+        }
+        else if (finding.Judgement.Marks == Marks.None)
         {
             return [];
         }
 
-        var found = new HashSet<Foundation>();
         var check = finding.Rule.Check;
         foreach (var formula in check.Limits.Prepend(check.Value).Concat(finding.Rule.When is { } when ? [when] : []))
         {
@@ -31,6 +36,15 @@ public sealed class Foundations(AuditResult result)
         }
 
         return [.. found.OrderBy(item => item.Kind).ThenBy(item => item.Subject, StringComparer.Ordinal).ThenBy(item => item.Name, StringComparer.Ordinal)];
+    }
+
+    /// <summary>What is not proven for the uncertainty of an instrument rests on what that uncertainty rests on.</summary>
+    private void CollectUncertainties(WorstCase worst, HashSet<Foundation> found)
+    {
+        foreach (var (subject, slot) in worst.Corner.Where(value => value.Input.Kind == ToleranceKind.Instrument).Select(value => value.Input.Input))
+        {
+            found.UnionWith(OfQuantity(subject, result.Rules.UncertaintyOf(subject.Shape, slot)!.Slot));
+        }
     }
 
     private void Collect(Formula formula, ISubject subject, HashSet<Foundation> found)

@@ -1,4 +1,5 @@
 using Auditor.Engine.Departures;
+using Auditor.Engine.Guarded;
 using Auditor.Engine.Installation;
 using Auditor.Engine.RuleSets;
 
@@ -15,6 +16,9 @@ public sealed record AuditResult(
     Design Design, RuleSet Rules, IReadOnlyList<Finding> Findings, IReadOnlyList<Departure> Departures, DateOnly? AsOf,
     IReadOnlyList<Rule> NotApplied)
 {
+    /// <summary>How values were held against limits.</summary>
+    public Decision Decision { get; init; }
+
     /// <summary>How many findings have a verdict.</summary>
     public int Count(Verdict verdict) => Findings.Count(finding => finding.Verdict == verdict);
 

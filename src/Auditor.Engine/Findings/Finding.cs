@@ -1,7 +1,9 @@
 using Auditor.Documents;
 using Auditor.Engine.Departures;
+using Auditor.Engine.Guarded;
 using Auditor.Engine.Installation;
 using Auditor.Engine.RuleSets;
+using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Values;
 
 namespace Auditor.Engine.Findings;
@@ -11,13 +13,12 @@ public sealed class Finding
 {
     private string? _message;
 
-    internal Finding(Rule rule, DesignSubject subject, Judgement judgement, Departure? departure = null)
+    internal Finding(Rule rule, DesignSubject subject, Judgement judgement)
     {
         Rule = rule;
         Subject = subject;
         Judgement = judgement;
-        Departure = departure;
-        Verdict = departure is null ? judgement.Verdict!.Value : Verdict.Departed;
+        Scope = subject.Scope;
     }
 
     /// <summary>The rule.</summary>
@@ -30,10 +31,16 @@ public sealed class Finding
     public Judgement Judgement { get; }
 
     /// <summary>The departure in force that accepts it; null for none.</summary>
-    public Departure? Departure { get; }
+    public Departure? Departure { get; internal init; }
+
+    /// <summary>The worst case within the tolerances that it depends on; null where it depends on none.</summary>
+    public WorstCase? WorstCase { get; internal init; }
+
+    /// <summary>In how many random designs within the tolerances the rule is kept; null where none were drawn.</summary>
+    public SampleShare? Share { get; internal init; }
 
     /// <summary>The verdict.</summary>
-    public Verdict Verdict { get; }
+    public Verdict Verdict => Departure is not null ? Verdict.Departed : IsUnproven ? Verdict.Unproven : Judgement.Verdict!.Value;
 
     /// <summary>Stable key: it depends on the rule and the subject alone.</summary>
     public string Key => $"{Rule.Id}:{Subject.Key}";
@@ -42,7 +49,7 @@ public sealed class Finding
     public bool OnAssumption => Judgement.Marks.HasFlag(Marks.Assumed);
 
     /// <summary>Whether the verdict hangs on a figure entered from memory.</summary>
-    public bool FromMemory => Judgement.Marks.HasFlag(Marks.FromMemory);
+    public bool FromMemory => (Judgement.Marks | (IsUnproven ? WorstCase!.Marks : Marks.None)).HasFlag(Marks.FromMemory);
 
     /// <summary>The verdict in words, with the assumption that it hangs on.</summary>
     public string VerdictText => Verdict == Verdict.Conforms && OnAssumption ? "conforms, on assumption" : Verdict.Word();
@@ -59,6 +66,25 @@ public sealed class Finding
     /// <summary>The sentence of the finding.</summary>
     public string Message => _message ??= SentenceWriter.Write(this);
 
+    /// <summary>Whether it is kept as stated, but not in the worst case, and guarded acceptance asks for that.</summary>
+    internal bool IsUnproven { get; init; }
+
+    /// <summary>Whether the rule applies as stated, and not only somewhere within the tolerances.</summary>
+    internal bool AppliesAsStated => Scope == Subject.Scope;
+
+    /// <summary>Where the formulas of its sentence are evaluated: the design as stated, or the worst case where the rule applies only there.</summary>
+    internal Scope Scope { get; init; }
+
     /// <summary>Where in the design to look: the first input that can put it right, else the subject itself.</summary>
     public SourceSpan Location => FindingPlace.Of(this);
+
+    /// <summary>The same finding with a departure that accepts it.</summary>
+    internal Finding With(Departure departure) => new(Rule, Subject, Judgement)
+    {
+        Departure = departure,
+        WorstCase = WorstCase,
+        Share = Share,
+        IsUnproven = IsUnproven,
+        Scope = Scope,
+    };
 }

@@ -14,14 +14,22 @@ internal static class SentenceWriter
             text.Append(Fill(part, finding));
         }
 
-        return text.ToString();
+        return finding.IsUnproven ? text.Append(WithinTolerances(finding)).ToString() : text.ToString();
+    }
+
+    private static string WithinTolerances(Finding finding)
+    {
+        var margin = finding.WorstCase!.Margin?.Relative is { } relative ? $", margin {ValueText.ShowMargin(relative)}" : "";
+        return finding.WorstCase.Judgement.Verdict == Verdict.Undetermined
+            ? " So as stated; it cannot be judged everywhere within the tolerances."
+            : $" {(finding.AppliesAsStated ? "So as stated" : "So in the worst case, and only within the tolerances")}; not kept everywhere within the tolerances{margin}.";
     }
 
     private static string Fill(Sentence.Part part, Finding finding)
     {
         if (part.Formula is { } formula)
         {
-            return ValueText.Show(formula.Evaluate(finding.Subject.Scope), formula.Unit);
+            return ValueText.Show(formula.Evaluate(finding.Scope), formula.Unit);
         }
 
         return (part.IsPlace, part.Text) switch

@@ -10,6 +10,8 @@ public static class ValueText
     /// <summary>What stands for a value that is missing.</summary>
     public const string Unknown = "not known";
 
+    private const int BoundDigits = 4;
+
     /// <summary>A value with its unit.</summary>
     public static string Show(in Value value, Unit? unit) => value.Kind switch
     {
@@ -23,6 +25,22 @@ public static class ValueText
     /// <summary>A relative margin, as a percentage with its sign.</summary>
     public static string ShowMargin(double relative) =>
         string.Create(CultureInfo.InvariantCulture, $"{(relative > 0 ? "+" : "")}{Math.Round(relative * 100, 1, MidpointRounding.AwayFromZero):0.0} %");
+
+    /// <summary>A bound with its unit, rounded to four digits so that it stays on its safe side: an upper bound downward, a lower one upward.</summary>
+    public static string ShowBound(double number, Unit unit, bool isMost)
+    {
+        var shown = unit.FromCoherent(number);
+        if (shown == 0)
+        {
+            return ShowNumber(number, unit);
+        }
+
+        var scale = Math.Pow(10, BoundDigits - 1 - Math.Floor(Math.Log10(Math.Abs(shown))));
+        var nearest = Math.Round(shown * scale);
+        var isThere = Math.Abs((shown * scale) - nearest) <= Comparison.Slack * Math.Abs(nearest);
+        var rounded = isThere ? nearest : isMost ? Math.Floor(shown * scale) : Math.Ceiling(shown * scale);
+        return ShowNumber(unit.ToCoherent(rounded / scale), unit);
+    }
 
     /// <summary>A number with its unit; a pure number stands alone.</summary>
     public static string ShowNumber(double number, Unit unit) =>

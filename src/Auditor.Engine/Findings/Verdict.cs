@@ -9,6 +9,9 @@ public enum Verdict
     /// <summary>It is not kept.</summary>
     Nonconforming,
 
+    /// <summary>It is kept as stated, but not wherever within the tolerances the true inputs may lie; only guarded acceptance says so.</summary>
+    Unproven,
+
     /// <summary>It is not kept, and a departure in force accepts that.</summary>
     Departed,
 

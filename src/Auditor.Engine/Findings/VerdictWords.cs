@@ -8,6 +8,7 @@ public static class VerdictWords
     {
         Verdict.Conforms => "conforms",
         Verdict.Nonconforming => "nonconforming",
+        Verdict.Unproven => "unproven",
         Verdict.Departed => "departed",
         _ => "undetermined",
     };

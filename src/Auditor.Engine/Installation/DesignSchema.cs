@@ -50,6 +50,9 @@ public sealed class DesignSchema
     /// <summary>Where an input stands in the design file; null for those that the tree itself answers.</summary>
     internal InputPlace? PlaceOf(SubjectShape shape, int slot) => _places[shape][slot];
 
+    /// <summary>Between which values an input may lie.</summary>
+    public InputBounds BoundsOf(SubjectShape shape, InputSlot slot) => PlaceOf(shape, slot.Index)?.Bounds ?? InputBounds.None;
+
     private static List<(IReadOnlyList<string> Keys, string List)> Groups(IEnumerable<InputPlace?> places) =>
         [.. places.Where(place => place?.Types is not null)
             .DistinctBy(place => string.Join('.', place!.Keys.Take(place.NamedAt)))

@@ -74,22 +74,38 @@ internal sealed class SchemaInputs(JsonElement root, SubjectShape shape, List<In
         if (type.ValueKind == JsonValueKind.String && type.GetString() == "object")
         {
             var ownTypes = Types(schema);
-            AddSlot(path, FormulaType.Group, null, namedAt, types);
+            AddSlot(path, FormulaType.Group, null, new InputPlace(path, namedAt, types, InputBounds.None));
             Walk(schema, path, ownTypes is null ? namedAt : path.Count, ownTypes ?? types);
         }
         else if (TypeOf(schema, type) is var (input, unit))
         {
-            AddSlot(path, input, unit, namedAt, types);
+            AddSlot(path, input, unit, new InputPlace(path, namedAt, types, Bounds(schema)));
         }
     }
 
-    private void AddSlot(IReadOnlyList<string> path, FormulaType type, Unit? unit, int namedAt, string? types)
+    private void AddSlot(IReadOnlyList<string> path, FormulaType type, Unit? unit, InputPlace place)
     {
         if (shape.AddInput(string.Join('.', path), type, unit))
         {
-            places.Add(new InputPlace(path, namedAt, types));
+            places.Add(place);
         }
     }
+
+    /// <summary>What the schema allows of a quantity. One that is not <c>signed</c> is never negative, but for temperatures.</summary>
+    private static InputBounds Bounds(JsonElement schema)
+    {
+        if (!schema.TryGetProperty("quantity", out var kind))
+        {
+            return InputBounds.None;
+        }
+
+        var isSigned = schema.TryGetProperty("signed", out var signed) && signed.GetBoolean();
+        var least = isSigned || QuantityKind.Find(kind.GetString()!) is { Dimension.IsTemperature: true } ? double.NegativeInfinity : 0;
+        return new InputBounds(Bound(schema, "at-least") ?? least, Bound(schema, "at-most") ?? double.PositiveInfinity);
+    }
+
+    private static double? Bound(JsonElement schema, string name) =>
+        schema.TryGetProperty(name, out var bound) && QuantityText.TryParse(bound.GetString()!, out var stated, out _) ? stated.Quantity.Value : null;
 
     private (FormulaType Type, Unit? Unit)? TypeOf(JsonElement schema, JsonElement type)
     {

@@ -14,4 +14,8 @@ namespace Auditor.Engine.RuleSets;
 /// <param name="Sheet">Name of the sheet.</param>
 /// <param name="Node">Its mapping in the sheet's file.</param>
 public sealed record QuantityDefinition(
-    SubjectShape Shape, QuantitySlot Slot, string Name, Formula Formula, Clause Clause, string Note, string Sheet, MappingNode Node);
+    SubjectShape Shape, QuantitySlot Slot, string Name, Formula Formula, Clause Clause, string Note, string Sheet, MappingNode Node)
+{
+    /// <summary>The reading whose uncertainty it is; null for any other quantity.</summary>
+    public Uncertainty? Uncertainty { get; init; }
+}

@@ -42,6 +42,36 @@ internal static class RuleMessages
 
     public static Problem UnknownUnit(SourceSpan span, string unit) => Problem.Error("unknown-unit", $"`{unit}` is not a unit", span, "a pure number has the unit 1");
 
+    public static Problem NoReading(SourceSpan span, string path, string shape, string? nearest) => Problem.Error(
+        "unknown-input", $"a {shape} has no input `{path}`", span, nearest is null ? null : $"did you mean `{nearest}`?");
+
+    public static Problem NotAdjustable(SourceSpan span, string path, FormulaType type) => Problem.Error(
+        "not-adjustable", $"`{path}` is {type}", span, "a quantity or a word can be adjusted");
+
+    public static Problem EmptyRange(SourceSpan span) => Problem.Error("empty-range", "this range holds nothing", span, "write the lesser value after `from`");
+
+    public static Problem NoLookup(SourceSpan span, string name, string? nearest) => Problem.Error(
+        "unknown-table", $"there is no lookup `{name}` among the tables", span, nearest is null ? null : $"did you mean `{nearest}`?");
+
+    public static Problem NotSeries(SourceSpan span, string lookup, IEnumerable<string> keys) => Problem.Error(
+        "not-a-series", $"{lookup} is no series for this input", span,
+        $"its keys are {string.Join(", ", keys)}: give a formula for each but the last, which must be a quantity like the input");
+
+    public static Problem StepType(SourceSpan span, string path, FormulaType wanted, FormulaType got) => Problem.Error(
+        "wrong-type", $"`{path}` is {wanted}, and this is {got}", span, null);
+
+    public static Problem StepWord(SourceSpan span, string word, string path, IEnumerable<string> words) => Problem.Error(
+        "unknown-word", $"`{word}` is none of the words of `{path}`", span, "allowed: " + string.Join(", ", words));
+
+    public static Problem SecondAdjustment(SourceSpan span, string id, string otherPath) => Problem.Error(
+        "duplicate-adjustment", $"there is an adjustment `{id}` already", span, $"it stands in {otherPath}; a house set may replace one, a set may not have it twice");
+
+    public static Problem UncertaintyUnit(SourceSpan span, string path, FormulaType reading, FormulaType got) => Problem.Error(
+        "unit-mismatch", $"`{path}` is {reading}, and {got} cannot be its uncertainty", span, "an uncertainty has the unit of a difference between two readings");
+
+    public static Problem SecondUncertainty(SourceSpan span, string path, string other) => Problem.Error(
+        "duplicate-uncertainty", $"`{other}` is the uncertainty of `{path}` already", span, "a reading has one uncertainty");
+
     public static Problem Circle(SourceSpan span, string loop) => Problem.Error(
         "formulas-in-a-circle", $"these quantities need one another: {loop}", span, "one of them must be computed from something else");
 

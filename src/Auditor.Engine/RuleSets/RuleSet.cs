@@ -1,4 +1,5 @@
 using Auditor.Documents;
+using Auditor.Engine.Adjustments;
 using Auditor.Engine.Installation;
 using Auditor.Formulas.Binding;
 using Auditor.Formulas.Subjects;
@@ -10,6 +11,7 @@ public sealed class RuleSet
 {
     private readonly QuantityDefinition[][] _quantities;
     private readonly Rule[][] _rulesByShape;
+    private readonly Dictionary<(SubjectShape Shape, int Reading), QuantityDefinition> _uncertainties;
 
     internal RuleSet(RuleSetTitle title, DesignSchema schema, FormulaWorld world, IReadOnlyList<Parameter> parameters,
         QuantityDefinition[][] quantities, IReadOnlyList<Rule> rules, IReadOnlyList<InputFile> files)
@@ -22,6 +24,8 @@ public sealed class RuleSet
         Files = files;
         _quantities = quantities;
         _rulesByShape = [.. schema.Shapes.All.Select(shape => rules.Where(rule => rule.Shape == shape).ToArray())];
+        _uncertainties = Quantities.Where(quantity => quantity.Uncertainty is not null)
+            .ToDictionary(quantity => (quantity.Shape, quantity.Uncertainty!.Reading.Index));
     }
 
     /// <summary>Name, edition and notice.</summary>
@@ -39,6 +43,9 @@ public sealed class RuleSet
     /// <summary>All rules, by id.</summary>
     public IReadOnlyList<Rule> Rules { get; }
 
+    /// <summary>What can be changed in a design, by id.</summary>
+    public IReadOnlyList<Adjustment> Adjustments { get; internal init; } = [];
+
     /// <summary>The files that it was read from.</summary>
     public IReadOnlyList<InputFile> Files { get; }
 
@@ -50,6 +57,9 @@ public sealed class RuleSet
 
     /// <summary>The definition of a quantity.</summary>
     public QuantityDefinition Quantity(SubjectShape shape, int slot) => _quantities[shape.Index][slot];
+
+    /// <summary>The quantity that is the uncertainty of an input as read; null where none is known.</summary>
+    public QuantityDefinition? UncertaintyOf(SubjectShape shape, InputSlot reading) => _uncertainties.GetValueOrDefault((shape, reading.Index));
 
     /// <summary>The rule of that id, present or former; null when there is none.</summary>
     public Rule? Rule(string id) => Rules.FirstOrDefault(rule => rule.Id == id) ?? Rules.FirstOrDefault(rule => rule.Formerly.Contains(id));

@@ -1,6 +1,7 @@
 using System.Security.Cryptography;
 using System.Text;
 using Auditor.Documents;
+using Auditor.Engine.Adjustments;
 using Auditor.Engine.Installation;
 using Auditor.Formulas.Binding;
 using Auditor.Formulas.Curves;
@@ -37,7 +38,7 @@ public sealed class RuleSetLoader
 
     private RuleSet? Compose(IReadOnlyList<SetFile> chain, Task<DesignSchema> schemaTask)
     {
-        var files = chain.Select(set => _reader.Read(set.Files(["tables", "curves", "sheets", "provisions"], _problems))).ToArray();
+        var files = chain.Select(set => _reader.Read(set.Files(["tables", "curves", "sheets", "provisions", "adjustments"], _problems))).ToArray();
         var schema = schemaTask.GetAwaiter().GetResult();
         var parameters = ParameterReader.Read(chain, _problems);
         var world = World(files, parameters);
@@ -47,7 +48,10 @@ public sealed class RuleSetLoader
         var quantities = sheets.Bind(world);
         new CircleCheck(quantities, _problems).Run();
         var rules = Rules(files, new RuleReader(schema.Shapes, world, _problems));
-        return _problems.HasErrors ? null : new RuleSet(Title(chain, files), schema, world, parameters, quantities, rules, Hashes(chain, files));
+        var adjustments = Adjustments(files, new AdjustmentReader(schema.Shapes, world, _problems));
+        return _problems.HasErrors
+            ? null
+            : new RuleSet(Title(chain, files), schema, world, parameters, quantities, rules, Hashes(chain, files)) { Adjustments = adjustments };
     }
 
     private FormulaWorld World(IReadOnlyList<RuleFile>[] files, IReadOnlyList<Parameter> parameters)
@@ -82,6 +86,24 @@ public sealed class RuleSetLoader
             }
         });
         return [.. rules.Values.Select(pair => pair.Rule).OrderBy(rule => rule.Id, StringComparer.Ordinal)];
+    }
+
+    private List<Adjustment> Adjustments(IReadOnlyList<RuleFile>[] files, AdjustmentReader reader)
+    {
+        var adjustments = new Dictionary<string, (Adjustment Adjustment, int Set)>();
+        Each(files, "adjustment", (file, set) =>
+        {
+            var id = file.Root.Scalar("adjustment")!;
+            if (adjustments.TryGetValue(id.Text, out var earlier) && earlier.Set == set)
+            {
+                _problems.Add(RuleMessages.SecondAdjustment(id.Span, id.Text, earlier.Adjustment.Node.Span.Source.Path));
+            }
+            else if (reader.Read(file) is { } adjustment)
+            {
+                adjustments[id.Text] = (adjustment, set);
+            }
+        });
+        return [.. adjustments.Values.Select(pair => pair.Adjustment).OrderBy(adjustment => adjustment.Id, StringComparer.Ordinal)];
     }
 
     private static void Each(IReadOnlyList<RuleFile>[] files, string kind, Action<RuleFile, int> action)

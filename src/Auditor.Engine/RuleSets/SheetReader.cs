@@ -14,6 +14,7 @@ namespace Auditor.Engine.RuleSets;
 internal sealed class SheetReader(Shapes shapes, Problems problems)
 {
     private readonly Dictionary<(SubjectShape, string), Declared> _declared = [];
+    private readonly UncertaintyReader _uncertainties = new(problems);
 
     /// <summary>Declares the quantities of a sheet.</summary>
     /// <param name="file">The sheet's file.</param>
@@ -62,8 +63,11 @@ internal sealed class SheetReader(Shapes shapes, Problems problems)
         return all;
     }
 
-    private static QuantityDefinition Define(Declared declared, Formula formula) => new(
-        declared.Shape, declared.Slot, declared.Node.Text("name")!, formula, ClauseReader.Read(declared.Node), declared.Node.Text("note") ?? "", declared.Sheet, declared.Node);
+    private QuantityDefinition Define(Declared declared, Formula formula) => new(
+        declared.Shape, declared.Slot, declared.Node.Text("name")!, formula, ClauseReader.Read(declared.Node), declared.Node.Text("note") ?? "", declared.Sheet, declared.Node)
+    {
+        Uncertainty = _uncertainties.Read(declared.Node, declared.Shape, declared.Slot),
+    };
 
     private (FormulaType Type, Unit? Unit)? TypeOf(MappingNode node)
     {

@@ -1,3 +1,4 @@
+using System.Numerics;
 using Auditor.Engine.Installation;
 
 namespace Auditor.Engine.Variation;
@@ -12,6 +13,7 @@ public sealed class Reach
         Inputs = inputs;
         _quantities = quantities;
         Rules = rules;
+        Size = quantities.Values.Sum(words => words.Sum(BitOperations.PopCount));
     }
 
     /// <summary>The rules that may come out otherwise when the input changes: subjects in the order of the design, then rules by id.</summary>
@@ -19,6 +21,12 @@ public sealed class Reach
 
     /// <summary>The input, and the groups that it lies in where the design gives nothing of them.</summary>
     internal IReadOnlyList<SubjectInput> Inputs { get; }
+
+    /// <summary>How many quantities it holds.</summary>
+    internal int Size { get; }
+
+    /// <summary>The subjects that have quantities in it, by their place in the design, with one bit for each quantity.</summary>
+    internal IReadOnlyDictionary<int, ulong[]> Quantities => _quantities;
 
     /// <summary>One bit for each quantity of a subject; null where none of them is reached.</summary>
     internal ulong[]? QuantitiesOf(DesignSubject subject) => _quantities.GetValueOrDefault(subject.Index);

@@ -11,6 +11,9 @@ namespace Auditor.Engine.Variation;
 /// </summary>
 public sealed class Variant
 {
+    /// <summary>Up to so many quantities are forgotten one by one when an input changes; beyond, all that was computed is.</summary>
+    private const int FewQuantities = 1000;
+
     private readonly Reach[] _reaches;
     private readonly VariantSubject?[] _subjects;
 
@@ -27,7 +30,7 @@ public sealed class Variant
     /// <summary>The inputs that may be changed, by number.</summary>
     public IReadOnlyList<SubjectInput> Inputs { get; }
 
-    /// <summary>Counts the changes: what was computed before the last one no longer holds.</summary>
+    /// <summary>What was computed in an earlier generation no longer holds.</summary>
     internal int Generation { get; private set; } = 1;
 
     /// <summary>Changes an input.</summary>
@@ -35,7 +38,7 @@ public sealed class Variant
     /// <param name="value">The value to take; missing for an input that is not given.</param>
     public void Set(int input, in Value value)
     {
-        Generation++;
+        Forget(_reaches[input]);
         foreach (var each in _reaches[input].Inputs)
         {
             // What comes after the input itself are its groups.
@@ -46,7 +49,7 @@ public sealed class Variant
     /// <summary>Takes an input as the design states it again.</summary>
     public void Reset(int input)
     {
-        Generation++;
+        Forget(_reaches[input]);
         foreach (var each in _reaches[input].Inputs)
         {
             At(each.Subject).Restore(each.Slot.Index);
@@ -61,6 +64,20 @@ public sealed class Variant
 
     internal VariantSubject At(DesignSubject subject) =>
         _subjects[subject.Index] ??= new VariantSubject(subject, this, ReachedOf(subject));
+
+    private void Forget(Reach reach)
+    {
+        if (reach.Size > FewQuantities)
+        {
+            Generation++;
+            return;
+        }
+
+        foreach (var (subject, quantities) in reach.Quantities)
+        {
+            _subjects[subject]?.Forget(quantities);
+        }
+    }
 
     private ulong[]? ReachedOf(DesignSubject subject)
     {

@@ -1,3 +1,4 @@
+using System.Numerics;
 using Auditor.Engine.Installation;
 using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Values;
@@ -17,7 +18,6 @@ internal sealed class VariantSubject : ISubject
     private readonly List<(int Slot, Value Value)> _overrides = [];
     private VariantSubject[]?[]? _collections;
 
-    /// <summary>Makes the subject of a variant.</summary>
     /// <summary>Makes the subject of a variant.</summary>
     /// <param name="subject">The subject in the design.</param>
     /// <param name="variant">The variant.</param>
@@ -58,7 +58,7 @@ internal sealed class VariantSubject : ISubject
             return _base.Quantity(slot);
         }
 
-        // A stamp is the generation in which the quantity was computed, or its negative while that is being done.
+        // A stamp is the generation in which the quantity was computed, or its negative while that is being done; 0 once it is forgotten.
         var generation = _variant.Generation;
         if (_stamps[slot] == generation)
         {
@@ -84,6 +84,19 @@ internal sealed class VariantSubject : ISubject
     {
         _collections ??= new VariantSubject[_base.Shape.Collections.Count][];
         return _collections[index] ??= [.. _base.Collection(index).Select(item => _variant.At((DesignSubject)item))];
+    }
+
+    /// <summary>Forgets the quantities that a change reaches.</summary>
+    /// <param name="quantities">One bit for each quantity.</param>
+    public void Forget(ulong[] quantities)
+    {
+        for (var word = 0; word < quantities.Length; word++)
+        {
+            for (var bits = quantities[word]; bits != 0; bits &= bits - 1)
+            {
+                _stamps[(word * BitsOfWord) + BitOperations.TrailingZeroCount(bits)] = 0;
+            }
+        }
     }
 
     public void Override(int slot, in Value value)

@@ -67,6 +67,26 @@ public sealed class Lookup(string name, string about, IReadOnlyList<LookupKey> k
     public (double Key, TableCell Cell)? RoundUp(double number) =>
         _root.NextUp(number) is { } next && _root.At(next)?.Cell is { } cell ? (next.Number, cell) : null;
 
+    /// <summary>The series that the last key runs through: its tabulated numbers in coherent units, ascending, where the keys before it are as given.</summary>
+    /// <param name="before">One value for each key but the last, none of them missing.</param>
+    /// <returns>The numbers; none where nothing is tabulated for those keys.</returns>
+    public IReadOnlyList<double> Series(IReadOnlyList<Value> before)
+    {
+        var level = _root;
+        foreach (var key in before)
+        {
+            var next = key.Kind == ValueKind.Text ? level.At(KeyValue.Of(key.Text)) : level.At(key.Number);
+            if (next is null)
+            {
+                return [];
+            }
+
+            level = next;
+        }
+
+        return [.. level.Numbers()];
+    }
+
     /// <summary>All cells, in the order of their keys.</summary>
     public IEnumerable<(IReadOnlyList<object> Keys, TableCell Cell)> Cells() => _root.Cells([]);
 }

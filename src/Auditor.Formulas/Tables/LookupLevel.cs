@@ -35,6 +35,9 @@ internal sealed class LookupLevel
         return NextUp(number) is { } next && Comparison.Same(next.Number, number) ? At(next) : null;
     }
 
+    /// <summary>The tabulated numbers that lead to a figure, ascending.</summary>
+    public IEnumerable<double> Numbers() => _ordered.Where(key => _next[key].Cell is { IsEmpty: false }).Select(key => key.Number);
+
     public void Close()
     {
         _ordered = [.. _next.Keys.Where(key => key.Word is null).OrderBy(key => key.Number)];

@@ -9,7 +9,7 @@ internal enum JUnitOutcome
     /// <summary>It conforms.</summary>
     Passed,
 
-    /// <summary>A requirement is not met.</summary>
+    /// <summary>A requirement is not met, or not proven to be met where guarded acceptance asks for it.</summary>
     Failure,
 
     /// <summary>A requirement cannot be judged: that may never look like a pass.</summary>
@@ -25,7 +25,7 @@ internal static class JUnitOutcomes
     public static JUnitOutcome Outcome(this Finding finding) => (finding.Verdict, finding.Rule.Provision) switch
     {
         (Verdict.Conforms, _) => JUnitOutcome.Passed,
-        (Verdict.Nonconforming, Provision.Requirement) => JUnitOutcome.Failure,
+        (Verdict.Nonconforming or Verdict.Unproven, Provision.Requirement) => JUnitOutcome.Failure,
         (Verdict.Undetermined, Provision.Requirement) => JUnitOutcome.Error,
         _ => JUnitOutcome.Skipped,
     };

@@ -86,7 +86,8 @@ internal static class FindingJson
             output.Null("limit");
         }
 
-        output.Object("margin", () => Margin(output, judgement.Margin, check.Unit));
+        output.Object("margin", () => Margin(output, finding, check.Unit));
+        ToleranceJson.Write(output, finding);
     }
 
     private static void Figure(JsonOutput output, in Value value, Unit? unit)
@@ -111,14 +112,15 @@ internal static class FindingJson
         output.Text("unit", check.Unit?.Symbol);
     }
 
-    private static void Margin(JsonOutput output, Margin? margin, Unit? unit)
+    private static void Margin(JsonOutput output, Finding finding, Unit? unit)
     {
+        var margin = finding.Judgement.Margin;
         // The distance between two temperatures is a difference.
         var distance = unit is { Dimension.IsTemperature: true } ? Kelvin : unit;
         output.Number("relative", margin?.Relative);
         output.Number("absolute", margin is null ? null : distance!.FromCoherent(margin.Absolute));
         output.Text("unit", margin is null ? null : distance!.Symbol);
-        output.Null("worstCase");
+        output.Number("worstCase", finding.WorstCase?.Margin?.Relative);
     }
 
     private static string Relation(CheckKind how) => how switch

@@ -43,7 +43,7 @@ internal static class HeadJson
     private static void Basis(JsonOutput output, AuditResult result) => output.Object("basis", () =>
     {
         output.Text("stage", AuditBasis.StageOf(result.Design) ?? AuditBasis.UsualStage);
-        output.Text("decision", AuditBasis.Decision);
+        output.Text("decision", AuditBasis.Word(result.Decision));
         output.Text("asOf", result.AsOf is { } day ? DayText.Of(day) : null);
     });
 
@@ -70,8 +70,7 @@ internal static class HeadJson
     {
         output.Whole("conforms", result.Count(Verdict.Conforms));
         output.Whole("nonconforming", result.Count(Verdict.Nonconforming));
-        // Simple acceptance leaves nothing unproven.
-        output.Whole("unproven", 0);
+        output.Whole("unproven", result.Count(Verdict.Unproven));
         output.Whole("undetermined", result.Count(Verdict.Undetermined));
         output.Whole("departed", result.Count(Verdict.Departed));
         output.Whole("onAssumption", result.Findings.Count(finding => finding.Verdict == Verdict.Conforms && finding.OnAssumption));

@@ -34,6 +34,8 @@ internal sealed class FindingReader(
             Margin = relative.Length == 0 ? absolute : $"{relative} ({absolute})",
             RelativeMargin = relative,
             AbsoluteMargin = absolute,
+            WorstMargin = finding.WorstCase?.Margin?.Relative is { } worst ? ValueText.ShowMargin(worst) : "",
+            WithinTolerances = ToleranceLines.Of(finding),
             Sentence = finding.Message,
             Why = rule.Why,
             PutRightBy = rule.PutRightBy,

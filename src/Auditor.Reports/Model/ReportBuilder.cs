@@ -1,5 +1,6 @@
 using Auditor.Engine.Departures;
 using Auditor.Engine.Findings;
+using Auditor.Engine.Guarded;
 using Auditor.Engine.Registers;
 using Auditor.Engine.RuleSets;
 using Auditor.Formulas.Tables;
@@ -42,7 +43,7 @@ internal sealed class ReportBuilder
             Basis = Basis(),
             RuleSet = RuleSet(),
             Inputs = _places.Inputs,
-            Counts = [.. VerdictOrder.GravestFirst.Select(Count)],
+            Counts = [.. VerdictOrder.GravestFirst.Where(verdict => verdict != Verdict.Unproven || _result.Decision == Decision.Guarded).Select(Count)],
             Action = [.. findings.Where(pair => pair.Verdict == Verdict.Nonconforming && pair.Shown.IsRequirement).Select(pair => pair.Shown)],
             Groups = [.. VerdictOrder.GravestFirst
                 .Select(verdict => new FindingGroup(verdict.Word(), [.. findings.Where(pair => pair.Verdict == verdict).Select(pair => pair.Shown)]))
@@ -65,7 +66,7 @@ internal sealed class ReportBuilder
     }
 
     private ReportBasis Basis() => new(
-        _places.Design, AuditBasis.StageOf(_result.Design) ?? "not stated", $"{AuditBasis.Decision} acceptance: values as stated",
+        _places.Design, AuditBasis.StageOf(_result.Design) ?? "not stated", AuditBasis.Sentence(_result.Decision),
         _result.AsOf is { } day ? DayText.Of(day) : "");
 
     private ReportRuleSet RuleSet()

@@ -48,6 +48,12 @@ public sealed record ReportFinding
     /// <summary>Distance to the limit in the unit of the value.</summary>
     public required string AbsoluteMargin { get; init; }
 
+    /// <summary>Margin in the worst case within the tolerances, as a share of the limit, with sign.</summary>
+    public required string WorstMargin { get; init; }
+
+    /// <summary>What tolerances make of it, one line each, the greatest effect first; empty where they make no difference.</summary>
+    public required IReadOnlyList<string> WithinTolerances { get; init; }
+
     /// <summary>The sentence.</summary>
     public required string Sentence { get; init; }
 

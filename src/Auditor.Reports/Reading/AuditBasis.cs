@@ -1,3 +1,4 @@
+using Auditor.Engine.Guarded;
 using Auditor.Engine.Installation;
 using Auditor.Formulas.Values;
 
@@ -9,8 +10,13 @@ internal static class AuditBasis
     /// <summary>The stage that a design without one is taken to be at.</summary>
     public const string UsualStage = "design";
 
-    /// <summary>The decision rule: values are judged as stated.</summary>
-    public const string Decision = "simple";
+    /// <summary>The word for a decision rule in files.</summary>
+    public static string Word(Decision decision) => decision == Decision.Guarded ? "guarded" : "simple";
+
+    /// <summary>A decision rule in words.</summary>
+    public static string Sentence(Decision decision) => decision == Decision.Guarded
+        ? "guarded acceptance: values must keep their limits wherever within the tolerances the true inputs lie"
+        : "simple acceptance: values as stated";
 
     /// <summary>Stage of the job; null where the design states none.</summary>
     public static string? StageOf(Design design) =>

@@ -6,5 +6,5 @@ namespace Auditor.Reports.Reading;
 internal static class VerdictOrder
 {
     /// <summary>All verdicts, the gravest first.</summary>
-    public static IReadOnlyList<Verdict> GravestFirst { get; } = [Verdict.Nonconforming, Verdict.Undetermined, Verdict.Departed, Verdict.Conforms];
+    public static IReadOnlyList<Verdict> GravestFirst { get; } = [Verdict.Nonconforming, Verdict.Unproven, Verdict.Undetermined, Verdict.Departed, Verdict.Conforms];
 }

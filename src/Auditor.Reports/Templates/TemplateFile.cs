@@ -12,6 +12,9 @@ public sealed record TemplateFile(string FullPath, string DisplayPath)
     public static TemplateFile Shipped(ReportFormat format) =>
         ShippedAs(format.TemplateName ?? throw new ArgumentException($"no template writes {format.Ending}", nameof(format)));
 
+    /// <summary>The shipped template of the report on limits, in Markdown.</summary>
+    public static TemplateFile ShippedLimits { get; } = ShippedAs("limits.scriban-md");
+
     /// <summary>The template at a path that the caller gives.</summary>
     public static TemplateFile At(string path) => new(Path.GetFullPath(path), path.Replace('\\', '/'));
 

@@ -1,0 +1,80 @@
+using Auditor.Cli.Commands;
+using Auditor.Documents;
+using Auditor.Engine.Evaluation;
+using Auditor.Engine.Installation;
+using Auditor.Engine.RuleSets;
+using Serilog;
+
+namespace Auditor.Cli;
+
+/// <summary>Reads designs with the rule set that each asks for; a rule set that several share is read once.</summary>
+/// <param name="ruleSet">Rule set named by the caller; null to go by each design.</param>
+/// <param name="problems">Receives everything that stands in the way.</param>
+internal sealed class Designs(string? ruleSet, Problems problems)
+{
+    private readonly Dictionary<string, RuleSet?> _sets = [];
+
+    /// <summary>Reads a design; null, with problems added, when that cannot be done.</summary>
+    public Design? Read(string path) => Read(Path.GetFullPath(path), path, Environment.CurrentDirectory);
+
+    /// <summary>Reads a design that lies elsewhere than it is shown; null, with problems added, when that cannot be done.</summary>
+    /// <param name="fullPath">Where it lies.</param>
+    /// <param name="path">The path to show.</param>
+    /// <param name="within">Full path of the folder that its rule set may lie in, besides its own folder.</param>
+    public Design? Read(string fullPath, string path, string within)
+    {
+        var file = DesignFile.Read(fullPath, path, problems);
+        Log.Information("Read {Design}", path);
+        if (file is null || RulesFor(file, Path.GetDirectoryName(fullPath)!, within) is not { } rules)
+        {
+            return null;
+        }
+
+        var own = new Problems();
+        rules.Schema.Validation.Validate(file.Root, own);
+        var design = DesignBuilder.Build(file, new Evaluator(rules), own);
+        foreach (var problem in own.All)
+        {
+            problems.Add(problem);
+        }
+
+        return own.HasErrors ? null : design;
+    }
+
+    private RuleSet? RulesFor(DesignFile file, string folder, string within)
+    {
+        if (ruleSet is not null)
+        {
+            return Load(ruleSet, Environment.CurrentDirectory, null);
+        }
+
+        if (file.RuleSet is not { } named)
+        {
+            return Load(Shipped.DefaultSet, Environment.CurrentDirectory, null);
+        }
+
+        var asked = Path.GetFullPath(Path.Combine(folder, named.Text));
+        if (named.Text.Contains('/') && !IsBelow(asked, folder) && !IsBelow(asked, within))
+        {
+            problems.Add(CommandMessages.UnreachableRuleSet(named.Span, named.Text));
+            return null;
+        }
+
+        return Load(named.Text, folder, named.Span);
+    }
+
+    private RuleSet? Load(string name, string folder, SourceSpan? asked)
+    {
+        var key = name.Contains('/') || name.EndsWith(".yaml", StringComparison.Ordinal) ? Path.GetFullPath(Path.Combine(folder, name)) : name;
+        if (!_sets.TryGetValue(key, out var rules))
+        {
+            rules = RuleSetLoader.Load(Shipped.Rules, name, folder, asked, problems);
+            _sets.Add(key, rules);
+            Log.Information("Read rule set {RuleSet}", name);
+        }
+
+        return rules;
+    }
+
+    private static bool IsBelow(string path, string folder) => path.StartsWith(folder.TrimEnd('/') + "/", StringComparison.Ordinal);
+}

@@ -51,7 +51,8 @@ public sealed class FindingChange
     private static int Gravity(RevisionFinding? finding) => finding switch
     {
         null => 0,
-        { Verdict: Verdict.Nonconforming } => 4,
+        { Verdict: Verdict.Nonconforming } => 5,
+        { Verdict: Verdict.Unproven } => 4,
         { Verdict: Verdict.Undetermined } => 3,
         { Verdict: Verdict.Departed } => 2,
         { OnAssumption: true } => 1,

@@ -24,6 +24,8 @@ internal static class FindingMoves
         (Verdict.Undetermined, Verdict.Undetermined) => Open(before!, after!),
         (_, Verdict.Undetermined) => FindingChangeKind.Undetermined,
         var (earlier, later) when earlier == later => Broken(before!, after!),
+        (Verdict.Unproven, Verdict.Nonconforming) => FindingChangeKind.Worse,
+        (Verdict.Nonconforming, Verdict.Unproven) => FindingChangeKind.Better,
         (_, Verdict.Departed) => FindingChangeKind.Accepted,
         _ => FindingChangeKind.New,
     };

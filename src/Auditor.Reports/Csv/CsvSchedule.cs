@@ -32,7 +32,7 @@ public static class CsvSchedule
         return stream.ToArray();
     }
 
-    private static IEnumerable<string> Headings(ScheduleTable table) => ["Circuit", "Name", .. table.Headings, "Verdict", "Least margin in %", "Rule"];
+    private static IEnumerable<string> Headings(ScheduleTable table) => ["Circuit", "Name", .. table.Headings, "Verdict", "Least margin in %", "Rule", "Worst within tolerances in %"];
 
     private static void Record(CsvWriter csv, ScheduleRow row)
     {
@@ -46,6 +46,7 @@ public static class CsvSchedule
         csv.WriteField(row.Verdict);
         Margin(csv, row.Margin);
         csv.WriteField(row.MarginRule);
+        Margin(csv, row.WorstMargin);
         csv.EndRecord();
     }
 

@@ -53,6 +53,7 @@ internal sealed class JUnitCases(XmlWriter xml, Places places)
     {
         var rule = finding.Rule;
         var margin = finding.Judgement.Margin?.Relative is { } relative ? ValueText.ShowMargin(relative) : "";
+        var worst = finding.WorstCase?.Margin?.Relative is { } least ? ValueText.ShowMargin(least) : "";
         (string Label, string Text)[] lines =
         [
             ("finding", finding.Message),
@@ -61,6 +62,7 @@ internal sealed class JUnitCases(XmlWriter xml, Places places)
             ("value", finding.ValueShown),
             ("limit", finding.LimitShown),
             ("margin", margin),
+            ("margin in the worst case within the tolerances", worst),
             ("where", places.Text(finding.Location)),
             ("can be put right by", string.Join(", ", rule.PutRightBy)),
         ];

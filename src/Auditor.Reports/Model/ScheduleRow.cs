@@ -7,4 +7,6 @@ namespace Auditor.Reports.Model;
 /// <param name="Verdict">The gravest verdict of the circuit and its legs; empty where no rule applied.</param>
 /// <param name="Margin">The least relative margin of the circuit and its legs; empty where nothing was measured.</param>
 /// <param name="MarginRule">The rule that has it; empty where nothing was measured.</param>
-public sealed record ScheduleRow(string Key, string Name, IReadOnlyList<string> Cells, string Verdict, string Margin, string MarginRule);
+/// <param name="WorstMargin">The least relative margin that they can have within the tolerances; empty where no tolerance makes a difference.</param>
+public sealed record ScheduleRow(
+    string Key, string Name, IReadOnlyList<string> Cells, string Verdict, string Margin, string MarginRule, string WorstMargin);

@@ -88,6 +88,7 @@ internal sealed class ResultSarif(
         output.TextIfAny("value", finding.ValueShown);
         output.TextIfAny("limit", finding.LimitShown);
         output.TextIfAny("margin", finding.Judgement.Margin?.Relative is { } relative ? ValueText.ShowMargin(relative) : null);
+        output.TextIfAny("worstMargin", finding.WorstCase?.Margin?.Relative is { } worst ? ValueText.ShowMargin(worst) : null);
         output.Flag("onAssumption", finding.OnAssumption);
         output.Flag("fromMemory", finding.FromMemory);
         output.Texts("missing", (finding.Judgement.Absences?.Items ?? []).Select(absence => absence.ToString()));

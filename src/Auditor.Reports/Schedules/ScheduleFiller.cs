@@ -26,10 +26,13 @@ internal sealed class ScheduleFiller(AuditResult result, Schedule schedule)
         return new ScheduleRow(
             circuit.Key, SubjectText.OwnName(circuit) ?? "", [.. schedule.Columns.Select(column => Cell(circuit, column))],
             findings.Length == 0 ? "" : Gravest(findings).Word(),
-            governing is null ? "" : ValueText.ShowMargin(Margin(governing)!.Value), governing?.Rule.Id ?? "");
+            governing is null ? "" : ValueText.ShowMargin(Margin(governing)!.Value), governing?.Rule.Id ?? "",
+            findings.Min(Worst) is { } worst ? ValueText.ShowMargin(worst) : "");
     }
 
     private static double? Margin(Finding finding) => finding.Judgement.Margin?.Relative;
+
+    private static double? Worst(Finding finding) => finding.WorstCase?.Margin?.Relative;
 
     private static Verdict Gravest(Finding[] findings) =>
         VerdictOrder.GravestFirst.First(verdict => Array.Exists(findings, finding => finding.Verdict == verdict));

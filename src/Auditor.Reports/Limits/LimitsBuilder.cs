@@ -7,6 +7,8 @@ namespace Auditor.Reports.Limits;
 /// <summary>Builds the model of a report on limits.</summary>
 internal sealed class LimitsBuilder(LimitResult result)
 {
+    private const string TestTemperature = "basis.test_temperature";
+
     public LimitsModel Build()
     {
         var design = result.Design;
@@ -20,6 +22,7 @@ internal sealed class LimitsBuilder(LimitResult result)
             Design = places.Design,
             RuleSet = new ReportRuleSet(title.Id, title.Text, title.Edition, title.Notice, title.Chain, title.Sha256, design.Evaluator.Rules.Rules.Count),
             Inputs = places.Inputs,
+            TestTemperature = design.Installation.Shape.Input(TestTemperature) is { } slot ? LimitText.Value(design.Installation.Input(slot.Index), slot) : "",
             Groups = [.. rows.GroupBy(pair => pair.Input.Subject)
                 .Select(group => new LimitsGroup(group.Key.Key, SubjectText.Label(group.Key), [.. group.Select(pair => pair.Row)]))],
             Site = [.. rows.Where(pair => pair.Input.Adjustment.IsForSite).Select(pair => pair.Row).Where(IsBounded)],

@@ -20,6 +20,9 @@ public sealed record LimitsModel
     /// <summary>The files of the design that were read, by path.</summary>
     public required IReadOnlyList<InputFile> Inputs { get; init; }
 
+    /// <summary>The temperature of conductors at which readings are taken; empty where the design states none.</summary>
+    public required string TestTemperature { get; init; }
+
     /// <summary>The subjects with adjustable inputs, in the order of the design.</summary>
     public required IReadOnlyList<LimitsGroup> Groups { get; init; }
 

@@ -13,8 +13,10 @@ public class CsvScheduleTests
     {
         var records = Read(Write(Sheds.Audit("garden")));
 
-        Assert.Equal(["Circuit", "Name", "Device", "Conductors", "Ib", "Iz", "Verdict", "Least margin in %", "Rule"], records[0]);
-        Assert.Equal(["A/2", "Pump", "EN 60898 C 20 A", "2.5 mm² / 4 mm²", "25 A", "24 A", "nonconforming", "-10.0", "run-sensible"], records[2]);
+        Assert.Equal(["Circuit", "Name", "Device", "Conductors", "Ib", "Iz", "Verdict", "Least margin in %", "Rule", "Worst within tolerances in %"], records[0]);
+        Assert.Equal(["A/2", "Pump", "EN 60898 C 20 A", "2.5 mm² / 4 mm²", "25 A", "24 A", "nonconforming", "-10.0", "run-sensible", ""], records[2]);
+        // A/1 is 12 m ± 2 m long of at most 40 m: 14 m leave 65 %.
+        Assert.Equal("65.0", records[1][^1]);
         Assert.Equal(5, records.Count);
     }
 

@@ -1,5 +1,4 @@
 using Auditor.Documents;
-using Auditor.Engine.Findings;
 
 namespace Auditor.Reports.Json;
 
@@ -19,12 +18,6 @@ internal static class FindingsCheck
             if (!subjects.Contains(subject.Text))
             {
                 problems.Add(FindingsMessages.UnknownSubject(subject.Span, subject.Text));
-            }
-
-            var verdict = finding.Scalar("verdict")!;
-            if (VerdictWords.Find(verdict.Text) is null)
-            {
-                problems.Add(FindingsMessages.UnknownVerdict(verdict.Span, verdict.Text));
             }
         }
     }

@@ -12,7 +12,4 @@ internal static class FindingsMessages
 
     public static Problem UnknownSubject(SourceSpan span, string subject) => Problem.Error(
         "findings-unknown-subject", $"this file does not list the subject {ProblemText.Quote(subject)}", span, Help);
-
-    public static Problem UnknownVerdict(SourceSpan span, string verdict) => Problem.Error(
-        "findings-unknown-verdict", $"this program gives no verdict {ProblemText.Quote(verdict)}", span, Help);
 }

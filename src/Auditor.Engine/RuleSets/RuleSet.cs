@@ -12,16 +12,17 @@ public sealed class RuleSet
     private readonly Rule[][] _rulesByShape;
 
     internal RuleSet(RuleSetTitle title, DesignSchema schema, FormulaWorld world, IReadOnlyList<Parameter> parameters,
-        QuantityDefinition[][] quantities, IReadOnlyList<Rule> rules, IReadOnlyList<InputFile> files)
+        QuantityDefinition[][] quantities, IReadOnlyList<Rule> rules, IReadOnlyList<Rule> recordRules, IReadOnlyList<InputFile> files)
     {
         Title = title;
         Schema = schema;
         World = world;
         Parameters = parameters;
         Rules = rules;
+        RecordRules = recordRules;
         Files = files;
         _quantities = quantities;
-        _rulesByShape = [.. schema.Shapes.All.Select(shape => rules.Where(rule => rule.Shape == shape).ToArray())];
+        _rulesByShape = [.. schema.Shapes.All.Select(shape => AllRules.Where(rule => rule.Shape == shape).ToArray())];
     }
 
     /// <summary>Name, edition and notice.</summary>
@@ -36,8 +37,14 @@ public sealed class RuleSet
     /// <summary>Parameters, by slot number.</summary>
     public IReadOnlyList<Parameter> Parameters { get; }
 
-    /// <summary>All rules, by id.</summary>
+    /// <summary>The rules that the set holds, by id.</summary>
     public IReadOnlyList<Rule> Rules { get; }
+
+    /// <summary>The rules of the program about the record of an audit, by id: they come with every set, and none changes them.</summary>
+    public IReadOnlyList<Rule> RecordRules { get; }
+
+    /// <summary>The rules of the set, then those about the record.</summary>
+    public IEnumerable<Rule> AllRules => Rules.Concat(RecordRules);
 
     /// <summary>The files that it was read from.</summary>
     public IReadOnlyList<InputFile> Files { get; }
@@ -52,5 +59,5 @@ public sealed class RuleSet
     public QuantityDefinition Quantity(SubjectShape shape, int slot) => _quantities[shape.Index][slot];
 
     /// <summary>The rule of that id, present or former; null when there is none.</summary>
-    public Rule? Rule(string id) => Rules.FirstOrDefault(rule => rule.Id == id) ?? Rules.FirstOrDefault(rule => rule.Formerly.Contains(id));
+    public Rule? Rule(string id) => AllRules.FirstOrDefault(rule => rule.Id == id) ?? AllRules.FirstOrDefault(rule => rule.Formerly.Contains(id));
 }

@@ -15,7 +15,8 @@ public class OwnTemplateTests
 
         Assert.StartsWith("# Three sheds in one garden\n", report, StringComparison.Ordinal);
         Assert.Contains(
-            "- nonconforming: 4 `load-within-capacity` `run-sensible` `air-not-too-cold` `device-known`\n", report, StringComparison.Ordinal);
+            "- nonconforming: 8 `load-within-capacity` `run-sensible` `air-not-too-cold` `device-known` `record-departure-needed` `record-departure-permitted` `record-departure-in-date` `record-departure-matched`\n",
+            report, StringComparison.Ordinal);
         Assert.Contains("- departed: 1 `bonding-enough`\n", report, StringComparison.Ordinal);
     }
 

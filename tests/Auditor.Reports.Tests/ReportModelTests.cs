@@ -10,16 +10,19 @@ public class ReportModelTests
     public void Every_verdict_is_counted_by_provision() =>
         Assert.Equal(
             [
-                new VerdictCount("nonconforming", 3, 1, 4, 0),
+                new VerdictCount("nonconforming", 6, 2, 8, 0),
                 new VerdictCount("undetermined", 1, 1, 2, 0),
                 new VerdictCount("departed", 1, 0, 1, 0),
-                new VerdictCount("conforms", 11, 2, 13, 1),
+                new VerdictCount("conforms", 19, 3, 22, 1),
             ],
             _garden.Counts);
 
     [Fact]
     public void Broken_requirements_need_action_in_the_order_of_the_design() =>
-        Assert.Equal(["load-within-capacity:A/2", "air-not-too-cold:A/2/leg 2", "device-known:A/3"], _garden.Action.Select(finding => finding.Key));
+        Assert.Equal(
+            ["load-within-capacity:A/2", "air-not-too-cold:A/2/leg 2", "device-known:A/3", "record-departure-permitted:departure/device-known:A/3",
+                "record-departure-in-date:departure/load-within-capacity:A/2", "record-departure-matched:departure/no-such-rule:A/9"],
+            _garden.Action.Select(finding => finding.Key));
 
     [Fact]
     public void Groups_go_from_the_gravest_verdict_to_the_best() =>
@@ -86,7 +89,7 @@ public class ReportModelTests
             [
                 "in force",
                 "not needed: nothing nonconforming to accept",
-                "refused: the rule allows no departure",
+                "forbidden: the rule allows no departure",
                 "expired: its last day is past",
                 "matches no finding of this audit",
             ],

@@ -35,7 +35,7 @@ internal sealed class Summary(IAnsiConsole console)
     private static string Counts(AuditResult result)
     {
         var assumed = result.Findings.Count(finding => finding.Verdict == Verdict.Conforms && finding.OnAssumption);
-        return $"{result.Findings.Count} findings on {result.Design.Subjects.Count} subjects: {result.Count(Verdict.Nonconforming)} nonconforming, " +
+        return $"{result.Findings.Count} findings on {result.Subjects.Count} subjects: {result.Count(Verdict.Nonconforming)} nonconforming, " +
             (result.Decision == Decision.Guarded ? $"{result.Count(Verdict.Unproven)} unproven, " : "") +
             $"{result.Count(Verdict.Undetermined)} undetermined, {result.Count(Verdict.Departed)} departed, {result.Count(Verdict.Conforms)} conforming ({assumed} on an assumption)";
     }

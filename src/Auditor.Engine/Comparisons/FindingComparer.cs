@@ -82,7 +82,17 @@ internal sealed class FindingComparer(
         if (earlier is null || later is null)
         {
             var (subject, isLater) = later is null ? (earlier!, false) : (later, true);
+            if (subject.IsOnRecord)
+            {
+                return (MovedBy.Departure, ChangeBits.None);
+            }
+
             return (MovedBy.Design, index is null ? ChangeBits.None : OfWhole(subject, isLater));
+        }
+
+        if (later.IsOnRecord)
+        {
+            return (MovedBy.Departure, ChangeBits.None);
         }
 
         var ruleBefore = one?.Rule ?? names.BeforeOf(other!.Rule);
@@ -107,7 +117,7 @@ internal sealed class FindingComparer(
     }
 
     private static Dictionary<string, Rule> ById(Revision revision) =>
-        revision.Audit?.Rules.Rules.ToDictionary(rule => rule.Id, StringComparer.Ordinal) ?? [];
+        revision.Audit?.Rules.AllRules.ToDictionary(rule => rule.Id, StringComparer.Ordinal) ?? [];
 
     /// <summary>What must have moved a margin when nobody knows what it was computed from: where only one thing differs, that one.</summary>
     private static MovedBy ByElimination(Revision before, Revision after, RuleSetChange rules)

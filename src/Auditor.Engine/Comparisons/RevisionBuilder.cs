@@ -18,7 +18,7 @@ internal sealed class RevisionBuilder(string name, AuditResult audit)
         Mark = _file.Root.Mapping("project")?.Text("revision") ?? "",
         Inputs = [.. _file.Inputs.Select(input => input with { Path = _file.Shown(input.Path) }).OrderBy(input => input.Path, StringComparer.Ordinal)],
         Rules = Rules(audit.Rules),
-        Subjects = [.. audit.Design.Subjects.Select(Of)],
+        Subjects = [.. audit.Subjects.Select(Of)],
         Findings = [.. audit.Findings.Select(Of)],
         Departures = [.. audit.Departures.Select(Of)],
         Audit = audit,
@@ -28,11 +28,11 @@ internal sealed class RevisionBuilder(string name, AuditResult audit)
         rules.Title.Id, rules.Title.Text, rules.Title.Edition, rules.Title.Sha256,
         [.. rules.Parameters.Select(parameter => new RevisionParameter(
             parameter.Id, parameter.About, Figure.Of(parameter.Value, parameter.Slot.Unit)! with { Text = parameter.Text }))],
-        [.. rules.Rules.Select(rule => new RevisionRule(rule.Id, rule.Title, rule.Formerly))]);
+        [.. rules.AllRules.Select(rule => new RevisionRule(rule.Id, rule.Title, rule.Formerly))]);
 
     private RevisionSubject Of(DesignSubject subject) => new(subject.Key, subject.Shape.Name, subject.Node.Text("name"), subject.Parent?.Key)
     {
-        Place = PlaceOf(FindingPlace.OfSubject(subject)),
+        Place = PlaceOf(subject.Place),
         Stated = [.. StatedInput.Of(subject).Select(input => new RevisionInput(
             input.Slot.Path, input.Text, input.From, input.Slot.Type.Kind, PlaceOf(input.Span)))],
         Source = subject,
@@ -65,7 +65,7 @@ internal sealed class RevisionBuilder(string name, AuditResult audit)
 
     private RevisionDeparture Of(Departure departure) => new(
         departure.Rule, departure.Subject, departure.Reason, departure.AgreedBy, Day(departure.Date),
-        departure.Expires is { } last ? Day(last) : null, departure.State, PlaceOf(departure.Span));
+        departure.Until is { } last ? Day(last) : null, departure.State, PlaceOf(departure.Span));
 
     private Place PlaceOf(SourceSpan span)
     {

@@ -8,8 +8,8 @@ namespace Auditor.Engine.Comparisons;
 /// <param name="Reason">Why it is acceptable.</param>
 /// <param name="AgreedBy">Who agreed.</param>
 /// <param name="Date">When, as year-month-day.</param>
-/// <param name="Expires">Last day on which it holds, as year-month-day; null for no end.</param>
+/// <param name="Until">Last day on which it holds, as year-month-day; null for no end.</param>
 /// <param name="State">What became of it.</param>
 /// <param name="Place">Where it stands; null where a findings file does not tell.</param>
 public sealed record RevisionDeparture(
-    string Rule, string Subject, string Reason, string AgreedBy, string Date, string? Expires, DepartureState State, Place? Place);
+    string Rule, string Subject, string Reason, string AgreedBy, string Date, string? Until, DepartureState State, Place? Place);

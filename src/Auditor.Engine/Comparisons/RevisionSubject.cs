@@ -9,6 +9,9 @@ namespace Auditor.Engine.Comparisons;
 /// <param name="parent">Key of the subject that it belongs to or is fed from; null for the installation.</param>
 public sealed class RevisionSubject(string key, string kind, string? name, string? parent)
 {
+    /// <summary>Kind of a departure on record.</summary>
+    internal const string Departure = "departure";
+
     private const string BondingPrefix = "bonding/";
 
     /// <summary>Stable key.</summary>
@@ -29,8 +32,11 @@ public sealed class RevisionSubject(string key, string kind, string? name, strin
     /// <summary>What the design states of it, by path; null where a findings file does not tell.</summary>
     public IReadOnlyList<RevisionInput>? Stated { get; init; }
 
+    /// <summary>Whether it is no part of the installation but on record about the audit: such subjects are compared on their own.</summary>
+    public bool IsOnRecord => Kind == Departure;
+
     /// <summary>Its key without that of what it belongs to: the id of a board or circuit, what a bonding conductor leads to.</summary>
-    public string Id => Kind == "bonding" && Key.StartsWith(BondingPrefix, StringComparison.Ordinal)
+    public string Id => IsOnRecord ? Key : Kind == "bonding" && Key.StartsWith(BondingPrefix, StringComparison.Ordinal)
         ? Key[BondingPrefix.Length..]
         : Key[(Key.LastIndexOf('/') + 1)..];
 

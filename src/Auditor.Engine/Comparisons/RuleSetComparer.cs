@@ -54,7 +54,7 @@ internal static class RuleSetComparer
 
     private static IEnumerable<RuleChange> Rules(Revision before, Revision after, RuleNames names)
     {
-        foreach (var (one, other) in Joined(before.Rules.Rules, after.Rules.Rules, rule => names.AfterOf(rule.Id) ?? rule.Id))
+        foreach (var (one, other) in Joined(OfSet(before.Rules), OfSet(after.Rules), rule => names.AfterOf(rule.Id) ?? rule.Id))
         {
             var details = one is null || other is null ? [] : Details(before.Audit?.Rules.Rule(one.Id), after.Audit?.Rules.Rule(other.Id));
             if (one is null || other is null || details.Count > 0)
@@ -63,6 +63,10 @@ internal static class RuleSetComparer
             }
         }
     }
+
+    /// <summary>The rules about the record come with the program, not with a set.</summary>
+    private static IEnumerable<RevisionRule> OfSet(RevisionRules rules) =>
+        rules.Rules.Where(rule => !rule.Id.StartsWith(RuleHome.RecordPrefix, StringComparison.Ordinal));
 
     private static IReadOnlyList<RuleDetail> Details(Rule? before, Rule? after) =>
         before is null || after is null

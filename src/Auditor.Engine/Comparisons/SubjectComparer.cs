@@ -8,14 +8,16 @@ internal sealed class SubjectComparer(Revision before, Revision after, SubjectPa
     /// <summary>The changed subjects: those of the later revision in its order, then the removed ones in the order of the earlier one.</summary>
     public IReadOnlyList<SubjectChange> Subjects()
     {
-        var kept = after.Subjects.Select(Of).OfType<SubjectChange>();
-        var removed = before.Subjects.Where(subject => pairs.AfterOf(subject.Key) is null && IsToldOfItself(pairs.AfterOf(subject.Parent), subject));
+        var kept = Parts(after).Select(Of).OfType<SubjectChange>();
+        var removed = Parts(before).Where(subject => pairs.AfterOf(subject.Key) is null && IsToldOfItself(pairs.AfterOf(subject.Parent), subject));
         return [.. kept, .. removed.Select(subject => new SubjectChange(subject, null, false, false, null))];
     }
 
     /// <summary>The changed inputs, in the order of the later revision, then by path; empty where one revision does not tell its inputs.</summary>
     public IReadOnlyList<InputChange> Inputs() =>
-        [.. after.Subjects.SelectMany(subject => pairs.BeforeOf(subject.Key) is { } earlier ? Inputs(earlier, subject) : [])];
+        [.. Parts(after).SelectMany(subject => pairs.BeforeOf(subject.Key) is { } earlier ? Inputs(earlier, subject) : [])];
+
+    private static IEnumerable<RevisionSubject> Parts(Revision revision) => revision.Subjects.Where(subject => !subject.IsOnRecord);
 
     private SubjectChange? Of(RevisionSubject subject)
     {

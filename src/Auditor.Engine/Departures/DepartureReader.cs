@@ -6,43 +6,72 @@ using Auditor.Engine.RuleSets;
 
 namespace Auditor.Engine.Departures;
 
-/// <summary>Reads the departures of a design and says what became of each.</summary>
+/// <summary>Reads the departures of a design, says what became of each, and puts those in force to the findings that they accept.</summary>
 /// <param name="rules">The rule set.</param>
 /// <param name="asOf">The day of the audit.</param>
 /// <param name="problems">Receives dates that are none.</param>
-public sealed class DepartureReader(RuleSet rules, DateOnly asOf, Problems problems)
+internal sealed class DepartureReader(RuleSet rules, DateOnly asOf, Problems problems)
 {
     /// <summary>The departures of a design, in its order.</summary>
-    public IReadOnlyList<Departure> Read(DesignFile file, IReadOnlyDictionary<string, Finding> findings) =>
-        [.. file.Root.Mappings("departures").Select(node => Read(node, findings)).OfType<Departure>()];
-
-    /// <summary>The key of the finding that a departure speaks of; null when there is no such rule.</summary>
-    public string? KeyOf(string rule, string subject) => rules.Rule(rule) is { } known ? $"{known.Id}:{subject}" : null;
-
-    private Departure? Read(MappingNode node, IReadOnlyDictionary<string, Finding> findings)
+    /// <param name="file">The design.</param>
+    /// <param name="findings">What the audit found; a finding that a departure accepts is replaced, by the first that accepts it.</param>
+    public IReadOnlyList<Departure> Read(DesignFile file, List<Finding> findings)
     {
-        var rule = node.Scalar("rule")!;
-        var subject = node.Text("subject")!;
+        var byRule = findings.Index().ToLookup(entry => entry.Item.Rule.Id, entry => entry.Index, StringComparer.Ordinal);
+        return [.. file.Root.Mappings("departures").Select(node => Read(node, byRule, findings)).OfType<Departure>()];
+    }
+
+    private Departure? Read(MappingNode node, ILookup<string, int> byRule, List<Finding> findings)
+    {
         var date = DateOf(node.Scalar("date"));
-        var expires = DateOf(node.Scalar("expires"));
-        if (date is null || (expires is null && node.Find("expires") is not null))
+        var until = DateOf(node.Scalar("until"));
+        if (date is null || (until is null && node.Find("until") is not null))
         {
             return null;
         }
 
-        var finding = KeyOf(rule.Text, subject) is { } key ? findings.GetValueOrDefault(key) : null;
-        return new Departure(
-            rule.Text, subject, node.Text("reason")!, node.Text("agreed-by")!, date.Value, expires, StateOf(finding, expires), rule.Span);
+        if (until < date)
+        {
+            problems.Add(DesignMessages.EndsBeforeItBegins(node.Find("until")!.Span, node.Find("date")!.Span));
+            return null;
+        }
+
+        var (named, subject) = (node.Text("rule")!, node.Text("subject")!);
+        var rule = rules.Rule(named);
+        var pattern = new SubjectPattern(subject);
+        int[] places = rule is null ? [] : [.. byRule[rule.Id].Where(place => pattern.Fits(findings[place].Subject.Key))];
+        var state = StateOf(rule, until, [.. places.Select(place => findings[place])]);
+        var departure = new Departure(named, subject, node.Text("reason")!, node.Text("agreed-by")!, date.Value, until, state, node);
+        foreach (var place in places.Where(place => state == DepartureState.InForce && findings[place].Verdict is Verdict.Nonconforming or Verdict.Unproven))
+        {
+            findings[place] = findings[place].With(departure);
+        }
+
+        return departure;
     }
 
-    private DepartureState StateOf(Finding? finding, DateOnly? expires) => finding switch
+    private DepartureState StateOf(Rule? rule, DateOnly? until, Finding[] findings)
     {
-        null => DepartureState.Unmatched,
-        { Rule.AllowsDepartures: false } => DepartureState.Refused,
-        _ when expires < asOf => DepartureState.Expired,
-        { Verdict: Verdict.Nonconforming or Verdict.Unproven } => DepartureState.InForce,
-        _ => DepartureState.NotNeeded,
-    };
+        if (rule is { AllowsDepartures: false })
+        {
+            return DepartureState.Forbidden;
+        }
+
+        if (findings.Length == 0)
+        {
+            return DepartureState.Unmatched;
+        }
+
+        if (until < asOf)
+        {
+            return DepartureState.Expired;
+        }
+
+        return Array.Exists(findings, IsAcceptable) ? DepartureState.InForce : DepartureState.NotNeeded;
+    }
+
+    /// <summary>Whether a finding tells of something that a departure can accept, or that one has accepted already.</summary>
+    private static bool IsAcceptable(Finding finding) => finding.Verdict is Verdict.Nonconforming or Verdict.Unproven or Verdict.Departed;
 
     private DateOnly? DateOf(ScalarNode? scalar)
     {

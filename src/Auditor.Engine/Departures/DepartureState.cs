@@ -6,15 +6,15 @@ public enum DepartureState
     /// <summary>It covers a nonconformity.</summary>
     InForce,
 
-    /// <summary>Its subject conforms, or cannot be judged.</summary>
+    /// <summary>Every finding that it speaks of conforms, or cannot be judged.</summary>
     NotNeeded,
 
     /// <summary>Its last day is past.</summary>
     Expired,
 
     /// <summary>The rule allows no departure.</summary>
-    Refused,
+    Forbidden,
 
-    /// <summary>There is no such rule, or it does not apply to such a subject.</summary>
+    /// <summary>There is no such rule, or it applies to no such subject.</summary>
     Unmatched,
 }

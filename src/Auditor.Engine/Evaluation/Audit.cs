@@ -3,10 +3,11 @@ using Auditor.Engine.Departures;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Guarded;
 using Auditor.Engine.Installation;
+using Auditor.Engine.RuleSets;
 
 namespace Auditor.Engine.Evaluation;
 
-/// <summary>Evaluates every rule on every subject of a design.</summary>
+/// <summary>Evaluates every rule on every subject of a design, and on what is on record about the audit.</summary>
 public static class Audit
 {
     /// <summary>Runs the audit.</summary>
@@ -17,50 +18,25 @@ public static class Audit
     public static AuditResult Run(Design design, DateOnly asOf, Problems problems, Acceptance? acceptance = null)
     {
         var rules = design.Evaluator.Rules;
-        var findings = new List<Finding>();
-        foreach (var subject in design.Subjects)
-        {
-            foreach (var rule in rules.RulesOf(subject.Shape))
-            {
-                var judgement = Judge.Decide(rule, subject.Scope);
-                if (judgement.Verdict is not null)
-                {
-                    findings.Add(new Finding(rule, subject, judgement));
-                }
-            }
-        }
-
+        var findings = Judged(rules, design.Subjects).ToList();
         var decision = acceptance?.Decision ?? GuardedFindings.AskedBy(design);
         findings = GuardedFindings.Complete(design, findings, decision, acceptance ?? new Acceptance());
-        var departures = Depart(design, findings, asOf, problems);
+        var departures = new DepartureReader(rules, asOf, problems).Read(design.File, findings);
+        DesignSubject[] record = [.. DepartureSubjects.Of(design, departures, asOf)];
+        findings.AddRange(Judged(rules, record));
         var applied = findings.Select(finding => finding.Rule).ToHashSet();
         return new AuditResult(
-            design, rules, findings, departures, departures.Count > 0 ? asOf : null, [.. rules.Rules.Where(rule => !applied.Contains(rule))])
+            design, rules, [.. design.Subjects, .. record], findings, departures, departures.Count > 0 ? asOf : null,
+            [.. rules.Rules.Where(rule => !applied.Contains(rule))])
         {
             Decision = decision,
         };
     }
 
-    private static IReadOnlyList<Departure> Depart(Design design, List<Finding> findings, DateOnly asOf, Problems problems)
-    {
-        if (!design.File.Root.Mappings("departures").Any())
-        {
-            return [];
-        }
-
-        var reader = new DepartureReader(design.Evaluator.Rules, asOf, problems);
-        var departures = reader.Read(design.File, findings.ToDictionary(finding => finding.Key));
-        var inForce = departures.Where(departure => departure.State == DepartureState.InForce)
-            .DistinctBy(departure => reader.KeyOf(departure.Rule, departure.Subject))
-            .ToDictionary(departure => reader.KeyOf(departure.Rule, departure.Subject)!);
-        for (var i = 0; i < findings.Count; i++)
-        {
-            if (inForce.TryGetValue(findings[i].Key, out var departure))
-            {
-                findings[i] = findings[i].With(departure);
-            }
-        }
-
-        return departures;
-    }
+    private static IEnumerable<Finding> Judged(RuleSet rules, IEnumerable<DesignSubject> subjects) =>
+        from subject in subjects
+        from rule in rules.RulesOf(subject.Shape)
+        let judgement = Judge.Decide(rule, subject.Scope)
+        where judgement.Verdict is not null
+        select new Finding(rule, subject, judgement);
 }

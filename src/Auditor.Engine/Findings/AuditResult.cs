@@ -8,13 +8,14 @@ namespace Auditor.Engine.Findings;
 /// <summary>Everything that one audit found.</summary>
 /// <param name="Design">The design.</param>
 /// <param name="Rules">The rule set.</param>
-/// <param name="Findings">All findings: subjects in the order of the design, then rules by id.</param>
+/// <param name="Subjects">What was judged: the subjects of the design in its order, then what is on record about the audit.</param>
+/// <param name="Findings">All findings: subjects in their order, then rules by id.</param>
 /// <param name="Departures">The departures that the design records, in its order.</param>
 /// <param name="AsOf">The day of the audit; null where it made no difference.</param>
-/// <param name="NotApplied">Rules that applied to no subject, by id.</param>
+/// <param name="NotApplied">Rules of the set that applied to no subject, by id.</param>
 public sealed record AuditResult(
-    Design Design, RuleSet Rules, IReadOnlyList<Finding> Findings, IReadOnlyList<Departure> Departures, DateOnly? AsOf,
-    IReadOnlyList<Rule> NotApplied)
+    Design Design, RuleSet Rules, IReadOnlyList<DesignSubject> Subjects, IReadOnlyList<Finding> Findings, IReadOnlyList<Departure> Departures,
+    DateOnly? AsOf, IReadOnlyList<Rule> NotApplied)
 {
     /// <summary>How values were held against limits.</summary>
     public Decision Decision { get; init; }

@@ -18,12 +18,8 @@ internal static class FindingPlace
             }
         }
 
-        return OfSubject(finding.Subject);
+        return finding.Subject.Place;
     }
-
-    /// <summary>Where a subject is named, or where its mapping begins.</summary>
-    public static SourceSpan OfSubject(DesignSubject subject) =>
-        (subject.Node.Find("id") ?? subject.Node.Find("to"))?.Span ?? subject.Node.Span.Slice(0, 1);
 
     private static SourceSpan? PlaceOf(DesignSubject subject, string path)
     {

@@ -86,7 +86,7 @@ public sealed class Design
         Shapes.Key => Value.Of(subject.Key),
         Shapes.FeedsBoard => Value.Of(subject.FedBoard is not null),
         Shapes.IsRoot => Value.Of(subject.Parent is { Parent: null }),
-        _ => Absent(subject, slot),
+        _ => subject.Told.TryGetValue(slot.Name, out var told) ? told : Absent(subject, slot),
     };
 
     private static Value Absent(DesignSubject subject, InputSlot slot) =>

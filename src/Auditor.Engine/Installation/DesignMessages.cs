@@ -35,6 +35,10 @@ internal static class DesignMessages
     public static Problem NoDate(SourceSpan span, string text) => Problem.Error(
         "not-a-date", $"`{text}` is not a day of the calendar", span, "write year, month and day as 2026-09-14");
 
+    public static Problem EndsBeforeItBegins(SourceSpan span, SourceSpan date) => Problem.Error(
+        "departure-ends-first", "the last day of this departure lies before the day on which it was agreed", span, "put one of the two days right",
+        new ProblemLabel(date, "it was agreed here"));
+
     public static Problem CableAndLegs(SourceSpan span, SourceSpan legs) => Problem.Error(
         "cable-and-legs", "a circuit has either `cable` or `legs`", span, "keep the one that describes the run", new ProblemLabel(legs, "and here are the legs"));
 }

@@ -39,6 +39,9 @@ public sealed class DesignSubject : ISubject
     /// <summary>The mapping that describes it.</summary>
     public MappingNode Node { get; }
 
+    /// <summary>Where it is named, or where its mapping begins.</summary>
+    public SourceSpan Place => (Node.Find("id") ?? Node.Find("to") ?? Node.Find("rule"))?.Span ?? Node.Span.Slice(0, 1);
+
     /// <inheritdoc/>
     public Scope Scope { get; }
 
@@ -59,6 +62,9 @@ public sealed class DesignSubject : ISubject
     internal DesignSubject Installation => _design.Installation;
 
     internal List<IReadOnlyList<DesignSubject>> Collections { get; } = [];
+
+    /// <summary>What the audit itself knows of a subject on record, by the name of the input; empty for a part of the installation.</summary>
+    internal IReadOnlyDictionary<string, Value> Told { get; init; } = new Dictionary<string, Value>();
 
     /// <inheritdoc/>
     public Value Input(int slot)

@@ -1,3 +1,4 @@
+using Auditor.Engine.Departures;
 using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Types;
 
@@ -6,6 +7,7 @@ namespace Auditor.Engine.Installation;
 /// <summary>
 /// The kinds of subject and the ways between them. The tree is what every installation has (origin, boards, circuits,
 /// legs, bonding conductors); what may be said of each comes from the design schema, what is computed from the sheets.
+/// Beside it stands what is on record about the audit itself: the departures.
 /// </summary>
 public sealed class Shapes
 {
@@ -27,15 +29,22 @@ public sealed class Shapes
     /// <summary>Name of the built-in flag of a board that is fed straight from the origin.</summary>
     internal const string IsRoot = "is_root";
 
+    /// <summary>Name of the built-in word that tells what became of a departure.</summary>
+    internal const string State = "state";
+
+    /// <summary>Name of the built-in text that holds the day of the audit, at a departure.</summary>
+    internal const string AsOf = "as_of";
+
     /// <summary>Makes the kinds with their ways and collections, without inputs or quantities.</summary>
     public Shapes()
     {
-        All = [Installation, Board, Circuit, Leg, Bonding];
+        All = [Installation, Board, Circuit, Leg, Bonding, Departure];
         Link(Installation, [Installation], "has nothing before it");
         Link(Board, [Circuit, Installation], "is fed by nobody");
         Link(Circuit, [Board], "is on no board");
         Link(Leg, [Circuit], "belongs to no circuit");
         Link(Bonding, [Installation], "belongs to no installation");
+        Link(Departure, [Installation], "belongs to no installation");
         Circuit.AddWay("fed", Direction.Down, [Board], "feeds no board");
 
         Installation.AddCollection("boards", Board);
@@ -51,6 +60,8 @@ public sealed class Shapes
 
         Circuit.AddInput(FeedsBoard, FormulaType.Flag, null);
         Board.AddInput(IsRoot, FormulaType.Flag, null);
+        Departure.AddInput(State, FormulaType.OneOf(DepartureStateWords.All), null);
+        Departure.AddInput(AsOf, FormulaType.Text, null);
     }
 
     /// <summary>The whole installation, seen from its origin.</summary>
@@ -68,8 +79,14 @@ public sealed class Shapes
     /// <summary>A bonding conductor.</summary>
     public SubjectShape Bonding { get; } = new("bonding", 4);
 
+    /// <summary>A departure that the design records.</summary>
+    public SubjectShape Departure { get; } = new("departure", 5);
+
     /// <summary>All kinds, by number.</summary>
     public IReadOnlyList<SubjectShape> All { get; }
+
+    /// <summary>Whether a kind of subject is no part of the installation, but on record about the audit.</summary>
+    public bool IsOnRecord(SubjectShape shape) => shape == Departure;
 
     /// <summary>The kind of that name, or null.</summary>
     public SubjectShape? Find(string name) => All.FirstOrDefault(shape => shape.Name == name);

@@ -8,6 +8,14 @@ public sealed record RuleHome(string Folder, string Display)
     /// <summary>Full path of a schema.</summary>
     public string SchemaPath(string name) => Path.Combine(Folder, "schema", name + ".schema.json");
 
+    /// <summary>With what the ids of the rules about the record of an audit begin, and no others.</summary>
+    internal const string RecordPrefix = "record-";
+
+    /// <summary>The rules about the record of an audit, by name, each with the path to show.</summary>
+    internal IReadOnlyList<(string Full, string Display)> RecordRules() =>
+        [.. Directory.EnumerateFiles(Path.Combine(Folder, "record"), "*.yaml").Order(StringComparer.Ordinal)
+            .Select(path => (path, $"{Display}/record/{Path.GetFileName(path)}"))];
+
     /// <summary>Full path of a shipped set.</summary>
     public string SetPath(string name) => Path.Combine(Folder, "sets", name + ".yaml");
 

@@ -14,16 +14,17 @@ public sealed class RuleSet
     private readonly Dictionary<(SubjectShape Shape, int Reading), QuantityDefinition> _uncertainties;
 
     internal RuleSet(RuleSetTitle title, DesignSchema schema, FormulaWorld world, IReadOnlyList<Parameter> parameters,
-        QuantityDefinition[][] quantities, IReadOnlyList<Rule> rules, IReadOnlyList<InputFile> files)
+        QuantityDefinition[][] quantities, IReadOnlyList<Rule> rules, IReadOnlyList<Rule> recordRules, IReadOnlyList<InputFile> files)
     {
         Title = title;
         Schema = schema;
         World = world;
         Parameters = parameters;
         Rules = rules;
+        RecordRules = recordRules;
         Files = files;
         _quantities = quantities;
-        _rulesByShape = [.. schema.Shapes.All.Select(shape => rules.Where(rule => rule.Shape == shape).ToArray())];
+        _rulesByShape = [.. schema.Shapes.All.Select(shape => AllRules.Where(rule => rule.Shape == shape).ToArray())];
         _uncertainties = Quantities.Where(quantity => quantity.Uncertainty is not null)
             .ToDictionary(quantity => (quantity.Shape, quantity.Uncertainty!.Reading.Index));
     }
@@ -40,11 +41,16 @@ public sealed class RuleSet
     /// <summary>Parameters, by slot number.</summary>
     public IReadOnlyList<Parameter> Parameters { get; }
 
-    /// <summary>All rules, by id.</summary>
+    /// <summary>The rules that the set holds, by id.</summary>
     public IReadOnlyList<Rule> Rules { get; }
 
     /// <summary>What can be changed in a design, by id.</summary>
     public IReadOnlyList<Adjustment> Adjustments { get; internal init; } = [];
+    /// <summary>The rules of the program about the record of an audit, by id: they come with every set, and none changes them.</summary>
+    public IReadOnlyList<Rule> RecordRules { get; }
+
+    /// <summary>The rules of the set, then those about the record.</summary>
+    public IEnumerable<Rule> AllRules => Rules.Concat(RecordRules);
 
     /// <summary>The files that it was read from.</summary>
     public IReadOnlyList<InputFile> Files { get; }
@@ -62,5 +68,5 @@ public sealed class RuleSet
     public QuantityDefinition? UncertaintyOf(SubjectShape shape, InputSlot reading) => _uncertainties.GetValueOrDefault((shape, reading.Index));
 
     /// <summary>The rule of that id, present or former; null when there is none.</summary>
-    public Rule? Rule(string id) => Rules.FirstOrDefault(rule => rule.Id == id) ?? Rules.FirstOrDefault(rule => rule.Formerly.Contains(id));
+    public Rule? Rule(string id) => AllRules.FirstOrDefault(rule => rule.Id == id) ?? AllRules.FirstOrDefault(rule => rule.Formerly.Contains(id));
 }

@@ -12,11 +12,13 @@ namespace Auditor.Engine.RuleSets;
 /// <summary>Puts a rule set together: reads the chain of sets and all their files, enters the tables, and binds sheets and rules.</summary>
 public sealed class RuleSetLoader
 {
+    private readonly RuleHome _home;
     private readonly Problems _problems;
     private readonly RuleFileReader _reader;
 
     private RuleSetLoader(RuleHome home, Problems problems)
     {
+        _home = home;
         _problems = problems;
         _reader = new RuleFileReader(home, problems);
     }
@@ -47,11 +49,13 @@ public sealed class RuleSetLoader
         Each(files, "sheet", sheets.Declare);
         var quantities = sheets.Bind(world);
         new CircleCheck(quantities, _problems).Run();
-        var rules = Rules(files, new RuleReader(schema.Shapes, world, _problems));
+        var reader = new RuleReader(schema.Shapes, world, _problems);
+        var rules = Rules(files, reader);
+        var record = _reader.Read(_home.RecordRules()).Select(reader.Read).OfType<Rule>().ToArray();
         var adjustments = Adjustments(files, new AdjustmentReader(schema.Shapes, world, _problems));
         return _problems.HasErrors
             ? null
-            : new RuleSet(Title(chain, files), schema, world, parameters, quantities, rules, Hashes(chain, files)) { Adjustments = adjustments };
+            : new RuleSet(Title(chain, files), schema, world, parameters, quantities, rules, record, Hashes(chain, files)) { Adjustments = adjustments };
     }
 
     private FormulaWorld World(IReadOnlyList<RuleFile>[] files, IReadOnlyList<Parameter> parameters)
@@ -76,7 +80,11 @@ public sealed class RuleSetLoader
         Each(files, "rule", (file, set) =>
         {
             var id = file.Root.Scalar("rule")!;
-            if (rules.TryGetValue(id.Text, out var earlier) && earlier.Set == set)
+            if (id.Text.StartsWith(RuleHome.RecordPrefix, StringComparison.Ordinal))
+            {
+                _problems.Add(RuleMessages.RecordRule(id.Span, id.Text));
+            }
+            else if (rules.TryGetValue(id.Text, out var earlier) && earlier.Set == set)
             {
                 _problems.Add(RuleMessages.SecondRule(id.Span, id.Text, earlier.Rule.Path));
             }

@@ -16,8 +16,8 @@ public sealed class CaseRunner(RuleSet rules, Problems problems)
     private readonly CaseReader _reader = new(rules, new Evaluator(rules), problems);
     private readonly Expectation _expectation = new(problems);
 
-    /// <summary>Runs every case of the set: sheets by kind of subject and slot, then rules by id.</summary>
-    public IReadOnlyList<CaseResult> RunAll() => [.. rules.Quantities.SelectMany(Run), .. rules.Rules.SelectMany(Run)];
+    /// <summary>Runs every case of the set: sheets by kind of subject and slot, then rules by id, then the rules about the record.</summary>
+    public IReadOnlyList<CaseResult> RunAll() => [.. rules.Quantities.SelectMany(Run), .. rules.AllRules.SelectMany(Run)];
 
     /// <summary>Runs the cases of a quantity.</summary>
     public IEnumerable<CaseResult> Run(QuantityDefinition quantity) => quantity.Node.Mappings("cases").Select(node => Run(quantity, node));

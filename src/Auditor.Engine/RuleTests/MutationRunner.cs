@@ -16,9 +16,9 @@ public sealed class MutationRunner(RuleSet rules)
     public MutationReport Run()
     {
         var quantities = rules.Quantities.ToArray();
-        var reports = new MutationReport[rules.Rules.Count + quantities.Length];
-        Parallel.For(0, reports.Length, i =>
-            reports[i] = i < rules.Rules.Count ? Run(rules.Rules[i]) : Run(quantities[i - rules.Rules.Count]));
+        var all = rules.AllRules.ToArray();
+        var reports = new MutationReport[all.Length + quantities.Length];
+        Parallel.For(0, reports.Length, i => reports[i] = i < all.Length ? Run(all[i]) : Run(quantities[i - all.Length]));
         return Together(reports);
     }
 

@@ -97,7 +97,7 @@ internal static class ChangeWords
         DepartureState.InForce => "in force",
         DepartureState.NotNeeded => "not needed",
         DepartureState.Expired => "expired",
-        DepartureState.Refused => "refused by the rule",
+        DepartureState.Forbidden => "forbidden by the rule",
         _ => "matches no finding",
     };
 

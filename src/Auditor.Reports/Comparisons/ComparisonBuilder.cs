@@ -120,7 +120,7 @@ internal sealed class ComparisonBuilder(RevisionComparison comparison)
             return "";
         }
 
-        var end = departure.Expires is null ? "" : $", until {departure.Expires}";
+        var end = departure.Until is null ? "" : $", until {departure.Until}";
         return $"{departure.Reason} ({departure.AgreedBy}, {departure.Date}{end}; {ChangeWords.Text(departure.State)})";
     }
 

@@ -151,7 +151,7 @@ public static class ComparisonJson
         output.Text("reason", departure.Reason);
         output.Text("agreedBy", departure.AgreedBy);
         output.Text("date", departure.Date);
-        output.Text("expires", departure.Expires);
+        output.Text("until", departure.Until);
         output.Text("state", TailJson.State(departure.State));
         Place(output, departure.Place);
     }

@@ -8,14 +8,15 @@ namespace Auditor.Reports.Csv;
 
 /// <summary>
 /// Writes the schedule of circuits as comma-separated values (RFC 4180), for spreadsheets: a byte order mark, without which they
-/// take the text for something other than UTF-8, and an apostrophe before any text that they would run as a formula.
+/// take the text for something other than UTF-8, and an apostrophe before any text that they would run as a formula. After the
+/// circuits comes what is on record about the audit and wants a look, each with the sentence of its finding for a name.
 /// </summary>
 public static class CsvSchedule
 {
     /// <summary>Writes the schedule.</summary>
     /// <param name="result">The audit.</param>
     /// <param name="schedule">Columns of the schedule, between the name of the circuit and its verdict.</param>
-    /// <returns>A header and one record for each circuit; lines end with CR LF.</returns>
+    /// <returns>A header, one record for each circuit, and one for each finding on the record that does not conform; lines end with CR LF.</returns>
     public static byte[] Write(AuditResult result, Schedule schedule)
     {
         var table = new ScheduleFiller(result, schedule).Fill();
@@ -26,6 +27,12 @@ public static class CsvSchedule
             foreach (var row in table.Rows)
             {
                 Record(csv, row);
+            }
+
+            foreach (var finding in result.Findings.Where(finding => result.Rules.Schema.Shapes.IsOnRecord(finding.Subject.Shape) && finding.Verdict != Verdict.Conforms))
+            {
+                string[] cells = [.. table.Headings.Select(_ => "")];
+                Record(csv, new ScheduleRow(finding.Subject.Key, finding.Message, cells, finding.Verdict.Word(), "", finding.Rule.Id, ""));
             }
         }
 

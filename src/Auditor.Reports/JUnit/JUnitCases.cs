@@ -58,7 +58,7 @@ internal sealed class JUnitCases(XmlWriter xml, Places places)
         [
             ("finding", finding.Message),
             ("rule", rule.Title),
-            ("clause", $"{rule.Provision.Word()}, {rule.Clause.Type}: {string.Join(", ", rule.Clause.References)}"),
+            ("clause", $"{rule.Provision.Word()}, {rule.Clause.Type}{(rule.Clause.References.Count == 0 ? "" : ": ")}{string.Join(", ", rule.Clause.References)}"),
             ("value", finding.ValueShown),
             ("limit", finding.LimitShown),
             ("margin", margin),

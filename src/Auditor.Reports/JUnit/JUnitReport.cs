@@ -44,7 +44,7 @@ public static class JUnitReport
         xml.WriteStartElement("testsuites");
         xml.Attribute("name", ProjectWords.Of(result.Design)("title") ?? places.Design);
         Counts(xml, result.Findings, withSkipped: false);
-        foreach (var subject in result.Design.Subjects)
+        foreach (var subject in result.Subjects)
         {
             var own = findings[subject].ToArray();
             if (own.Length > 0 || subject.Parent is null)

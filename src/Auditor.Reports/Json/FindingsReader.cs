@@ -98,13 +98,13 @@ internal sealed class FindingsReader(string name, MappingNode root)
         unit) ?? new Figure(null, scalar.Text);
 
     private static RevisionDeparture Departure(MappingNode node) => new(
-        node.Text("rule")!, node.Text("subject")!, node.Text("reason")!, node.Text("agreedBy")!, node.Text("date")!, Text(node, "expires"),
+        node.Text("rule")!, node.Text("subject")!, node.Text("reason")!, node.Text("agreedBy")!, node.Text("date")!, Text(node, "until"),
         node.Text("state") switch
         {
             "inForce" => DepartureState.InForce,
             "notNeeded" => DepartureState.NotNeeded,
             "expired" => DepartureState.Expired,
-            "refused" => DepartureState.Refused,
+            "forbidden" => DepartureState.Forbidden,
             _ => DepartureState.Unmatched,
         },
         PlaceOf(node));

@@ -29,7 +29,7 @@ internal static class HeadJson
         Basis(output, result);
         output.Object("ruleSet", () => RuleSet(output, result.Rules));
         Counts(output, result);
-        output.Array("subjects", result.Design.Subjects, subject => output.Object(null, () => Subject(output, subject)));
+        output.Array("subjects", result.Subjects, subject => output.Object(null, () => Subject(output, subject)));
     }
 
     private static void Project(JsonOutput output, Design design) => output.Object("project", () =>
@@ -82,6 +82,6 @@ internal static class HeadJson
         output.Text("kind", subject.Shape.Name);
         output.Text("name", SubjectText.OwnName(subject));
         output.Text("parent", subject.Parent?.Key);
-        output.Location(SubjectText.Place(subject));
+        output.Location(subject.Place);
     }
 }

@@ -36,7 +36,7 @@ internal static class TailJson
         output.Text("reason", departure.Reason);
         output.Text("agreedBy", departure.AgreedBy);
         output.Text("date", DayText.Of(departure.Date));
-        output.Text("expires", departure.Expires is { } day ? DayText.Of(day) : null);
+        output.Text("until", departure.Until is { } day ? DayText.Of(day) : null);
         output.Text("state", State(departure.State));
         output.Location(departure.Span);
     }
@@ -47,7 +47,7 @@ internal static class TailJson
         DepartureState.InForce => "inForce",
         DepartureState.NotNeeded => "notNeeded",
         DepartureState.Expired => "expired",
-        DepartureState.Refused => "refused",
+        DepartureState.Forbidden => "forbidden",
         _ => "unmatched",
     };
 }

@@ -84,7 +84,7 @@ internal sealed class ReportBuilder
 
     private ReportDeparture Of(Departure departure) => new(
         departure.Rule, departure.Subject, departure.Reason, departure.AgreedBy, DayText.Of(departure.Date),
-        departure.Expires is { } day ? DayText.Of(day) : "", StateText(departure.State), _places.Text(departure.Span));
+        departure.Until is { } day ? DayText.Of(day) : "", StateText(departure.State), _places.Text(departure.Span));
 
     private ReportAssumption Of(Supports.AssumedInput assumed) => new(
         assumed.Input.Subject.Key, assumed.Input.Slot.Path, assumed.Input.Text, _places.Text(assumed.Input.Span), assumed.Findings);
@@ -97,7 +97,7 @@ internal sealed class ReportBuilder
         DepartureState.InForce => "in force",
         DepartureState.NotNeeded => "not needed: nothing nonconforming to accept",
         DepartureState.Expired => "expired: its last day is past",
-        DepartureState.Refused => "refused: the rule allows no departure",
+        DepartureState.Forbidden => "forbidden: the rule allows no departure",
         _ => "matches no finding of this audit",
     };
 

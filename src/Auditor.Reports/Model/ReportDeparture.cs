@@ -6,8 +6,8 @@ namespace Auditor.Reports.Model;
 /// <param name="Reason">Why it is acceptable.</param>
 /// <param name="AgreedBy">Who agreed.</param>
 /// <param name="Date">When, as year-month-day.</param>
-/// <param name="Expires">Last day on which it holds; empty for no end.</param>
+/// <param name="Until">Last day on which it holds; empty for no end.</param>
 /// <param name="State">What became of it, in words.</param>
 /// <param name="Location">Where it stands, as path:line:column.</param>
 public sealed record ReportDeparture(
-    string Rule, string Subject, string Reason, string AgreedBy, string Date, string Expires, string State, string Location);
+    string Rule, string Subject, string Reason, string AgreedBy, string Date, string Until, string State, string Location);

@@ -20,8 +20,4 @@ internal static class SubjectText
         var name = OwnName(subject) ?? (subject.Shape.Name == "leg" ? OwnName(subject.Parent) : null);
         return name is null ? subject.Key : $"{subject.Key} {name}";
     }
-
-    /// <summary>Where a subject is named, or where its mapping begins.</summary>
-    public static SourceSpan Place(DesignSubject subject) =>
-        (subject.Node.Find("id") ?? subject.Node.Find("to"))?.Span ?? subject.Node.Span.Slice(0, 1);
 }

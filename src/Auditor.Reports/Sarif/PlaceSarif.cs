@@ -1,4 +1,5 @@
 using Auditor.Documents;
+using Auditor.Engine.Findings;
 using Auditor.Engine.Installation;
 using Auditor.Reports.Json;
 using Auditor.Reports.Reading;
@@ -18,11 +19,11 @@ internal sealed class PlaceSarif
     private readonly Dictionary<string, int> _artifacts;
     private readonly Dictionary<DesignSubject, int> _subjects;
 
-    public PlaceSarif(JsonOutput output, Design design)
+    public PlaceSarif(JsonOutput output, AuditResult result)
     {
         _output = output;
         _artifacts = output.Places.Inputs.Select((file, index) => (file.Path, index)).ToDictionary(pair => pair.Path, pair => pair.index);
-        _subjects = design.Subjects.Select((subject, index) => (subject, index)).ToDictionary(pair => pair.subject, pair => pair.index);
+        _subjects = result.Subjects.Select((subject, index) => (subject, index)).ToDictionary(pair => pair.subject, pair => pair.index);
     }
 
     /// <summary>The files of the design, with their hashes.</summary>

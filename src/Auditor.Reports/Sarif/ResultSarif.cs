@@ -77,7 +77,7 @@ internal sealed class ResultSarif(
             {
                 output.Text("agreedBy", accepted.AgreedBy);
                 output.Text("date", DayText.Of(accepted.Date));
-                output.TextIfAny("expires", accepted.Expires is { } day ? DayText.Of(day) : null);
+                output.TextIfAny("until", accepted.Until is { } day ? DayText.Of(day) : null);
             });
         }));
 

@@ -12,11 +12,11 @@ namespace Auditor.Reports.Sarif;
 /// <param name="baseline">How findings stand against an earlier audit; null where nothing was compared.</param>
 internal sealed class RunSarif(JsonOutput output, AuditResult result, IReadOnlyDictionary<string, SarifBaseline>? baseline)
 {
-    private readonly Rule[] _rules = [.. result.Rules.Rules.Except(result.NotApplied)];
+    private readonly Rule[] _rules = [.. result.Findings.Select(finding => finding.Rule).Distinct().OrderBy(rule => rule.Id, StringComparer.Ordinal)];
 
     public void Write()
     {
-        var places = new PlaceSarif(output, result.Design);
+        var places = new PlaceSarif(output, result);
         output.Object("tool", () => output.Object("driver", Driver));
         output.Array("invocations", [result.Rules.Title], title => output.Object(null, () => Invocation(title)));
         output.Text("language", "en-GB");

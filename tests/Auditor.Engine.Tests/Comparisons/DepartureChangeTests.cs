@@ -5,7 +5,7 @@ namespace Auditor.Engine.Tests.Comparisons;
 public class DepartureChangeTests
 {
     private const string Departed = Yard.Design
-        + "departures: [{ rule: spare, subject: A, reason: The yard will not grow., agreed-by: T. Example, date: 2026-10-01, expires: 2027-10-01 }]\n";
+        + "departures: [{ rule: spare, subject: A, reason: The yard will not grow., agreed-by: T. Example, date: 2026-10-01, until: 2027-10-01 }]\n";
 
     [Fact]
     public void A_departure_that_came_accepts_the_nonconformity_and_moves_no_margin()
@@ -48,9 +48,9 @@ public class DepartureChangeTests
     [Fact]
     public void Another_reason_or_last_day_is_told()
     {
-        var comparison = Revisions.Compare(Departed, Departed.With("expires: 2027-10-01", "expires: 2030-10-01"));
+        var comparison = Revisions.Compare(Departed, Departed.With("until: 2027-10-01", "until: 2030-10-01"));
 
         var change = Assert.Single(comparison.Departures);
-        Assert.Equal(("2027-10-01", "2030-10-01"), (change.Before!.Expires, change.After!.Expires));
+        Assert.Equal(("2027-10-01", "2030-10-01"), (change.Before!.Until, change.After!.Until));
     }
 }

@@ -17,7 +17,20 @@ public class CsvScheduleTests
         Assert.Equal(["A/2", "Pump", "EN 60898 C 20 A", "2.5 mm² / 4 mm²", "25 A", "24 A", "nonconforming", "-10.0", "run-sensible", ""], records[2]);
         // A/1 is 12 m ± 2 m long of at most 40 m: 14 m leave 65 %.
         Assert.Equal("65.0", records[1][^1]);
-        Assert.Equal(5, records.Count);
+        Assert.Equal(["A/1", "A/2", "A/3", "A/4"], records[1..5].Select(record => record[0]));
+    }
+
+    [Fact]
+    public void After_the_circuits_comes_what_is_on_record_and_does_not_conform()
+    {
+        var records = Read(Write(Sheds.Audit("garden")));
+
+        Assert.Equal(
+            ["departure/run-sensible:A/1", "departure/device-known:A/3", "departure/load-within-capacity:A/2", "departure/no-such-rule:A/9"],
+            records[5..].Select(record => record[0]));
+        Assert.Equal(
+            ["`device-known` allows no departure; one is recorded at A/3, agreed by T. Example on 2026-03-02.", "", "", "", "", "nonconforming", "", "record-departure-permitted", ""],
+            records[6][1..]);
     }
 
     [Fact]
@@ -27,7 +40,7 @@ public class CsvScheduleTests
 
         Assert.StartsWith("\uFEFFCircuit,Name,", text, StringComparison.Ordinal);
         Assert.EndsWith("\r\n", text, StringComparison.Ordinal);
-        Assert.Equal(5, text.Split("\r\n").Length - 1);
+        Assert.Equal(9, text.Split("\r\n").Length - 1);
         Assert.DoesNotContain('\n', text.Replace("\r\n", "", StringComparison.Ordinal));
     }
 

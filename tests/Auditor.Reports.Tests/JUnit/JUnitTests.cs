@@ -46,9 +46,10 @@ public class JUnitTests
         var file = Read(JUnitReport.Write(Sheds.Audit("garden")));
 
         Assert.Equal(
-            ["The installation", "bonding/water", "A/1 Lamps", "A/1/leg 1 Lamps", "A/2 Pump", "A/2/leg 1 Pump", "A/2/leg 2 Pump", "A/3 Kiln", "A/3/leg 1 Kiln", "A/4 Bench", "A/4/leg 1 Bench"],
+            ["The installation", "bonding/water", "A/1 Lamps", "A/1/leg 1 Lamps", "A/2 Pump", "A/2/leg 1 Pump", "A/2/leg 2 Pump", "A/3 Kiln", "A/3/leg 1 Kiln", "A/4 Bench", "A/4/leg 1 Bench",
+                "departure/bonding-enough:bonding/water", "departure/run-sensible:A/1", "departure/device-known:A/3", "departure/load-within-capacity:A/2", "departure/no-such-rule:A/9"],
             file.Root!.Elements("testsuite").Select(suite => suite.Attribute("name")!.Value));
-        Assert.Equal(20, file.Descendants("testcase").Count());
+        Assert.Equal(33, file.Descendants("testcase").Count());
     }
 
     [Theory]
@@ -100,7 +101,7 @@ public class JUnitTests
         var properties = Read(JUnitReport.Write(Sheds.Audit("garden"))).Descendants("property").ToDictionary(each => each.Attribute("name")!.Value, each => each.Attribute("value")!.Value);
 
         Assert.Equal("shed", properties["rule-set"]);
-        Assert.Equal("352223a502d73b86e39fcb96fc486130a251d82ad7c70056592ad5b890a9f890", properties["sha-256 of garden.design.yaml"]);
+        Assert.Equal("1d8a0604f05d4fa8b3f4afc343fc5c61801c3a6efb617adfc04fcab531211715", properties["sha-256 of garden.design.yaml"]);
     }
 
     [Fact]

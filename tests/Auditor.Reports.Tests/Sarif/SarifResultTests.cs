@@ -10,7 +10,9 @@ public class SarifResultTests
     [Fact]
     public void What_conforms_is_no_result() =>
         Assert.Equal(
-            ["bonding-enough:bonding/water", "load-within-capacity:A/2", "run-sensible:A/2", "air-not-too-cold:A/2/leg 2", "device-known:A/3", "load-within-capacity:A/4", "run-sensible:A/4"],
+            ["bonding-enough:bonding/water", "load-within-capacity:A/2", "run-sensible:A/2", "air-not-too-cold:A/2/leg 2", "device-known:A/3", "load-within-capacity:A/4", "run-sensible:A/4",
+                "record-departure-needed:departure/run-sensible:A/1", "record-departure-permitted:departure/device-known:A/3",
+                "record-departure-in-date:departure/load-within-capacity:A/2", "record-departure-matched:departure/no-such-rule:A/9"],
             Garden.Results.Select(SarifFile.Fingerprint));
 
     [Theory]
@@ -70,7 +72,7 @@ public class SarifResultTests
         Assert.Equal("accepted", Text(suppression["status"]));
         Assert.Equal("The pipe is of plastic behind the wall.", Text(suppression["justification"]));
         Assert.Equal(18, suppression["location"]!["physicalLocation"]!["region"]!["startLine"]!.GetValue<int>());
-        Assert.Equal("2027-03-01", Text(suppression["properties"]!["expires"]));
+        Assert.Equal("2027-03-01", Text(suppression["properties"]!["until"]));
     }
 
     [Theory]
@@ -107,7 +109,7 @@ public class SarifResultTests
             ["run-sensible:A/2"] = SarifBaseline.Updated,
         });
 
-        Assert.Equal(["new", "new", "updated", "new", "unchanged", "new", "new"], file.Results.Select(result => Text(result["baselineState"])));
+        Assert.Equal(["new", "new", "updated", "new", "unchanged", "new", "new", "new", "new", "new", "new"], file.Results.Select(result => Text(result["baselineState"])));
     }
 
     private static string Text(JsonNode? node) => node!.GetValue<string>();

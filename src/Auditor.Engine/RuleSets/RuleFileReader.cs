@@ -15,6 +15,7 @@ internal sealed class RuleFileReader(RuleHome home, Problems problems)
         ["curve"] = "curve",
         ["sheet"] = "sheet",
         ["rule"] = "provision",
+        ["picture"] = "picture",
         ["set"] = "set",
     };
 

@@ -37,6 +37,9 @@ internal static class RuleMessages
     public static Problem SecondRule(SourceSpan span, string id, string otherPath) => Problem.Error(
         "duplicate-rule", $"there is a rule `{id}` already", span, $"it stands in {otherPath}; a house set may replace a rule, a set may not have it twice");
 
+    public static Problem SecondPicture(SourceSpan span, string id, string otherPath) => Problem.Error(
+        "duplicate-picture", $"there is a picture `{id}` already", span, $"it stands in {otherPath}; a house set may replace a picture, a set may not have it twice");
+
     public static Problem UnitOrGives(SourceSpan span) => Problem.Error(
         "unit-or-gives", "a quantity has either a `unit` or `gives: text` or `gives: flag`", span, null);
 

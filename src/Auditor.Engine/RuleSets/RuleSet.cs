@@ -39,6 +39,9 @@ public sealed class RuleSet
     /// <summary>All rules, by id.</summary>
     public IReadOnlyList<Rule> Rules { get; }
 
+    /// <summary>The pictures that its reports show, in their order.</summary>
+    public IReadOnlyList<PicturePlan> Pictures { get; internal init; } = [];
+
     /// <summary>The files that it was read from.</summary>
     public IReadOnlyList<InputFile> Files { get; }
 

@@ -37,7 +37,7 @@ public sealed class RuleSetLoader
 
     private RuleSet? Compose(IReadOnlyList<SetFile> chain, Task<DesignSchema> schemaTask)
     {
-        var files = chain.Select(set => _reader.Read(set.Files(["tables", "curves", "sheets", "provisions"], _problems))).ToArray();
+        var files = chain.Select(set => _reader.Read(set.Files(["tables", "curves", "sheets", "provisions", "pictures"], _problems))).ToArray();
         var schema = schemaTask.GetAwaiter().GetResult();
         var parameters = ParameterReader.Read(chain, _problems);
         var world = World(files, parameters);
@@ -47,7 +47,10 @@ public sealed class RuleSetLoader
         var quantities = sheets.Bind(world);
         new CircleCheck(quantities, _problems).Run();
         var rules = Rules(files, new RuleReader(schema.Shapes, world, _problems));
-        return _problems.HasErrors ? null : new RuleSet(Title(chain, files), schema, world, parameters, quantities, rules, Hashes(chain, files));
+        var pictures = Pictures(files, new PicturePlanReader(schema.Shapes, world, quantities, _problems));
+        return _problems.HasErrors
+            ? null
+            : new RuleSet(Title(chain, files), schema, world, parameters, quantities, rules, Hashes(chain, files)) { Pictures = pictures };
     }
 
     private FormulaWorld World(IReadOnlyList<RuleFile>[] files, IReadOnlyList<Parameter> parameters)
@@ -82,6 +85,24 @@ public sealed class RuleSetLoader
             }
         });
         return [.. rules.Values.Select(pair => pair.Rule).OrderBy(rule => rule.Id, StringComparer.Ordinal)];
+    }
+
+    private List<PicturePlan> Pictures(IReadOnlyList<RuleFile>[] files, PicturePlanReader reader)
+    {
+        var plans = new Dictionary<string, (PicturePlan Plan, int Set)>();
+        Each(files, "picture", (file, set) =>
+        {
+            var id = file.Root.Scalar("picture")!;
+            if (plans.TryGetValue(id.Text, out var earlier) && earlier.Set == set)
+            {
+                _problems.Add(RuleMessages.SecondPicture(id.Span, id.Text, earlier.Plan.Node.Span.Source.Path));
+            }
+            else
+            {
+                plans[id.Text] = (reader.Read(file), set);
+            }
+        });
+        return [.. plans.Values.Select(pair => pair.Plan).OrderBy(plan => plan.Place).ThenBy(plan => plan.Id, StringComparer.Ordinal)];
     }
 
     private static void Each(IReadOnlyList<RuleFile>[] files, string kind, Action<RuleFile, int> action)

@@ -1,7 +1,11 @@
 using Auditor.Engine.Findings;
 using Auditor.Engine.RuleSets;
+using Auditor.Reports.Pictures.Balance;
 using Auditor.Reports.Pictures.Margins;
+using Auditor.Reports.Pictures.Parts;
+using Auditor.Reports.Pictures.Profiles;
 using Auditor.Reports.Pictures.SingleLine;
+using Auditor.Reports.Pictures.TimeCurrent;
 using Auditor.Reports.Reading;
 
 namespace Auditor.Reports.Pictures;
@@ -21,6 +25,10 @@ public static class PictureBuilder
     {
         "single-line" => new SingleLineDiagrams(scene, plan).Draw(),
         "margins" => new MarginStrips(scene, plan).Draw(),
+        "time-current" => new TimeCurrentCharts(scene, plan).Draw(),
+        "profile" => new ProfileCharts(scene, plan).Draw(),
+        "balance" => new BalanceBars(scene, plan).Draw(),
+        "parts" => new PartsCharts(scene, plan).Draw(),
         _ => [],
     };
 }

@@ -15,7 +15,7 @@ internal sealed record Standing(Finding? Lead, Finding? Tightest, int NotMet, in
 {
     /// <summary>The standing over some findings.</summary>
     public static Standing Of(IReadOnlyCollection<Finding> findings) => new(
-        findings.OrderBy(Gravity).ThenBy(finding => Margin(finding) ?? double.NegativeInfinity).FirstOrDefault(),
+        findings.OrderBy(GravityOf).ThenBy(finding => Margin(finding) ?? double.NegativeInfinity).FirstOrDefault(),
         findings.Where(finding => Margin(finding) is not null).MinBy(finding => Margin(finding)),
         findings.Count(finding => finding.Verdict == Verdict.Nonconforming), findings.Count(finding => finding.Verdict == Verdict.Undetermined));
 
@@ -43,23 +43,17 @@ internal sealed record Standing(Finding? Lead, Finding? Tightest, int NotMet, in
         _ => "not met",
     };
 
-    /// <summary>The type of clause that the headline speaks of; with what else the least margin is, where the lead has none.</summary>
-    public string Topic
-    {
-        get
-        {
-            if (Lead is null)
-            {
-                return "";
-            }
+    /// <summary>The type of clause that the headline speaks of.</summary>
+    public string Topic => (Lead?.Verdict == Verdict.Conforms ? Tightest ?? Lead : Lead)?.Rule.Clause.Type ?? "";
 
-            var about = Lead.Verdict == Verdict.Conforms ? Tightest ?? Lead : Lead;
-            var least = Margin(about) is null && Tightest is not null ? $", least {ValueText.ShowMargin(Margin(Tightest)!.Value)}" : "";
-            return about.Rule.Clause.Type + least;
-        }
-    }
+    /// <summary>The least margin, where the headline does not tell it.</summary>
+    public string Least =>
+        Tightest is { } tightest && ValueText.ShowMargin(Margin(tightest)!.Value) is var least && least != Headline ? "least " + least : "";
 
-    private static int Gravity(Finding finding) => (finding.Verdict, finding.Rule.Provision) switch
+    /// <summary>How grave the lead is; lower is graver.</summary>
+    public int Gravity => Lead is null ? 6 : GravityOf(Lead);
+
+    private static int GravityOf(Finding finding) => (finding.Verdict, finding.Rule.Provision) switch
     {
         (Verdict.Nonconforming, Provision.Requirement) => 0,
         (Verdict.Undetermined, Provision.Requirement) => 1,

@@ -32,7 +32,7 @@ internal static class Badges
         {
             canvas.Use(mark, x + 7, y);
             canvas.Text(x + 18, y + 4, words, "s");
-            x += 34 + TextWidth.Of(words, 10);
+            x += 34 + Canvas.WidthOf(words, "s");
         }
 
         return x;

@@ -12,6 +12,12 @@ namespace Auditor.Reports.Pictures.Drawing;
 /// </summary>
 internal sealed class Canvas
 {
+    /// <summary>Size of a small text (a look that begins with <c>s</c>); the class of it says the same.</summary>
+    private const double Small = 11;
+
+    /// <summary>Size of any other text.</summary>
+    private const double Ordinary = 12;
+
     private static readonly XNamespace Svg = "http://www.w3.org/2000/svg";
 
     private readonly Stack<XElement> _open = new();
@@ -25,7 +31,7 @@ internal sealed class Canvas
     {
         Id = id;
         _root = new XElement(
-            Svg + "svg", new XAttribute("id", id), new XAttribute("class", "picture"), new XAttribute("role", "img"),
+            Svg + "svg", new XAttribute("id", id), new XAttribute("class", Classes("picture")), new XAttribute("role", "img"),
             new XAttribute("aria-labelledby", $"{id}-t {id}-d"),
             new XElement(Svg + "title", new XAttribute("id", id + "-t"), Inert(title)),
             new XElement(Svg + "desc", new XAttribute("id", id + "-d"), Inert(description)));
@@ -45,6 +51,9 @@ internal sealed class Canvas
     /// <summary>Text that shows as it is: one line, with � for what shows nothing or turns the text around.</summary>
     public static string Inert(string text) => Ink.OneLine(text);
 
+    /// <summary>Width that a text may take.</summary>
+    public static double WidthOf(string text, string look) => TextWidth.Of(text, SizeOf(look));
+
     /// <summary>A straight line.</summary>
     public void Line(double x1, double y1, double x2, double y2, string look)
     {
@@ -58,28 +67,28 @@ internal sealed class Canvas
     }
 
     /// <summary>A path in the notation of SVG.</summary>
-    public void Path(string data, string look) => Add("path", ("class", look), ("d", data));
+    public void Path(string data, string look) => Add("path", ("class", Classes(look)), ("d", data));
 
     /// <summary>A rectangle.</summary>
     public void Rect(double x, double y, double width, double height, string look, double round = 0) => Add(
-        "rect", ("class", look), ("x", N(x)), ("y", N(y)), ("width", N(width)), ("height", N(height)), ("rx", round == 0 ? null : N(round)));
+        "rect", ("class", Classes(look)), ("x", N(x)), ("y", N(y)), ("width", N(width)), ("height", N(height)), ("rx", round == 0 ? null : N(round)));
 
     /// <summary>A circle.</summary>
-    public void Circle(double x, double y, double radius, string look) => Add("circle", ("class", look), ("cx", N(x)), ("cy", N(y)), ("r", N(radius)));
+    public void Circle(double x, double y, double radius, string look) => Add("circle", ("class", Classes(look)), ("cx", N(x)), ("cy", N(y)), ("r", N(radius)));
 
     /// <summary>A text on one line.</summary>
     public void Text(double x, double y, string text, string look)
     {
         if (text.Length > 0)
         {
-            _open.Peek().Add(new XElement(Svg + "text", new XAttribute("class", look), new XAttribute("x", N(x)), new XAttribute("y", N(y)), Inert(text)));
+            _open.Peek().Add(new XElement(Svg + "text", new XAttribute("class", Classes(look)), new XAttribute("x", N(x)), new XAttribute("y", N(y)), Inert(text)));
         }
     }
 
     /// <summary>A text cut to the room that it has; a cut one shows whole to whoever points at it.</summary>
-    public void TextWithin(double x, double y, string text, string look, double size, double room)
+    public void TextWithin(double x, double y, string text, string look, double room)
     {
-        var fitted = TextWidth.Fit(text, size, room);
+        var fitted = TextWidth.Fit(text, SizeOf(look), room);
         Text(x, y, fitted, look);
         if (fitted != text)
         {
@@ -88,8 +97,8 @@ internal sealed class Canvas
     }
 
     /// <summary>A symbol that was defined in this drawing.</summary>
-    public void Use(string symbol, double x, double y, string? look = null) =>
-        Add("use", ("href", $"#{Id}-{symbol}"), ("x", N(x)), ("y", N(y)), ("class", look));
+    public void Use(string symbol, double x, double y) =>
+        Add("use", ("href", $"#{Id}-{symbol}"), ("x", N(x)), ("y", N(y)));
 
     /// <summary>Opens the definition of a symbol.</summary>
     public IDisposable Define(string symbol) => Open("g", ("id", $"{Id}-{symbol}"));
@@ -140,6 +149,12 @@ internal sealed class Canvas
         _open.Peek().Add(element);
         return element;
     }
+
+    /// <summary>Size by which a text is measured; bold letters are wider.</summary>
+    private static double SizeOf(string look) => (look.StartsWith('s') ? Small : Ordinary) * (look.Contains(" b", StringComparison.Ordinal) ? 1.1 : 1);
+
+    /// <summary>The classes of a look. Their prefix keeps them apart from those of the page: selectors cannot, since nothing reaches into a used symbol.</summary>
+    private static string Classes(string look) => string.Join(' ', look.Split(' ').Select(part => "p-" + part));
 
     private sealed class Closing(Action close) : IDisposable
     {

@@ -13,8 +13,8 @@ namespace Auditor.Reports.Pictures.Margins;
 internal sealed class MarginStrips(Scene scene, PicturePlan plan)
 {
     private const double Left = 216;
-    private const double Right = 760;
-    private const double Width = 1000;
+    private const double Right = 700;
+    private const double Width = 960;
     private const double Top = 44;
     private const double StripHeight = 44;
     private const int Step = 7;
@@ -59,13 +59,19 @@ internal sealed class MarginStrips(Scene scene, PicturePlan plan)
     {
         var zero = scale.Of(0);
         canvas.Rect(Left, Top - 6, zero - Left, bottom - Top + 6, "band");
+        var free = double.NegativeInfinity;
         foreach (var mark in scale.Ticks)
         {
             var x = scale.Of(mark);
             canvas.Line(x, Top - 6, x, bottom, mark == 0 ? "limit" : "grid");
             var text = (mark > 0 ? "+" : "") + ValueText.ShowNumber(mark, Percent);
-            canvas.Text(x, Top - 12, text, mark == 0 ? "s b c" : "s m c");
-            canvas.Text(x, bottom + 14, text, mark == 0 ? "s b c" : "s m c");
+            var half = Canvas.WidthOf(text, "s b") / 2;
+            if (x - half >= free && (mark >= 0 || x + half < zero - 14))
+            {
+                canvas.Text(x, Top - 12, text, mark == 0 ? "s b c" : "s m c");
+                canvas.Text(x, bottom + 14, text, mark == 0 ? "s b c" : "s m c");
+                free = x + half + 4;
+            }
         }
 
         canvas.Text(zero - 8, 12, "← limit broken", "s b e");
@@ -75,7 +81,7 @@ internal sealed class MarginStrips(Scene scene, PicturePlan plan)
     private void Draw(Canvas canvas, MarginScale scale, Strip strip, double y)
     {
         canvas.Line(24, y + 5, Width - 16, y + 5, "grid");
-        canvas.TextWithin(24, y - 14, strip.Type, "t b", 11, Left - 34);
+        canvas.TextWithin(24, y - 14, strip.Type, "t b", Left - 34);
         canvas.Text(24, y, $"{strip.Measured.Count} measured" + (strip.Open > 0 ? $", {strip.Open} open" : ""), "s m");
         var bins = strip.Measured.GroupBy(finding => (int)Math.Round(scale.Of(Margin(finding)!.Value) / Step)).ToArray();
         var most = bins.Max(bin => bin.Count());
@@ -88,57 +94,70 @@ internal sealed class MarginStrips(Scene scene, PicturePlan plan)
             Dots(canvas, bins, y);
         }
 
+        Marks(canvas, scale, strip, y);
         foreach (var (index, finding) in strip.Measured.Take((int)Labelled).Index())
         {
             using var link = canvas.Link(Anchor.Of(finding.Key), $"{finding.Key}: {ValueText.ShowMargin(Margin(finding)!.Value)}, {finding.VerdictText}");
             var at = y - 14 - (index * 12);
             canvas.Text(Right + 18, at, ValueText.ShowMargin(Margin(finding)!.Value), "t b");
-            canvas.TextWithin(Right + 86, at, Scene.Label(finding.Subject), "t", 11, Width - Right - 100);
-            canvas.TextWithin(Right + 18, y, finding.Rule.Id, "s m", 10, Width - Right - 34);
+            canvas.TextWithin(Right + 80, at, Scene.Label(finding.Subject), "t", Width - Right - 88);
+            canvas.TextWithin(Right + 18, y, finding.Rule.Id, "s m", Width - Right - 34);
         }
     }
 
     private double Labelled => (plan.Settings.Find("labelled") as Documents.ScalarNode)?.Number ?? 1;
 
-    /// <summary>A dot for each finding, those of nearly the same margin stacked; what conforms is one path, for there are many.</summary>
+    /// <summary>A dot for each finding that conforms, those of nearly the same margin stacked; all in one path, for there are many.</summary>
     private static void Dots(Canvas canvas, IGrouping<int, Finding>[] bins, double y)
     {
         var dots = new StringBuilder();
         foreach (var bin in bins)
         {
-            foreach (var (level, finding) in bin.Index())
+            for (var level = 0; level < bin.Count(finding => finding.Verdict == Verdict.Conforms); level++)
             {
-                var at = y - 1 - (level * 6.5);
-                if (finding.Verdict == Verdict.Conforms)
-                {
-                    dots.Append(CultureInfo.InvariantCulture, $"M{bin.Key * Step} {Canvas.N(at)}h0");
-                    continue;
-                }
-
-                using var link = canvas.Link(Anchor.Of(finding.Key), $"{finding.Key}: {ValueText.ShowMargin(Margin(finding)!.Value)}, {finding.VerdictText}");
-                canvas.Use(Standing.Mark(finding), bin.Key * Step, at - 2);
+                dots.Append(CultureInfo.InvariantCulture, $"M{bin.Key * Step} {Canvas.N(y - 1 - (level * 6.5))}h0");
             }
         }
 
-        if (dots.Length > 0)
+        Path(canvas, dots, "conforms dot");
+    }
+
+    /// <summary>Where dots would not fit a bar stands for how many conform, as a share of the most that any bar of the strip has.</summary>
+    private static void Bars(Canvas canvas, IGrouping<int, Finding>[] bins, int most, double y)
+    {
+        var bars = new StringBuilder();
+        foreach (var bin in bins.Where(bin => bin.Any(finding => finding.Verdict == Verdict.Conforms)))
         {
-            canvas.Path(dots.ToString(), "conforms dot");
+            var height = Math.Max(2, 30.0 * bin.Count(finding => finding.Verdict == Verdict.Conforms) / most);
+            bars.Append(CultureInfo.InvariantCulture, $"M{(bin.Key * Step) - 2} {Canvas.N(y + 4)}v-{Canvas.N(height)}h5v{Canvas.N(height)}z");
+        }
+
+        Path(canvas, bars, "conforms solid");
+    }
+
+    /// <summary>A mark of its own, with a link, for each finding that does not conform, as far as there is room; the tightest go before.</summary>
+    private static void Marks(Canvas canvas, MarginScale scale, Strip strip, double y)
+    {
+        var free = double.NegativeInfinity;
+        foreach (var finding in strip.Measured.Where(finding => finding.Verdict != Verdict.Conforms))
+        {
+            var x = scale.Of(Margin(finding)!.Value);
+            if (x < free)
+            {
+                continue;
+            }
+
+            using var link = canvas.Link(Anchor.Of(finding.Key), $"{finding.Key}: {ValueText.ShowMargin(Margin(finding)!.Value)}, {finding.VerdictText}");
+            canvas.Use(Standing.Mark(finding), x, y - 5);
+            free = x + 4;
         }
     }
 
-    /// <summary>Where dots would not fit a bar stands for the number of findings, as a share of the most that any bar of the strip has.</summary>
-    private static void Bars(Canvas canvas, IGrouping<int, Finding>[] bins, int most, double y)
+    private static void Path(Canvas canvas, StringBuilder data, string look)
     {
-        foreach (var look in bins.GroupBy(bin => bin.First().Verdict == Verdict.Conforms ? "conforms solid" : "nonconforming solid"))
+        if (data.Length > 0)
         {
-            var bars = new StringBuilder();
-            foreach (var bin in look)
-            {
-                var height = Math.Max(2, 30.0 * bin.Count() / most);
-                bars.Append(CultureInfo.InvariantCulture, $"M{(bin.Key * Step) - 2} {Canvas.N(y + 4)}v-{Canvas.N(height)}h5v{Canvas.N(height)}z");
-            }
-
-            canvas.Path(bars.ToString(), look.Key);
+            canvas.Path(data.ToString(), look);
         }
     }
 

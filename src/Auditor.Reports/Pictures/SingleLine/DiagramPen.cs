@@ -49,8 +49,8 @@ internal sealed class DiagramPen(Scene scene, PicturePlan plan, Canvas canvas, C
         }
 
         canvas.Text(56, y - 4, "Origin", "t b");
-        canvas.TextWithin(56, y + 11, plan.Known(origin, "text", " · "), "s m", 10, columns.Badge - 76);
-        canvas.TextWithin(56, y + 40, plan.Known(origin, "device-text"), "s", 10, 190);
+        canvas.TextWithin(56, y + 11, plan.Known(origin, "text", " · "), "s m", columns.Badge - 76);
+        canvas.TextWithin(56, y + 40, plan.Known(origin, "device-text"), "s", 190);
         Badge(item.Subject, y);
         canvas.Use("earth", 64, y + 58);
         canvas.Text(82, y + 68, plan.Holds(origin, "electrode") ? "main earthing terminal, earth electrode of the installation" : "main earthing terminal", "s m");
@@ -59,8 +59,8 @@ internal sealed class DiagramPen(Scene scene, PicturePlan plan, Canvas canvas, C
     private void Bonding(Item item)
     {
         canvas.Path($"M64 {Canvas.N(item.Y - 26)}V{Canvas.N(item.Y)}H104", "line");
-        canvas.TextWithin(112, item.Y + 4, "to " + Texts.OwnId(item.Subject), "t", 11, 250);
-        canvas.TextWithin(Columns.Cable(0) + 130, item.Y + 4, plan.Known(item.Subject, "text", " · "), "s m", 10, columns.Badge - 400);
+        canvas.TextWithin(112, item.Y + 4, "to " + Texts.OwnId(item.Subject), "t", 190);
+        canvas.TextWithin(310, item.Y + 4, plan.Known(item.Subject, "text", " · "), "s m", columns.Badge - 330);
         Badge(item.Subject, item.Y, isFlat: true);
     }
 
@@ -88,10 +88,10 @@ internal sealed class DiagramPen(Scene scene, PicturePlan plan, Canvas canvas, C
         }
 
         var room = (isNested ? columns.Load : columns.Badge) - words - 16;
-        canvas.TextWithin(words, y - 5, Scene.Label(board), "t b", 11, room);
+        canvas.TextWithin(words, y - 5, Scene.Label(board), "t b", room);
         var said = new[] { plan.Known(board, "text", " · "), plan.Known(board, "rcd-text") is { Length: > 0 } rcd ? "RCD " + rcd : "" };
-        canvas.TextWithin(words, y + 12, string.Join(" · ", said.Where(text => text.Length > 0)), "s m", 10, room);
-        canvas.TextWithin(device - 15, y + 17, hasSwitch ? plan.Known(board, "switch-text") : "", "s m", 10, 44);
+        canvas.TextWithin(words, y + 12, string.Join(" · ", said.Where(text => text.Length > 0)), "s m", room);
+        canvas.TextWithin(device - 15, y + 17, hasSwitch ? plan.Known(board, "switch-text") : "", "s m", 44);
         if (item.IsOwn)
         {
             Badge(board, y);
@@ -104,14 +104,14 @@ internal sealed class DiagramPen(Scene scene, PicturePlan plan, Canvas canvas, C
         var (device, ring, cable) = (Columns.Device(item.Depth), Columns.Rcd(item.Depth), Columns.Cable(item.Depth));
         canvas.Line(bus, y, device - 15, y, "line");
         canvas.Use(DeviceSymbol(circuit), device, y);
-        canvas.TextWithin(bus + 8, y - 4, Texts.OwnId(circuit), "t b", 11, 50);
-        canvas.TextWithin(bus + 8, y + 12, plan.Word(circuit, "line") ?? "", "s m", 10, 52);
-        canvas.TextWithin(device, y + 17, plan.Known(circuit, "device-text"), "s c", 10, 56);
+        canvas.TextWithin(bus + 6, y - 4, Texts.OwnId(circuit), "t b", 50);
+        canvas.TextWithin(bus + 6, y + 12, plan.Word(circuit, "line") ?? "", "s m", 56);
+        canvas.TextWithin(device, y + 17, plan.Known(circuit, "device-text"), "s c", 58);
         if (plan.Holds(circuit, "rcd"))
         {
             canvas.Use("rcd", ring, y);
             canvas.Path($"M{Canvas.N(ring)} {Canvas.N(y - 8)}V{Canvas.N(y - 13)}H{Canvas.N(device + 2)}V{Canvas.N(y - 5)}", "thin dash");
-            canvas.TextWithin(ring, y + 17, plan.Known(circuit, "rcd-text"), "s c", 10, 46);
+            canvas.TextWithin(ring, y + 17, plan.Known(circuit, "rcd-text"), "s c", 62);
         }
 
         canvas.Line(device + 15, y, cable, y, "line");
@@ -150,15 +150,15 @@ internal sealed class DiagramPen(Scene scene, PicturePlan plan, Canvas canvas, C
             }
 
             var more = i == shown - 1 && legs.Count > shown ? $", and {legs.Count - shown} more" : "";
-            canvas.TextWithin(x + 6, item.Y - 4, plan.Known(legs[i], "text", ", ") + more, "s", 10, step - 12);
-            canvas.TextWithin(x + 6, item.Y + 13, plan.Known(legs[i], "note", ", "), "s m", 10, step - 12);
+            canvas.TextWithin(x + 6, item.Y - 4, plan.Known(legs[i], "text", ", ") + more, "s", step - 12);
+            canvas.TextWithin(x + 6, item.Y + 13, plan.Known(legs[i], "note", ", "), "s m", step - 12);
         }
     }
 
     private void Load(Item item)
     {
         var (circuit, y) = (item.Subject, item.Y);
-        var x = columns.Load + 28;
+        var x = columns.Load + (circuit.FedBoard is not null && item.IsOwn ? 12 : 28);
         var name = Scene.Name(circuit);
         if (circuit.FedBoard is { } fed)
         {
@@ -166,22 +166,22 @@ internal sealed class DiagramPen(Scene scene, PicturePlan plan, Canvas canvas, C
             if (item.IsOwn)
             {
                 canvas.Line(columns.Load, y, columns.Load, y + Layout.RowHeight, "line");
-                canvas.TextWithin(x - 16, y - 2, words, "t", 11, columns.LoadRoom + 16);
+                canvas.TextWithin(x, y - 2, words, "t", columns.LoadRoom);
             }
             else
             {
                 using var link = canvas.Link(diagramOf(fed), $"{circuit.Key} feeds board {fed.Key}: its diagram");
                 canvas.Use("load", columns.Load, y);
-                canvas.TextWithin(x, y - 2, words, "t", 11, columns.LoadRoom);
+                canvas.TextWithin(x, y - 2, words, "t", columns.LoadRoom);
             }
         }
         else
         {
             canvas.Use(LoadSymbol(circuit), columns.Load, y);
-            canvas.TextWithin(x, y - 2, name, "t", 11, columns.LoadRoom);
+            canvas.TextWithin(x, y - 2, name, "t", columns.LoadRoom);
         }
 
-        canvas.TextWithin(x, y + 12, plan.Known(circuit, "text", " · "), "s m", 10, columns.LoadRoom);
+        canvas.TextWithin(x, y + 12, plan.Known(circuit, "text", " · "), "s m", columns.LoadRoom);
     }
 
     private void Folded(Item item)
@@ -194,7 +194,7 @@ internal sealed class DiagramPen(Scene scene, PicturePlan plan, Canvas canvas, C
         using (canvas.Link(diagramOf(board), $"Board {board.Key}: diagram of its other circuits"))
         {
             canvas.Text(columns.Load + 12, item.Y - 2, circuits.Length == 1 ? "1 circuit" : $"{circuits.Length} circuits", "t");
-            canvas.TextWithin(columns.Load + 12, item.Y + 12, $"{standing.NotMet} findings not met, {standing.Open} open", "s m", 10, columns.LoadRoom + 16);
+            canvas.TextWithin(columns.Load + 12, item.Y + 12, $"findings: {standing.NotMet} not met, {standing.Open} open", "s m", columns.LoadRoom + 16);
         }
 
         Badge(standing, $"Circuits of {board.Key}", item.Y, isFlat: false);
@@ -214,14 +214,15 @@ internal sealed class DiagramPen(Scene scene, PicturePlan plan, Canvas canvas, C
         using var link = canvas.Link(Anchor.Of(lead.Key), $"{label}: {lead.VerdictText}, {standing.Headline}, {standing.Topic}");
         canvas.Use(Standing.Mark(lead), x, y);
         canvas.Text(x + 14, isFlat ? y + 4 : y - 2, standing.Headline, "t b");
+        var after = Canvas.WidthOf(standing.Headline, "t b") + 6;
         if (isFlat)
         {
-            var after = TextWidth.Of(standing.Headline, 12) + 8;
-            canvas.TextWithin(x + 14 + after, y + 4, standing.Topic, "s m", 10, room - after);
+            canvas.TextWithin(x + 14 + after, y + 4, standing.Topic, "s m", room - after);
         }
         else
         {
-            canvas.TextWithin(x + 14, y + 12, standing.Topic, "s m", 10, room);
+            canvas.TextWithin(x + 14 + after, y - 2, standing.Least, "s m", room - after);
+            canvas.TextWithin(x + 14, y + 12, standing.Topic, "s m", room);
         }
     }
 

@@ -11,6 +11,7 @@ internal sealed class Layout(Scene scene)
     public const double RowHeight = 36;
     private const double HeadHeight = 46;
     private const double BondingHeight = 24;
+    private const double GapAbove = 14;
 
     private readonly List<Item> _items = [];
     private double _y = 26;
@@ -63,7 +64,7 @@ internal sealed class Layout(Scene scene)
             Add(ItemKind.Bonding, bonding, 0, true, BondingHeight);
         }
 
-        _y += 22;
+        _y += 12;
     }
 
     private void Roots(bool folded)
@@ -76,6 +77,7 @@ internal sealed class Layout(Scene scene)
 
     private void Board(DesignSubject board, int depth, bool folded)
     {
+        _y += depth == 0 && _items[^1].Kind != ItemKind.Origin ? GapAbove : 0;
         Add(ItemKind.Board, board, depth, true, HeadHeight);
         foreach (var circuit in scene.CircuitsOf[board].Where(circuit => !folded || circuit.FedBoard is not null))
         {

@@ -1,5 +1,4 @@
 using System.Globalization;
-using Auditor.Engine.Findings;
 using Auditor.Engine.Installation;
 using Auditor.Engine.RuleSets;
 using Auditor.Formulas.Values;

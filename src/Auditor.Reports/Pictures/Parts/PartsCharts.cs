@@ -1,8 +1,8 @@
 using System.Globalization;
+using Auditor.Documents;
 using Auditor.Engine.Installation;
 using Auditor.Engine.RuleSets;
 using Auditor.Formulas.Values;
-using Auditor.Quantities;
 using Auditor.Reports.Pictures.Drawing;
 using Auditor.Reports.Pictures.Plotting;
 using OxyPlot;
@@ -104,10 +104,16 @@ internal sealed class PartsCharts(Scene scene, PicturePlan plan)
             }
         }
 
-        var standing = scene.StandingOf(row);
+        var types = plan.Settings.Texts("clause-types");
+        var standing = Standing.Of([.. scene.FindingsOf(row).Where(finding => types.Contains(finding.Rule.Clause.Type))]);
         var texts = string.Join(" / ", plan.All(row.Shape, "reading").Select(reading => reading.Show(row)));
         using var link = standing.Lead is { } lead ? canvas.Link(Anchor.Of(lead.Key), $"{Scene.Label(row)}: {texts}") : canvas.Open("g");
-        canvas.TextWithin(Right + 20, y + 4, texts, row.Parent is null ? "s b" : "s", Width - Right - 30);
+        if (standing.Lead is not null)
+        {
+            canvas.Use(Standing.Mark(standing.Lead), Right + 24, y);
+        }
+
+        canvas.TextWithin(Right + 40, y + 4, texts, row.Parent is null ? "s b" : "s", Width - Right - 50);
     }
 
     private static void Mark(Canvas canvas, double x, double y, int reading)

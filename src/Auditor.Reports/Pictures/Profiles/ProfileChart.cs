@@ -20,7 +20,10 @@ namespace Auditor.Reports.Pictures.Profiles;
 internal sealed class ProfileChart(Scene scene, PicturePlan plan, IReadOnlyList<DesignSubject> ends, string id, string title)
 {
     private const int MostNamed = 8;
+    private const int MostLimits = 3;
     private const double NameHeight = 26;
+
+    private static readonly string[] Roles = ["along", "value", "limit"];
 
     private static readonly OxySize Size = new(960, 460);
     private static readonly OxyRect Area = new(64, 34, 600, 380);
@@ -45,7 +48,7 @@ internal sealed class ProfileChart(Scene scene, PicturePlan plan, IReadOnlyList<
         }
 
         plot.Draw(canvas);
-        Limits(canvas, plot, limits);
+        Limits(canvas, plot, known, limits);
         Boards(canvas, plot, known);
         Ends(canvas, plot, known, limits);
         Names(canvas, plot, known);
@@ -93,13 +96,24 @@ internal sealed class ProfileChart(Scene scene, PicturePlan plan, IReadOnlyList<
         }
     }
 
-    private void Limits(Canvas canvas, Plot plot, double[] limits)
+    /// <summary>Few limits are lines across the chart; many are a stroke above or below each end.</summary>
+    private void Limits(Canvas canvas, Plot plot, IEnumerable<PathEnd> known, double[] limits)
     {
+        if (limits.Length > MostLimits)
+        {
+            var strokes = known.Where(end => end.Limit is not null).Select(end => plot.Place(end.Along, end.Limit!.Value))
+                .Select(at => $"M{Canvas.N(at.X - 7)} {Canvas.N(at.Y)}h14").Distinct();
+            canvas.Path(string.Concat(strokes), "limit");
+            canvas.Line(Area.Left + 12, Area.Top - 14, Area.Left + 26, Area.Top - 14, "limit");
+            canvas.Text(Area.Left + 32, Area.Top - 10, "the most that is permitted at the end of that length", "s");
+            return;
+        }
+
         foreach (var (index, limit) in limits.Index())
         {
             var y = plot.Place(0, limit).Y;
             canvas.Line(Area.Left, y, Area.Right, y, "limit" + (index % 2 == 0 ? " dash" : " long"));
-            canvas.Text(Area.Left + 28, y - 5, $"at most {ValueText.ShowNumber(limit, _unit)}", "s b");
+            canvas.Text(Area.Left + 28, y - 5, $"at most {ValueText.ShowNumber(limit, _unit)}", "s b halo");
             Shape(canvas, Area.Left + 16, y - 9, index);
         }
     }
@@ -132,7 +146,7 @@ internal sealed class ProfileChart(Scene scene, PicturePlan plan, IReadOnlyList<
         foreach (var end in known)
         {
             var at = plot.Place(end.Along, end.Value);
-            Shape(canvas, at.X, at.Y, end.Limit is { } limit ? Array.IndexOf(limits, limit) : -1);
+            Shape(canvas, at.X, at.Y, end.Limit is { } limit && limits.Length <= MostLimits ? Array.IndexOf(limits, limit) : -1);
         }
     }
 
@@ -174,9 +188,9 @@ internal sealed class ProfileChart(Scene scene, PicturePlan plan, IReadOnlyList<
         + (end.Limit is { } limit ? $" of {ValueText.ShowNumber(limit, _unit)}" : "") + $", {ValueText.ShowNumber(end.Along, _length)}";
 
     private PictureTable Table() => new(
-        "Values at the end of each path, and their limits", ["Circuit", "Name", .. new[] { "along", "value", "limit" }.Select(role => plan.One(ends[0].Shape, role)?.Label ?? role)],
+        "Values at the end of each path, and their limits", ["Circuit", "Name", .. Roles.Select(role => plan.One(ends[0].Shape, role)?.Label ?? role)],
         [.. ends.Select(IReadOnlyList<string> (end) =>
-            [end.Key, Scene.Name(end), .. new[] { "along", "value", "limit" }.Select(role => plan.One(end.Shape, role)?.Show(end) ?? "")])]);
+            [end.Key, Scene.Name(end), .. Roles.Select(role => plan.One(end.Shape, role)?.Show(end) ?? "")])]);
 
     private sealed record PathEnd(DesignSubject Circuit, double Along, double Value, double? Limit)
     {

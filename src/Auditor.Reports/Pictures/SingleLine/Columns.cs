@@ -9,16 +9,16 @@ internal sealed class Columns(int depth)
     private const double Indent = 26;
 
     /// <summary>Where the load symbols begin.</summary>
-    public double Load { get; } = 520 + (Indent * Math.Max(0, depth - 3));
+    public double Load { get; } = 536 + (Indent * Math.Max(0, depth - 3));
 
     /// <summary>Where the marks stand.</summary>
-    public double Badge => Load + 256;
+    public double Badge => Load + 252;
 
     /// <summary>Room for the words beside a mark.</summary>
     public double BadgeRoom => Width - Badge - 18;
 
     /// <summary>Width of the diagram.</summary>
-    public double Width => Load + 460;
+    public double Width => Load + 464;
 
     /// <summary>Room for the words beside a load.</summary>
     public double LoadRoom => Badge - Load - 40;
@@ -27,11 +27,11 @@ internal sealed class Columns(int depth)
     public static double Bus(int boardDepth) => FirstBus + (Indent * boardDepth);
 
     /// <summary>Middle of the protective devices of a board.</summary>
-    public static double Device(int boardDepth) => Bus(boardDepth) + 74;
+    public static double Device(int boardDepth) => Bus(boardDepth) + 86;
 
     /// <summary>Middle of the residual current devices of a board.</summary>
-    public static double Rcd(int boardDepth) => Bus(boardDepth) + 132;
+    public static double Rcd(int boardDepth) => Bus(boardDepth) + 146;
 
     /// <summary>Where the cables of a board begin.</summary>
-    public static double Cable(int boardDepth) => Bus(boardDepth) + 166;
+    public static double Cable(int boardDepth) => Bus(boardDepth) + 180;
 }

@@ -10,7 +10,8 @@ namespace Auditor.Reports.Pictures.SingleLine;
 /// <param name="canvas">Where to draw.</param>
 /// <param name="columns">Where things stand.</param>
 /// <param name="diagramOf">Id of the diagram that draws the circuits of a board.</param>
-internal sealed class DiagramPen(Scene scene, PicturePlan plan, Canvas canvas, Columns columns, Func<DesignSubject, string> diagramOf)
+/// <param name="isOverview">Whether the circuits of boards are left to other diagrams.</param>
+internal sealed class DiagramPen(Scene scene, PicturePlan plan, Canvas canvas, Columns columns, Func<DesignSubject, string> diagramOf, bool isOverview)
 {
     /// <summary>The symbols of a kind of node that a diagram needs.</summary>
     public IEnumerable<string> SymbolsOf(Item item) => item.Kind switch
@@ -18,7 +19,7 @@ internal sealed class DiagramPen(Scene scene, PicturePlan plan, Canvas canvas, C
         ItemKind.Origin => [plan.Holds(item.Subject, "transformer") ? "transformer" : "incoming", DeviceSymbol(item.Subject), "earth"],
         ItemKind.Board => Chosen(("switch", plan.Holds(item.Subject, "switch")), ("rcd", plan.Holds(item.Subject, "rcd"))),
         ItemKind.Circuit => Chosen(
-            (DeviceSymbol(item.Subject), true), ("rcd", plan.Holds(item.Subject, "rcd")), (LoadSymbol(item.Subject), item.Subject.FedBoard is null)),
+            (DeviceSymbol(item.Subject), true), ("rcd", plan.Holds(item.Subject, "rcd")), (item.Subject.FedBoard is null ? LoadSymbol(item.Subject) : "load", item.Subject.FedBoard is null || !item.IsOwn)),
         _ => [],
     };
 
@@ -30,8 +31,7 @@ internal sealed class DiagramPen(Scene scene, PicturePlan plan, Canvas canvas, C
             case ItemKind.Origin: Origin(item); break;
             case ItemKind.Bonding: Bonding(item); break;
             case ItemKind.Board: Board(item); break;
-            case ItemKind.Circuit: Circuit(item); break;
-            default: Folded(item); break;
+            default: Circuit(item); break;
         }
     }
 
@@ -82,20 +82,41 @@ internal sealed class DiagramPen(Scene scene, PicturePlan plan, Canvas canvas, C
             canvas.Line(bus, y, far, y, "line");
         }
 
+        var residual = plan.Holds(board, "rcd") ? plan.Known(board, "rcd-text") : "";
         if (plan.Holds(board, "rcd"))
         {
             canvas.Use("rcd", ring, y);
+            canvas.TextWithin(ring, y + 17, isNested ? residual : "", "s c", 62);
         }
 
-        var room = (isNested ? columns.Load : columns.Badge) - words - 16;
+        var room = columns.Load - words - 12;
         canvas.TextWithin(words, y - 5, Scene.Label(board), "t b", room);
-        var said = new[] { plan.Known(board, "text", " · "), plan.Known(board, "rcd-text") is { Length: > 0 } rcd ? "RCD " + rcd : "" };
+        var feeder = !isNested && board.Parent!.Parent is not null ? $"fed from {board.Parent.Key}" : "";
+        var said = new[] { feeder, plan.Known(board, "text", " · "), isNested || residual.Length == 0 ? "" : "RCD " + residual };
         canvas.TextWithin(words, y + 12, string.Join(" · ", said.Where(text => text.Length > 0)), "s m", room);
         canvas.TextWithin(device - 15, y + 17, hasSwitch ? plan.Known(board, "switch-text") : "", "s m", 44);
         if (item.IsOwn)
         {
             Badge(board, y);
         }
+        else if (isOverview)
+        {
+            Inside(board, y);
+        }
+    }
+
+    /// <summary>What a board holds that another diagram draws.</summary>
+    private void Inside(DesignSubject board, double y)
+    {
+        var circuits = scene.CircuitsOf[board].ToArray();
+        var standing = Standing.Of([.. circuits.Prepend(board).SelectMany(scene.FindingsOf)]);
+        using (canvas.Link(diagramOf(board), $"Board {board.Key}: its diagram"))
+        {
+            canvas.Text(columns.Load + 12, y - 2, circuits.Length == 1 ? "1 circuit" : $"{circuits.Length} circuits", "t");
+            canvas.TextWithin(columns.Load + 12, y + 12, $"findings: {standing.NotMet} not met, {standing.Open} open", "s m", columns.LoadRoom);
+        }
+
+        Badge(standing, $"Board {board.Key} and its circuits", y, isFlat: false);
     }
 
     private void Circuit(Item item)
@@ -182,22 +203,6 @@ internal sealed class DiagramPen(Scene scene, PicturePlan plan, Canvas canvas, C
         }
 
         canvas.TextWithin(x, y + 12, plan.Known(circuit, "text", " · "), "s m", columns.LoadRoom);
-    }
-
-    private void Folded(Item item)
-    {
-        var board = item.Subject;
-        var circuits = scene.CircuitsOf[board].Where(circuit => circuit.FedBoard is null).ToArray();
-        var standing = Standing.Of([.. circuits.SelectMany(scene.FindingsOf)]);
-        var bus = Columns.Bus(item.Depth);
-        canvas.Line(bus, item.Y, columns.Load, item.Y, "line dots");
-        using (canvas.Link(diagramOf(board), $"Board {board.Key}: diagram of its other circuits"))
-        {
-            canvas.Text(columns.Load + 12, item.Y - 2, circuits.Length == 1 ? "1 circuit" : $"{circuits.Length} circuits", "t");
-            canvas.TextWithin(columns.Load + 12, item.Y + 12, $"findings: {standing.NotMet} not met, {standing.Open} open", "s m", columns.LoadRoom + 16);
-        }
-
-        Badge(standing, $"Circuits of {board.Key}", item.Y, isFlat: false);
     }
 
     private void Badge(DesignSubject subject, double y, bool isFlat = false) => Badge(scene.StandingOf(subject), Scene.Label(subject), y, isFlat);

@@ -16,15 +16,22 @@ internal enum ItemKind
 
     /// <summary>A circuit.</summary>
     Circuit,
-
-    /// <summary>Circuits of a board that another diagram shows.</summary>
-    Folded,
 }
 
 /// <summary>One line of a diagram.</summary>
 /// <param name="Kind">What stands there.</param>
-/// <param name="Subject">The subject; for folded circuits their board.</param>
-/// <param name="Y">Height of its conductor from the top.</param>
+/// <param name="Subject">The subject.</param>
 /// <param name="Depth">How many boards stand between it and a board at the origin.</param>
 /// <param name="IsOwn">Whether the subject is drawn here; otherwise it is only referred to, and drawn in another diagram.</param>
-internal sealed record Item(ItemKind Kind, DesignSubject Subject, double Y, int Depth, bool IsOwn);
+/// <param name="Y">Height of its conductor from the top.</param>
+internal sealed record Item(ItemKind Kind, DesignSubject Subject, int Depth, bool IsOwn, double Y = 0)
+{
+    /// <summary>Height that it takes.</summary>
+    public double Height => Kind switch
+    {
+        ItemKind.Origin => 84,
+        ItemKind.Bonding => 24,
+        ItemKind.Board => 46,
+        _ => Layout.RowHeight,
+    };
+}

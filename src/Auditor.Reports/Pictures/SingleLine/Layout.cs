@@ -6,15 +6,18 @@ namespace Auditor.Reports.Pictures.SingleLine;
 /// Places the lines of one diagram below one another: the origin, then each board with its circuits, a board that a circuit feeds right
 /// below that circuit and set in, as in an outline.
 /// </summary>
-internal sealed class Layout(Scene scene)
+internal sealed class Layout
 {
     public const double RowHeight = 36;
-    private const double HeadHeight = 46;
-    private const double BondingHeight = 24;
-    private const double GapAbove = 14;
+
+    /// <summary>Height that fills a printed A4 page at the width of the diagram.</summary>
+    public const double Page = 1400;
+
+    private const double Top = 26;
+    private const double Gap = 14;
 
     private readonly List<Item> _items = [];
-    private double _y = 26;
+    private double _y = Top;
 
     /// <summary>The lines from the top.</summary>
     public IReadOnlyList<Item> Items => _items;
@@ -23,80 +26,95 @@ internal sealed class Layout(Scene scene)
     public double Height => _y;
 
     /// <summary>How deep boards stand below one another.</summary>
-    public int Depth => _items.Count == 0 ? 0 : _items.Max(item => item.Depth);
+    public int Depth => _items.Max(item => item.Depth);
 
-    /// <summary>The whole installation.</summary>
+    /// <summary>The whole installation in one diagram.</summary>
     public static Layout Whole(Scene scene)
     {
-        var layout = new Layout(scene);
-        layout.Origin();
-        layout.Roots(folded: false);
+        var layout = new Layout();
+        foreach (var block in Blocks(scene, folded: false))
+        {
+            layout.Add(block);
+        }
+
         return layout;
     }
 
-    /// <summary>Origin, boards and what feeds them; all other circuits are left to the diagrams of the boards.</summary>
-    public static Layout Overview(Scene scene)
+    /// <summary>
+    /// Origin, boards and what feeds them; all other circuits are left to the diagrams of the boards. Where a page is full the next begins with
+    /// the board at the origin whose circuits go on.
+    /// </summary>
+    public static IReadOnlyList<Layout> Overview(Scene scene)
     {
-        var layout = new Layout(scene);
-        layout.Origin();
-        layout.Roots(folded: true);
-        return layout;
+        var pages = new List<Layout> { new() };
+        Item? board = null;
+        foreach (var block in Blocks(scene, folded: true))
+        {
+            if (pages[^1]._y + block.Sum(item => item.Height) > Page && pages[^1]._items.Count > 1)
+            {
+                pages.Add(new Layout());
+                pages[^1].Add(block[0].Kind == ItemKind.Circuit ? [board! with { IsOwn = false }] : []);
+            }
+
+            board = block[0].Kind == ItemKind.Board ? block[0] : board;
+            pages[^1].Add(block);
+        }
+
+        return pages;
     }
 
     /// <summary>Some circuits of a board; those that feed boards are only referred to, since the overview shows them.</summary>
-    public static Layout Part(Scene scene, DesignSubject board, IEnumerable<DesignSubject> circuits)
+    /// <param name="board">The board.</param>
+    /// <param name="circuits">The circuits.</param>
+    /// <param name="isFirst">Whether they are the first of the board, and it is drawn here; otherwise it is only referred to.</param>
+    public static Layout Part(DesignSubject board, IEnumerable<DesignSubject> circuits, bool isFirst)
     {
-        var layout = new Layout(scene);
-        layout.Add(ItemKind.Board, board, 0, false, HeadHeight);
-        foreach (var circuit in circuits)
-        {
-            layout.Add(ItemKind.Circuit, circuit, 0, circuit.FedBoard is null, RowHeight);
-        }
-
+        var layout = new Layout();
+        layout.Add([new Item(ItemKind.Board, board, 0, isFirst), .. circuits.Select(circuit => new Item(ItemKind.Circuit, circuit, 0, circuit.FedBoard is null))]);
         return layout;
     }
 
-    private void Origin()
+    /// <summary>What may not be torn apart: the origin, the head of a board there, each of its circuits with all that it feeds.</summary>
+    private static IEnumerable<List<Item>> Blocks(Scene scene, bool folded)
     {
-        Add(ItemKind.Origin, scene.Installation, 0, true, 84);
-        foreach (var bonding in scene.Bondings)
-        {
-            Add(ItemKind.Bonding, bonding, 0, true, BondingHeight);
-        }
-
-        _y += 12;
-    }
-
-    private void Roots(bool folded)
-    {
+        yield return [new Item(ItemKind.Origin, scene.Installation, 0, true), .. scene.Bondings.Select(bonding => new Item(ItemKind.Bonding, bonding, 0, true))];
         foreach (var board in scene.Boards.Where(board => board.Parent == scene.Installation))
         {
-            Board(board, 0, folded);
-        }
-    }
-
-    private void Board(DesignSubject board, int depth, bool folded)
-    {
-        _y += depth == 0 && _items[^1].Kind != ItemKind.Origin ? GapAbove : 0;
-        Add(ItemKind.Board, board, depth, true, HeadHeight);
-        foreach (var circuit in scene.CircuitsOf[board].Where(circuit => !folded || circuit.FedBoard is not null))
-        {
-            Add(ItemKind.Circuit, circuit, depth, true, RowHeight);
-            if (circuit.FedBoard is { } fed)
+            yield return [Head(scene, board, 0, folded)];
+            foreach (var circuit in Circuits(scene, board, folded))
             {
-                Board(fed, depth + 1, folded);
+                yield return [.. WithFed(scene, circuit, 0, folded)];
             }
         }
+    }
 
-        if (folded && scene.CircuitsOf[board].Any(circuit => circuit.FedBoard is null))
+    /// <summary>A board with circuits has a diagram of its own where circuits are left out here.</summary>
+    private static Item Head(Scene scene, DesignSubject board, int depth, bool folded) =>
+        new(ItemKind.Board, board, depth, !folded || !scene.CircuitsOf[board].Any());
+
+    private static IEnumerable<DesignSubject> Circuits(Scene scene, DesignSubject board, bool folded) =>
+        scene.CircuitsOf[board].Where(circuit => !folded || circuit.FedBoard is not null);
+
+    private static IEnumerable<Item> WithFed(Scene scene, DesignSubject circuit, int depth, bool folded)
+    {
+        yield return new Item(ItemKind.Circuit, circuit, depth, true);
+        if (circuit.FedBoard is { } fed)
         {
-            Add(ItemKind.Folded, board, depth, false, RowHeight);
+            yield return Head(scene, fed, depth + 1, folded);
+            foreach (var item in Circuits(scene, fed, folded).SelectMany(below => WithFed(scene, below, depth + 1, folded)))
+            {
+                yield return item;
+            }
         }
     }
 
-    private void Add(ItemKind kind, DesignSubject subject, int depth, bool isOwn, double height)
+    private void Add(IEnumerable<Item> block)
     {
-        _items.Add(new Item(kind, subject, _y, depth, isOwn));
-        _y += height;
+        foreach (var item in block)
+        {
+            _y += item is { Kind: ItemKind.Board, Depth: 0 } && _items.Count > 0 ? Gap : 0;
+            _items.Add(item with { Y = _y });
+            _y += item.Height;
+        }
     }
 }

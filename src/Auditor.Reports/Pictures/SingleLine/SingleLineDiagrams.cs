@@ -14,10 +14,8 @@ namespace Auditor.Reports.Pictures.SingleLine;
 /// <param name="plan">What to show.</param>
 internal sealed class SingleLineDiagrams(Scene scene, PicturePlan plan)
 {
-    /// <summary>Height that fills a printed A4 page at the width of the diagram.</summary>
-    private const double Page = 1380;
-
-    private const int RowsOfPage = 35;
+    private const int RowsOfPage = 34;
+    private const int MostDeep = 4;
 
     private readonly Dictionary<DesignSubject, int> _numbers = scene.Boards.Index().ToDictionary(entry => entry.Item, entry => entry.Index + 1);
 
@@ -25,30 +23,35 @@ internal sealed class SingleLineDiagrams(Scene scene, PicturePlan plan)
     public IEnumerable<Picture> Draw()
     {
         var whole = Layout.Whole(scene);
-        if (whole.Height <= Page && whole.Depth <= 4)
+        if (whole.Height <= Layout.Page && whole.Depth <= MostDeep)
         {
-            return [Draw(plan.Id, plan.Title, whole)];
+            return [Draw(plan.Id, plan.Title, whole, isOverview: false)];
         }
 
-        return scene.Boards.SelectMany(Parts).Prepend(Draw(plan.Id, plan.Title + ": origin and boards", Layout.Overview(scene)));
+        var overview = Layout.Overview(scene);
+        return overview.Index().Select(page => Draw(
+            Numbered(plan.Id, page.Index), $"{plan.Title}: origin and boards" + (overview.Count > 1 ? $", part {page.Index + 1} of {overview.Count}" : ""),
+            page.Item, isOverview: true)).Concat(scene.Boards.SelectMany(Parts));
     }
 
     private IEnumerable<Picture> Parts(DesignSubject board)
     {
         var pages = scene.CircuitsOf[board].Chunk(RowsOfPage).ToArray();
-        return pages.Select((page, number) => Draw(
-            number == 0 ? IdOf(board) : string.Create(CultureInfo.InvariantCulture, $"{IdOf(board)}-{number + 1}"),
-            $"{plan.Title}: {Scene.Label(board)}" + (pages.Length > 1 ? $", {Texts.OwnId(page[0])} to {Texts.OwnId(page[^1])}" : ""),
-            Layout.Part(scene, board, page)));
+        return pages.Index().Select(page => Draw(
+            Numbered(IdOf(board), page.Index),
+            $"{plan.Title}: {Scene.Label(board)}" + (pages.Length > 1 ? $", {Texts.OwnId(page.Item[0])} to {Texts.OwnId(page.Item[^1])}" : ""),
+            Layout.Part(board, page.Item, page.Index == 0), isOverview: false));
     }
+
+    private static string Numbered(string id, int index) => index == 0 ? id : string.Create(CultureInfo.InvariantCulture, $"{id}-{index + 1}");
 
     private string IdOf(DesignSubject board) => string.Create(CultureInfo.InvariantCulture, $"{plan.Id}-b{_numbers[board]}");
 
-    private Picture Draw(string id, string title, Layout layout)
+    private Picture Draw(string id, string title, Layout layout, bool isOverview)
     {
         var columns = new Columns(layout.Depth);
         var canvas = new Canvas(id, title, plan.About);
-        var pen = new DiagramPen(scene, plan, canvas, columns, board => scene.CircuitsOf[board].Any() ? IdOf(board) : plan.Id);
+        var pen = new DiagramPen(scene, plan, canvas, columns, board => scene.CircuitsOf[board].Any() ? IdOf(board) : plan.Id, isOverview);
         using (canvas.Definitions())
         {
             Badges.Define(canvas, Badges.All.Select(badge => badge.Mark));
@@ -76,13 +79,11 @@ internal sealed class SingleLineDiagrams(Scene scene, PicturePlan plan)
 
         foreach (var head in heads)
         {
-            var end = layout.Items.LastOrDefault(item => item.Kind is ItemKind.Circuit or ItemKind.Folded && BoardOf(item) == head.Subject)?.Y ?? head.Y;
+            var end = layout.Items.LastOrDefault(item => item.Kind == ItemKind.Circuit && item.Subject.Parent == head.Subject)?.Y ?? head.Y;
             var x = Columns.Bus(head.Depth);
             canvas.Line(x, head.Y - 6, x, end + 6, "heavy");
         }
     }
-
-    private static DesignSubject BoardOf(Item item) => item.Kind == ItemKind.Folded ? item.Subject : item.Subject.Parent!;
 
     private PictureTable Table(Layout layout) => new(
         "What the diagram draws, with the gravest finding and the least margin of each",

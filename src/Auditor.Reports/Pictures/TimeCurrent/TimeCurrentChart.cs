@@ -15,7 +15,7 @@ namespace Auditor.Reports.Pictures.TimeCurrent;
 /// <param name="id">Id of the picture.</param>
 internal sealed class TimeCurrentChart(Scene scene, PicturePlan plan, DesignSubject circuit, string id)
 {
-    private static readonly OxySize Size = new(800, 410);
+    private static readonly OxySize Size = new(800, 442);
     private static readonly OxyRect Area = new(60, 46, 440, 360);
     private static readonly Unit Ampere = UnitCatalog.Find("A")!;
     private static readonly Unit Second = UnitCatalog.Find("s")!;
@@ -60,6 +60,7 @@ internal sealed class TimeCurrentChart(Scene scene, PicturePlan plan, DesignSubj
     {
         if (band.Slow.Count == 0)
         {
+            _legend.Add(("", label, "no curve is held, or its rating is not known"));
             return;
         }
 
@@ -137,7 +138,11 @@ internal sealed class TimeCurrentChart(Scene scene, PicturePlan plan, DesignSubj
         foreach (var (index, (look, label, value)) in _legend.Index())
         {
             var y = Area.Top + 20 + (index * 42);
-            canvas.Line(Area.Right + 20, y, Area.Right + 52, y, look);
+            if (look.Length > 0)
+            {
+                canvas.Line(Area.Right + 20, y, Area.Right + 52, y, look);
+            }
+
             canvas.TextWithin(Area.Right + 60, y + 4, label, "t", Size.Width - Area.Right - 68);
             canvas.TextWithin(Area.Right + 60, y + 19, value, "s m", Size.Width - Area.Right - 68);
         }

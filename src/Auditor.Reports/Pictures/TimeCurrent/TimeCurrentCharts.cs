@@ -1,5 +1,4 @@
 using Auditor.Documents;
-using Auditor.Engine.Installation;
 using Auditor.Engine.RuleSets;
 
 namespace Auditor.Reports.Pictures.TimeCurrent;

@@ -16,6 +16,7 @@ internal sealed class RuleFileReader(RuleHome home, Problems problems)
         ["sheet"] = "sheet",
         ["rule"] = "provision",
         ["adjustment"] = "adjustment",
+        ["picture"] = "picture",
         ["set"] = "set",
     };
 

@@ -40,6 +40,9 @@ internal static class RuleMessages
     public static Problem RecordRule(SourceSpan span, string id) => Problem.Error(
         "record-rule", $"no set may have a rule `{id}`", span, "the program keeps ids that begin with `record-` for its own rules about departures and house sets");
 
+    public static Problem SecondPicture(SourceSpan span, string id, string otherPath) => Problem.Error(
+        "duplicate-picture", $"there is a picture `{id}` already", span, $"it stands in {otherPath}; a house set may replace a picture, a set may not have it twice");
+
     public static Problem UnitOrGives(SourceSpan span) => Problem.Error(
         "unit-or-gives", "a quantity has either a `unit` or `gives: text` or `gives: flag`", span, null);
 

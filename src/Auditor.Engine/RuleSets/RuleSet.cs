@@ -46,11 +46,15 @@ public sealed class RuleSet
 
     /// <summary>What can be changed in a design, by id.</summary>
     public IReadOnlyList<Adjustment> Adjustments { get; internal init; } = [];
+
     /// <summary>The rules of the program about the record of an audit, by id: they come with every set, and none changes them.</summary>
     public IReadOnlyList<Rule> RecordRules { get; }
 
     /// <summary>The rules of the set, then those about the record.</summary>
     public IEnumerable<Rule> AllRules => Rules.Concat(RecordRules);
+
+    /// <summary>The pictures that its reports show, in their order.</summary>
+    public IReadOnlyList<PicturePlan> Pictures { get; internal init; } = [];
 
     /// <summary>The files that it was read from.</summary>
     public IReadOnlyList<InputFile> Files { get; }

@@ -40,7 +40,7 @@ public sealed class RuleSetLoader
 
     private RuleSet? Compose(IReadOnlyList<SetFile> chain, Task<DesignSchema> schemaTask)
     {
-        var files = chain.Select(set => _reader.Read(set.Files(["tables", "curves", "sheets", "provisions", "adjustments"], _problems))).ToArray();
+        var files = chain.Select(set => _reader.Read(set.Files(["tables", "curves", "sheets", "provisions", "adjustments", "pictures"], _problems))).ToArray();
         var schema = schemaTask.GetAwaiter().GetResult();
         var parameters = ParameterReader.Read(chain, _problems);
         var world = World(files, parameters);
@@ -50,12 +50,17 @@ public sealed class RuleSetLoader
         var quantities = sheets.Bind(world);
         new CircleCheck(quantities, _problems).Run();
         var reader = new RuleReader(schema.Shapes, world, _problems);
-        var rules = Rules(files, reader);
+        var rules = ById(files, "rule", reader.Read, RuleMessages.SecondRule);
         var record = _reader.Read(_home.RecordRules()).Select(reader.Read).OfType<Rule>().ToArray();
-        var adjustments = Adjustments(files, new AdjustmentReader(schema.Shapes, world, _problems));
+        var adjustments = ById(files, "adjustment", new AdjustmentReader(schema.Shapes, world, _problems).Read, RuleMessages.SecondAdjustment);
+        var pictures = ById(files, "picture", new PicturePlanReader(schema.Shapes, world, quantities, _problems).Read, RuleMessages.SecondPicture);
         return _problems.HasErrors
             ? null
-            : new RuleSet(Title(chain, files), schema, world, parameters, quantities, rules, record, Hashes(chain, files)) { Adjustments = adjustments };
+            : new RuleSet(Title(chain, files), schema, world, parameters, quantities, rules, record, Hashes(chain, files))
+            {
+                Adjustments = adjustments,
+                Pictures = [.. pictures.OrderBy(plan => plan.Place).ThenBy(plan => plan.Id, StringComparer.Ordinal)],
+            };
     }
 
     private FormulaWorld World(IReadOnlyList<RuleFile>[] files, IReadOnlyList<Parameter> parameters)
@@ -74,44 +79,28 @@ public sealed class RuleSetLoader
         return new FormulaWorld(lookups, curves, parameters.ToDictionary(parameter => parameter.Slot.Name, parameter => parameter.Slot));
     }
 
-    private List<Rule> Rules(IReadOnlyList<RuleFile>[] files, RuleReader reader)
+    /// <summary>What the files of a kind hold, by id. A later set replaces what an earlier one holds; in one set an id stands once.</summary>
+    private List<T> ById<T>(IReadOnlyList<RuleFile>[] files, string kind, Func<RuleFile, T?> read, Func<SourceSpan, string, string, Problem> second)
+        where T : class
     {
-        var rules = new Dictionary<string, (Rule Rule, int Set)>();
-        Each(files, "rule", (file, set) =>
+        var found = new SortedDictionary<string, (T Item, int Set, string Path)>(StringComparer.Ordinal);
+        Each(files, kind, (file, set) =>
         {
-            var id = file.Root.Scalar("rule")!;
-            if (id.Text.StartsWith(RuleHome.RecordPrefix, StringComparison.Ordinal))
+            var id = file.Root.Scalar(kind)!;
+            if (kind == "rule" && id.Text.StartsWith(RuleHome.RecordPrefix, StringComparison.Ordinal))
             {
                 _problems.Add(RuleMessages.RecordRule(id.Span, id.Text));
             }
-            else if (rules.TryGetValue(id.Text, out var earlier) && earlier.Set == set)
+            else if (found.TryGetValue(id.Text, out var earlier) && earlier.Set == set)
             {
-                _problems.Add(RuleMessages.SecondRule(id.Span, id.Text, earlier.Rule.Path));
+                _problems.Add(second(id.Span, id.Text, earlier.Path));
             }
-            else if (reader.Read(file) is { } rule)
+            else if (read(file) is { } item)
             {
-                rules[id.Text] = (rule, set);
-            }
-        });
-        return [.. rules.Values.Select(pair => pair.Rule).OrderBy(rule => rule.Id, StringComparer.Ordinal)];
-    }
-
-    private List<Adjustment> Adjustments(IReadOnlyList<RuleFile>[] files, AdjustmentReader reader)
-    {
-        var adjustments = new Dictionary<string, (Adjustment Adjustment, int Set)>();
-        Each(files, "adjustment", (file, set) =>
-        {
-            var id = file.Root.Scalar("adjustment")!;
-            if (adjustments.TryGetValue(id.Text, out var earlier) && earlier.Set == set)
-            {
-                _problems.Add(RuleMessages.SecondAdjustment(id.Span, id.Text, earlier.Adjustment.Node.Span.Source.Path));
-            }
-            else if (reader.Read(file) is { } adjustment)
-            {
-                adjustments[id.Text] = (adjustment, set);
+                found[id.Text] = (item, set, file.Path);
             }
         });
-        return [.. adjustments.Values.Select(pair => pair.Adjustment).OrderBy(adjustment => adjustment.Id, StringComparer.Ordinal)];
+        return [.. found.Values.Select(each => each.Item)];
     }
 
     private static void Each(IReadOnlyList<RuleFile>[] files, string kind, Action<RuleFile, int> action)

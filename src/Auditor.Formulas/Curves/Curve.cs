@@ -39,7 +39,15 @@ public sealed record Curve(
             : Missing($"{Source.Title} gives no time for {current:0.###} A at {rating:0.###} A, which is below its first point");
     }
 
-    private CurveEdge? EdgeFor(double rating) => Slow.FirstOrDefault(edge =>
+    /// <summary>The points of an edge for a device of the rating, in amperes and seconds, by current; empty where the edge is not held.</summary>
+    /// <param name="isSlow">Whether the slow edge is meant; otherwise the fast one.</param>
+    /// <param name="rating">The rating, in amperes.</param>
+    public IReadOnlyList<CurvePoint> PointsOf(bool isSlow, double rating) =>
+        [.. (EdgeFor(isSlow ? Slow : Fast, rating)?.Points ?? []).Select(point => point with { Current = ByRating ? point.Current * rating : point.Current })];
+
+    private CurveEdge? EdgeFor(double rating) => EdgeFor(Slow, rating);
+
+    private CurveEdge? EdgeFor(IReadOnlyList<CurveEdge> edges, double rating) => edges.FirstOrDefault(edge =>
         rating > 0 && (ByRating ? Comparison.AtMost(rating, edge.Rating) : Comparison.Same(rating, edge.Rating)));
 
     private Value NoRating(double rating) => Missing($"{Source.Title} holds no rating of {rating:0.###} A");

@@ -23,7 +23,7 @@ internal abstract class Ink
     /// <summary>
     /// One line: each break, with the blanks around it, becomes one blank; � stands for characters that show nothing or turn the text around.
     /// </summary>
-    protected static string OneLine(string text)
+    internal static string OneLine(string text)
     {
         var line = new StringBuilder(text.Length);
         var afterBreak = false;

@@ -21,6 +21,10 @@ internal static class SubjectText
         return name is null ? subject.Key : $"{subject.Key} {name}";
     }
 
+    /// <summary>The board that a subject belongs to, itself included; null for the installation and its bonding conductors.</summary>
+    public static DesignSubject? BoardOf(DesignSubject subject) =>
+        subject.Shape.Name == "board" ? subject : subject.Parent is { } parent ? BoardOf(parent) : null;
+
     /// <summary>Where a subject is named, or where its mapping begins.</summary>
     public static SourceSpan Place(DesignSubject subject) =>
         (subject.Node.Find("id") ?? subject.Node.Find("to"))?.Span ?? subject.Node.Span.Slice(0, 1);

@@ -116,6 +116,6 @@ public class ReportFileTests
 
         Assert.Null(ReportFormat.Of(path, problems));
 
-        Assert.Equal("known endings: .txt, .md, .json, .sarif, .xml, .csv", Assert.Single(problems.All).Help);
+        Assert.Equal("known endings: .txt, .md, .html, .json, .sarif, .xml, .csv", Assert.Single(problems.All).Help);
     }
 }

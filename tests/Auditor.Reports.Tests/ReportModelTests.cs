@@ -52,8 +52,12 @@ public class ReportModelTests
     {
         var lines = _garden.Action[0].Formulas;
 
-        Assert.Equal(new FormulaLine("value", "Ib = load.current * (load.diversity ?? 1) = (25 A) * ((not known) ?? 1) = 25 A"), lines[0]);
-        Assert.Equal(new FormulaLine("limit", "Iz = min_of(legs, It) = 24 A"), lines[1]);
+        Assert.Equal(
+            new FormulaLine(
+                "value", "Ib = load.current * (load.diversity ?? 1) = (25 A) * ((not known) ?? 1) = 25 A", "Ib = load.current * (load.diversity ?? 1)",
+                "(25 A) * ((not known) ?? 1)"),
+            lines[0]);
+        Assert.Equal(new FormulaLine("limit", "Iz = min_of(legs, It) = 24 A", "Iz = min_of(legs, It)", ""), lines[1]);
     }
 
     [Fact]

@@ -26,6 +26,35 @@ public class TemplateFaultTests
         Golden.Match(ProblemText.Render(problems.All), $"tests/Auditor.Reports.Tests/data/faults/{name}");
     }
 
+    public static TheoryData<string> PageFaults =>
+        [.. Directory.EnumerateFiles(Sheds.Data("page-faults"), "*.scriban-html").Select(path => Path.GetFileNameWithoutExtension(path))
+            .Order(StringComparer.Ordinal)];
+
+    [Theory]
+    [MemberData(nameof(PageFaults))]
+    public void A_fault_in_the_template_of_a_page_is_told_with_its_place(string name)
+    {
+        var problems = new Problems();
+
+        var report = TemplateReport.Render(Sheds.Model("garden"), ReportFormat.Html, Sheds.Template($"page-faults/{name}.scriban-html"), problems, Narrow);
+
+        Assert.Null(report);
+        Golden.Match(ProblemText.Render(problems.All), $"tests/Auditor.Reports.Tests/data/page-faults/{name}");
+    }
+
+    [Fact]
+    public void A_template_that_takes_too_long_is_stopped()
+    {
+        using var folder = new TemporaryFolder();
+        var problems = new Problems();
+        var template = new TemplateFile(folder.Write("t.scriban-html", "{{ report.caution; for a in 1..1000000; a * a; end }}"), "t.scriban-html");
+
+        var report = TemplateReport.Render(Sheds.Model("garden"), ReportFormat.Html, template, problems, TemplateLimits.Default with { Time = TimeSpan.Zero });
+
+        Assert.Null(report);
+        Assert.Equal("template-limit", Assert.Single(problems.All).Code);
+    }
+
     [Theory]
     [InlineData("{{ while true }}{{ end }}")]
     [InlineData("{{ for a in 1..1000 }}{{ for b in 1..1000 }}{{ for c in 1..1000 }}{{ end }}{{ end }}{{ end }}")]

@@ -20,8 +20,8 @@ internal static class AuditCommand
     {
         var designs = new Argument<string[]>("DESIGN") { Description = "Design files; for a folder, every *.design.yaml below it.", Arity = ArgumentArity.OneOrMore };
         var rules = RuleSetOption.Make();
-        var write = new Option<string[]>("--write") { Description = "Write a report (.md, .txt, .json, .sarif, .xml for JUnit, .csv); repeatable. {name} stands for the design's path without .design.yaml.", HelpName = "FILE" };
-        var template = new Option<string?>("--template") { Description = "Template to use instead of the shipped one for .md and .txt.", HelpName = "FILE" };
+        var write = new Option<string[]>("--write") { Description = "Write a report (.html, .md, .txt, .json, .sarif, .xml for JUnit, .csv); repeatable. {name} stands for the design's path without .design.yaml.", HelpName = "FILE" };
+        var template = new Option<string?>("--template") { Description = "Template to use instead of the shipped one for .html, .md and .txt.", HelpName = "FILE" };
         var evidence = new Option<bool>("--evidence") { Description = "Put every input and every quantity with its derivation into the .json." };
         var asOf = AsOfOption.Make();
         var failOn = FailOnOption.Make();
@@ -36,7 +36,7 @@ internal static class AuditCommand
             "audit", "Audit design files against a rule set.",
             "auditor audit examples/bakery/bakery.design.yaml",
             "auditor audit designs --fail-on nonconforming",
-            "auditor audit site.design.yaml --write site.md --write site.json",
+            "auditor audit site.design.yaml --write site.html --write site.json",
             "auditor audit designs --write '{name}.report.md' --as-of 2026-12-01",
             "auditor audit designs --against '{name}.findings.json'",
             "auditor audit site.design.yaml --decision guarded --sample 2000") { designs, rules, write, template, evidence, asOf, failOn, against, quiet };

@@ -1,7 +1,6 @@
 using System.Security.Cryptography;
 using System.Text;
 using Auditor.Documents;
-using Auditor.Engine.Adjustments;
 using Auditor.Engine.Installation;
 using Auditor.Formulas.Binding;
 using Auditor.Formulas.Curves;

@@ -19,6 +19,9 @@ public sealed class ReportFormat
     /// <summary>Markdown.</summary>
     public static ReportFormat Markdown { get; } = new(".md", "report.scriban-md", new MarkdownInk());
 
+    /// <summary>A page that stands alone, for screen and paper.</summary>
+    public static ReportFormat Html { get; } = new(".html", "report.scriban-html", new HtmlInk());
+
     /// <summary>Findings for programs.</summary>
     public static ReportFormat Json { get; } = new(".json", null, null);
 
@@ -32,7 +35,7 @@ public sealed class ReportFormat
     public static ReportFormat Csv { get; } = new(".csv", null, null);
 
     /// <summary>All formats.</summary>
-    public static IReadOnlyList<ReportFormat> All { get; } = [Text, Markdown, Json, Sarif, JUnit, Csv];
+    public static IReadOnlyList<ReportFormat> All { get; } = [Text, Markdown, Html, Json, Sarif, JUnit, Csv];
 
     /// <summary>The ending, with its dot.</summary>
     public string Ending { get; }

@@ -8,7 +8,7 @@ namespace Auditor.Reports.Model;
 
 /// <summary>Turns findings into what reports show of them.</summary>
 internal sealed class FindingReader(
-    AuditResult result, Places places, Supports supports, IReadOnlyDictionary<Departure, ReportDeparture> departures)
+    AuditResult result, Places places, Supports supports, IReadOnlyDictionary<Departure, ReportDeparture> departures, Lazy<WorkingsBuilder> workings)
 {
     private readonly FormulaLines _formulas = new(result.Rules);
 
@@ -25,6 +25,9 @@ internal sealed class FindingReader(
             Subject = finding.Subject.Key,
             SubjectLabel = SubjectText.Label(finding.Subject),
             Verdict = finding.VerdictText,
+            VerdictWord = finding.Verdict.Word(),
+            Anchor = Pictures.Anchor.Of(finding.Key),
+            Board = SubjectText.BoardOf(finding.Subject)?.Key ?? "",
             IsRequirement = rule.Provision == Provision.Requirement,
             ClauseType = rule.Clause.Type,
             References = rule.Clause.References,
@@ -36,6 +39,7 @@ internal sealed class FindingReader(
             AbsoluteMargin = absolute,
             WorstMargin = finding.WorstCase?.Margin?.Relative is { } worst ? ValueText.ShowMargin(worst) : "",
             WithinTolerances = ToleranceLines.Of(finding),
+            MarginSteps = finding.Judgement.Margin?.Relative is { } distance ? (int)Math.Round(Math.Clamp(distance, -1, 1) * 20) : 0,
             Sentence = finding.Message,
             Why = rule.Why,
             PutRightBy = rule.PutRightBy,
@@ -44,6 +48,7 @@ internal sealed class FindingReader(
             Formulas = _formulas.Of(finding),
             Missing = [.. finding.Judgement.Absences?.Items.Select(absence => absence.ToString()) ?? []],
             Departure = finding.Departure is { } departure ? departures[departure] : null,
+            Unfolding = new Lazy<ReportDerivation?>(() => workings.Value.Of(finding)),
         };
     }
 

@@ -5,4 +5,6 @@ namespace Auditor.Reports.Model;
 /// <param name="Text">
 /// Symbol, formula, the formula with numbers put in, and result, joined by "="; whatever would only repeat its neighbour is left out.
 /// </param>
-public sealed record FormulaLine(string Role, string Text);
+/// <param name="Definition">Symbol and formula, joined by "=": the same for every finding of a rule.</param>
+/// <param name="Numbers">The formula with numbers put in; empty where that says no more than the definition or the result.</param>
+public sealed record FormulaLine(string Role, string Text, string Definition, string Numbers);

@@ -16,20 +16,27 @@ internal sealed class FormulaLines(RuleSet rules)
     public IReadOnlyList<FormulaLine> Of(Finding finding) =>
         [.. _evidence.Of(finding)
             .Where(derivation => derivation.Symbol != "applies" && derivation.From.Count > 0)
-            .Select(derivation => new FormulaLine(derivation.Symbol, Line(finding, derivation)))];
+            .Select(derivation => Line(finding, derivation))];
 
-    private string Line(Finding finding, Derivation derivation)
+    private FormulaLine Line(Finding finding, Derivation derivation)
     {
         if (finding.Subject.Shape.Quantity(derivation.Formula) is not { } slot)
         {
-            return Join(derivation.Formula, derivation.WithNumbers, derivation.Value);
+            return Line(derivation, [derivation.Formula], derivation);
         }
 
         var quantity = _evidence.Of(finding.Subject, slot);
-        return Join(slot.Symbol, quantity.Formula, quantity.WithNumbers, derivation.Value);
+        return Line(derivation, [slot.Symbol, quantity.Formula], quantity);
     }
 
-    private static string Join(params IEnumerable<string> parts)
+    private static FormulaLine Line(Derivation derivation, IReadOnlyList<string> defined, Derivation filled)
+    {
+        var saysMore = Bare(filled.WithNumbers) != Bare(defined[^1]) && Bare(filled.WithNumbers) != Bare(derivation.Value);
+        return new FormulaLine(
+            derivation.Symbol, Join([.. defined, filled.WithNumbers, derivation.Value]), Join(defined), saysMore ? Bare(filled.WithNumbers) : "");
+    }
+
+    private static string Join(IEnumerable<string> parts)
     {
         var said = new List<string>();
         foreach (var part in parts.Select(Bare).Where(part => said.Count == 0 || said[^1] != part))

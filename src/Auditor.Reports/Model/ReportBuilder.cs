@@ -35,8 +35,9 @@ internal sealed class ReportBuilder
 
     public ReportModel Build()
     {
-        var reader = new FindingReader(_result, _places, _supports, _departures);
-        var findings = _result.Findings.Select(finding => (finding.Verdict, Shown: reader.Read(finding))).ToArray();
+        var workings = new Lazy<WorkingsBuilder>(() => Invariantly.Make(() => new WorkingsBuilder(_result, _places)));
+        var reader = new FindingReader(_result, _places, _supports, _departures, workings);
+        var findings = _result.Findings.Select(finding => (Finding: finding, finding.Verdict, Shown: reader.Read(finding))).ToArray();
         return new ReportModel
         {
             Project = Project(),
@@ -48,6 +49,11 @@ internal sealed class ReportBuilder
             Groups = [.. VerdictOrder.GravestFirst
                 .Select(verdict => new FindingGroup(verdict.Word(), [.. findings.Where(pair => pair.Verdict == verdict).Select(pair => pair.Shown)]))
                 .Where(group => group.Findings.Count > 0)],
+            MakeRules = new(() => RuleGrouping.Of(findings.Select(pair => (pair.Finding, pair.Shown)))),
+            MakeWorkings = new(() => Invariantly.Make(workings.Value.All)),
+            ClauseTypes = [.. findings.Select(pair => pair.Shown.ClauseType).Distinct().Order(StringComparer.Ordinal)],
+            Boards = [.. _result.Design.Subjects.Where(subject => subject.Shape.Name == "board")
+                .Select(board => new ReportBoard(board.Key, SubjectText.Label(board)))],
             Schedule = new ScheduleFiller(_result, _schedule).Fill(),
             Missing = MissingThings.Of(_result),
             Departures = [.. _result.Departures.Select(departure => _departures[departure])],

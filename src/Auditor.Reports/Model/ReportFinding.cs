@@ -21,6 +21,15 @@ public sealed record ReportFinding
     /// <summary>The verdict, with the assumption that it hangs on.</summary>
     public required string Verdict { get; init; }
 
+    /// <summary>The verdict in one word: nonconforming, undetermined, departed or conforms.</summary>
+    public required string VerdictWord { get; init; }
+
+    /// <summary>Id of the finding within the report.</summary>
+    public required string Anchor { get; init; }
+
+    /// <summary>Key of the board that it belongs to; empty for the installation as a whole.</summary>
+    public required string Board { get; init; }
+
     /// <summary>Whether the rule is a requirement ("shall"); otherwise it is a recommendation ("should").</summary>
     public required bool IsRequirement { get; init; }
 
@@ -54,6 +63,12 @@ public sealed record ReportFinding
     /// <summary>What tolerances make of it, one line each, the greatest effect first; empty where they make no difference.</summary>
     public required IReadOnlyList<string> WithinTolerances { get; init; }
 
+    /// <summary>
+    /// Relative margin in twentieths of the limit, for drawing: from -20 (as far again beyond the limit, or more) to 20; 0 where nothing
+    /// was measured.
+    /// </summary>
+    public required int MarginSteps { get; init; }
+
     /// <summary>The sentence.</summary>
     public required string Sentence { get; init; }
 
@@ -77,4 +92,10 @@ public sealed record ReportFinding
 
     /// <summary>Why the departure in force accepts it; null where none does.</summary>
     public required ReportDeparture? Departure { get; init; }
+
+    /// <summary>What it comes down to, line by line; null where the report has no room for that.</summary>
+    public ReportDerivation? Derivation => Unfolding?.Value;
+
+    /// <summary>Makes the derivation when it is asked for.</summary>
+    internal Lazy<ReportDerivation?>? Unfolding { get; init; }
 }

@@ -33,6 +33,18 @@ public sealed record ReportModel
     /// <summary>All findings by verdict, the gravest first; a verdict without findings is left out.</summary>
     public required IReadOnlyList<FindingGroup> Groups { get; init; }
 
+    /// <summary>All findings by rule: the rules with the gravest findings first, then those with the least margins.</summary>
+    public IReadOnlyList<RuleFindings> Rules => MakeRules.Value;
+
+    /// <summary>The clause types of the findings, by name.</summary>
+    public required IReadOnlyList<string> ClauseTypes { get; init; }
+
+    /// <summary>The boards, in the order of the design.</summary>
+    public required IReadOnlyList<ReportBoard> Boards { get; init; }
+
+    /// <summary>How the quantities behind the findings were computed.</summary>
+    public ReportWorkings Workings => MakeWorkings.Value;
+
     /// <summary>The schedule of circuits.</summary>
     public required ScheduleTable Schedule { get; init; }
 
@@ -59,6 +71,10 @@ public sealed record ReportModel
 
     /// <summary>The caution.</summary>
     public string Caution { get; } = Model.Caution.Text;
+
+    internal Lazy<IReadOnlyList<RuleFindings>> MakeRules { get; init; } = new([]);
+
+    internal Lazy<ReportWorkings> MakeWorkings { get; init; } = new(new ReportWorkings([], [], 0, 0));
 
     /// <summary>Builds the model of an audit.</summary>
     /// <param name="result">The audit.</param>

@@ -19,6 +19,14 @@ internal sealed class Places(DesignFile file)
     /// <summary>A path as reports show it.</summary>
     public string Path(string displayPath) => file.Shown(displayPath);
 
+    /// <summary>A place that is written out already; empty where it is.</summary>
+    /// <param name="place">Path, path:line or path:line:column.</param>
+    public string OfText(string place)
+    {
+        var end = place.IndexOf(':', place.LastIndexOf('/') + 1);
+        return end < 0 ? Path(place) : Path(place[..end]) + place[end..];
+    }
+
     /// <summary>A place as <c>path:line:column</c>.</summary>
     public string Text(SourceSpan span) => $"{Path(span.Source.Path)}:{span.StartLocation}";
 }

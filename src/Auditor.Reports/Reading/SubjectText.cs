@@ -20,4 +20,8 @@ internal static class SubjectText
         var name = OwnName(subject) ?? (subject.Shape.Name == "leg" ? OwnName(subject.Parent) : null);
         return name is null ? subject.Key : $"{subject.Key} {name}";
     }
+
+    /// <summary>The board that a subject belongs to, itself included; null for the installation and its bonding conductors.</summary>
+    public static DesignSubject? BoardOf(DesignSubject subject) =>
+        subject.Shape.Name == "board" ? subject : subject.Parent is { } parent ? BoardOf(parent) : null;
 }

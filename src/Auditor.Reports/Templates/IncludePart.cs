@@ -21,7 +21,7 @@ internal sealed class IncludePart : IScriptCustomFunction
     public ScriptParameterInfo GetParameterInfo(int index) => _include.GetParameterInfo(index);
 
     public object Invoke(TemplateContext context, ScriptNode? callerContext, ScriptArray arguments, ScriptBlockStatement? blockStatement) =>
-        new Markup(_include.Invoke(context, callerContext, arguments, blockStatement)?.ToString() ?? "");
+        ((ReportContext)context).Part(() => _include.Invoke(context, callerContext, arguments, blockStatement));
 
     public ValueTask<object?> InvokeAsync(
         TemplateContext context, ScriptNode? callerContext, ScriptArray arguments, ScriptBlockStatement? blockStatement) =>

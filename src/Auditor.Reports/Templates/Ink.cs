@@ -20,6 +20,9 @@ internal abstract class Ink
     /// <summary>The last touch to a whole report.</summary>
     public abstract string Finish(string text);
 
+    /// <summary>What tells where the next text will stand; null for a format in which text may stand anywhere.</summary>
+    public virtual WrittenHtml? Watch() => null;
+
     /// <summary>
     /// One line: each break, with the blanks around it, becomes one blank; � stands for characters that show nothing or turn the text around.
     /// </summary>

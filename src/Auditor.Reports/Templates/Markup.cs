@@ -1,8 +1,11 @@
 namespace Auditor.Reports.Templates;
 
-/// <summary>Text that has been made inert already.</summary>
-/// <param name="Text">The text.</param>
-internal sealed record Markup(string Text)
+/// <summary>
+/// Markup of our own making, in which every text has been made inert: the one kind of value that a template inserts as it is.
+/// </summary>
+/// <param name="Text">The markup.</param>
+public sealed record Markup(string Text)
 {
+    /// <inheritdoc/>
     public override string ToString() => Text;
 }

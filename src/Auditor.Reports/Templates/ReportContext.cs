@@ -1,5 +1,7 @@
 using System.Collections;
+using System.Diagnostics;
 using System.Globalization;
+using System.Security.Cryptography;
 using System.Text;
 using Auditor.Documents;
 using Auditor.Reports.Model;
@@ -7,6 +9,7 @@ using Scriban;
 using Scriban.Functions;
 using Scriban.Runtime;
 using Scriban.Syntax;
+using SourceSpan = Scriban.Parsing.SourceSpan;
 
 namespace Auditor.Reports.Templates;
 
@@ -16,15 +19,24 @@ internal sealed class ReportContext : TemplateContext
     /// <summary>Marks of lists and quotations before a text are looked for so far back.</summary>
     private const int LongestLead = 64;
 
+    /// <summary>The time is looked at after so many evaluations.</summary>
+    private const int EvaluationsBetweenLooks = 4096;
+
     private readonly Ink _ink;
     private readonly TemplateFolder _folder;
+    private readonly WrittenHtml? _html;
+    private readonly Stopwatch _watch = Stopwatch.StartNew();
     private long _evaluations;
+
+    /// <summary>What was evaluated last: when a value is written, that which gave it.</summary>
+    private ScriptNode? _evaluated;
 
     public ReportContext(object model, Ink ink, TemplateFolder folder)
         : base(Functions(ink))
     {
         _ink = ink;
         _folder = folder;
+        _html = ink.Watch();
         StrictVariables = true;
         EnableRelaxedMemberAccess = false;
         EnableRelaxedIndexerAccess = false;
@@ -40,21 +52,43 @@ internal sealed class ReportContext : TemplateContext
         var global = new ScriptObject();
         global.SetValue("report", model, readOnly: true);
         PushGlobal(global);
+        if (_html is not null)
+        {
+            BuiltinObject.SetValue("inline", DynamicCustomFunction.Create((TemplateContext _, SourceSpan at, string? name) => Inline(at, name)), readOnly: true);
+            BuiltinObject.SetValue("hash", DynamicCustomFunction.Create((TemplateContext _, SourceSpan at, string? name) => Hash(at, name)), readOnly: true);
+        }
     }
+
+    private StringBuilder Written => Output is StringBuilderOutput output ? output.Builder : new StringBuilder();
 
     /// <summary>Whether the caution has been inserted.</summary>
     public bool HasShownCaution { get; private set; }
 
     /// <inheritdoc/>
-    public override TemplateContext Write(Scriban.Parsing.SourceSpan span, object? textAsObject)
+    public override TemplateContext Write(SourceSpan span, object? textAsObject)
     {
+        if (textAsObject is InlinedFile file)
+        {
+            return Write(file.Text);
+        }
+
         if (textAsObject is Markup markup)
         {
-            return Write(markup.Text);
+            return _html?.TakesMarkup(Written) == false ? throw new TemplateFault(_evaluated?.Span ?? span, TemplateMessages.NoMarkupHere) : Write(markup.Text);
         }
 
         HasShownCaution |= ReferenceEquals(textAsObject, Caution.Text);
-        return Write(_ink.Inert(ObjectToString(textAsObject) ?? "", StartsBlock()));
+        var inert = _ink.Inert(ObjectToString(textAsObject) ?? "", _html is null && StartsBlock());
+        return Write(_html is null ? inert : _html.Fit(inert, Written) ?? throw new TemplateFault(_evaluated?.Span ?? span, TemplateMessages.NoTextHere));
+    }
+
+    /// <summary>Writes a part where the report has got to.</summary>
+    public Markup Part(Func<object?> write)
+    {
+        _html?.Enter();
+        var text = write()?.ToString() ?? "";
+        _html?.Leave();
+        return new Markup(text);
     }
 
     /// <inheritdoc/>
@@ -65,7 +99,14 @@ internal sealed class ReportContext : TemplateContext
             throw new TemplateFault(scriptNode?.Span ?? default, at => TemplateMessages.TooMuch(at, _folder.Limits.Evaluations));
         }
 
-        return base.Evaluate(scriptNode, aliasReturnedFunction);
+        if (_evaluations % EvaluationsBetweenLooks == 0 && _watch.Elapsed > _folder.Limits.Time)
+        {
+            throw new TemplateFault(scriptNode?.Span ?? default, at => TemplateMessages.TooLong(at, _folder.Limits.Time));
+        }
+
+        var value = base.Evaluate(scriptNode, aliasReturnedFunction);
+        _evaluated = scriptNode;
+        return value;
     }
 
     /// <inheritdoc/>
@@ -87,7 +128,7 @@ internal sealed class ReportContext : TemplateContext
         return functions;
     }
 
-    private static bool MissMember(TemplateContext context, Scriban.Parsing.SourceSpan span, object target, string member, out object? value)
+    private static bool MissMember(TemplateContext context, SourceSpan span, object target, string member, out object? value)
     {
         string[] known = target is IEnumerable
             ? ["size"]
@@ -95,14 +136,20 @@ internal sealed class ReportContext : TemplateContext
         throw new TemplateFault(span, at => TemplateMessages.UnknownMember(at, member, NearestWord.Find(member, known), known));
     }
 
-    private static bool MissVariable(TemplateContext context, Scriban.Parsing.SourceSpan span, ScriptVariable variable, out object? value) =>
+    private static bool MissVariable(TemplateContext context, SourceSpan span, ScriptVariable variable, out object? value) =>
         throw new TemplateFault(span, at => TemplateMessages.UnknownVariable(
             at, variable.Name, NearestWord.Find(variable.Name, ["report", .. context.BuiltinObject.GetMembers()])));
+
+    private InlinedFile Inline(SourceSpan at, string? name) =>
+        _html!.TakesFile(Written) ? new InlinedFile(_folder.TextOf(name ?? "", at)) : throw new TemplateFault(at, TemplateMessages.NoFileHere);
+
+    private InlinedFile Hash(SourceSpan at, string? name) =>
+        new("sha256-" + Convert.ToBase64String(SHA256.HashData(Encoding.UTF8.GetBytes(_folder.TextOf(name ?? "", at)))));
 
     /// <summary>Whether what comes next stands where Markdown looks for a heading, a list or a quotation.</summary>
     private bool StartsBlock()
     {
-        var written = Output is StringBuilderOutput output ? output.Builder : new StringBuilder();
+        var written = Written;
         var farthest = Math.Max(0, written.Length - LongestLead);
         for (var i = written.Length - 1; i >= farthest && written[i] != '\n'; i--)
         {

@@ -61,6 +61,19 @@ internal sealed class TemplateFolder(TemplateFile top, TemplateLimits limits, Pr
         return parsed ?? throw new TemplateFault(caller, at => TemplateMessages.NotIncluded(at, name));
     }
 
+    /// <summary>The text of a script or a style sheet in the folder, lines ended by LF.</summary>
+    /// <param name="name">Its path relative to the template, with forward slashes.</param>
+    /// <param name="caller">Where it is asked for.</param>
+    /// <exception cref="TemplateFault">It cannot be used; the problems say why.</exception>
+    public string TextOf(string name, Scriban.Parsing.SourceSpan caller)
+    {
+        var path = PathOf(name, caller);
+        var source = _sources.GetValueOrDefault(path) ?? Read(top.Beside(name)) ?? throw new TemplateFault(caller, at => TemplateMessages.NotIncluded(at, name));
+        return source.Text.Contains("</", StringComparison.Ordinal) || source.Text.Contains("<!--", StringComparison.Ordinal)
+            ? throw new TemplateFault(caller, at => TemplateMessages.ClosesElement(at, name))
+            : source.Text.Replace("\r\n", "\n", StringComparison.Ordinal);
+    }
+
     /// <summary>Adds the problem of a fault met while the report was written.</summary>
     public byte[]? Refuse(ScriptRuntimeException fault)
     {

@@ -7,8 +7,9 @@ namespace Auditor.Reports.Templates;
 /// <param name="IncludeDepth">Includes within one another.</param>
 /// <param name="Nesting">Statements and brackets within one another.</param>
 /// <param name="Bytes">Bytes of a template file.</param>
-public sealed record TemplateLimits(int LoopSteps, long Evaluations, int Characters, int IncludeDepth, int Nesting, long Bytes)
+/// <param name="Time">Time for one report.</param>
+public sealed record TemplateLimits(int LoopSteps, long Evaluations, int Characters, int IncludeDepth, int Nesting, long Bytes, TimeSpan Time)
 {
-    /// <summary>Five million steps, a hundred million evaluations, 64 Mi characters, 8 includes, 64 levels, 256 KiB.</summary>
-    public static TemplateLimits Default { get; } = new(5_000_000, 100_000_000, 64 * 1024 * 1024, 8, 64, 256 * 1024);
+    /// <summary>Five million steps, a hundred million evaluations, 64 Mi characters, 8 includes, 64 levels, 256 KiB, five minutes.</summary>
+    public static TemplateLimits Default { get; } = new(5_000_000, 100_000_000, 64 * 1024 * 1024, 8, 64, 256 * 1024, TimeSpan.FromMinutes(5));
 }

@@ -15,6 +15,21 @@ internal static class TemplateMessages
 
     public static Problem TooMuch(SourceSpan span, long most) => Limit(span, $"this template evaluates more than {most} terms");
 
+    public static Problem TooLong(SourceSpan span, TimeSpan most) => Limit(span, $"this template takes more than {most.TotalSeconds:0} s");
+
+    public static Problem NoTextHere(SourceSpan span) => Problem.Error(
+        "template-place", "text from a design cannot stand here: a browser would not take it for text", span,
+        "insert it between tags, or in a quoted attribute that is no script, style or policy; an address must begin with #");
+
+    public static Problem NoMarkupHere(SourceSpan span) => Problem.Error(
+        "template-place", "markup cannot stand here", span, "insert it between tags, outside scripts, styles and comments");
+
+    public static Problem NoFileHere(SourceSpan span) => Problem.Error(
+        "template-place", "a file cannot stand here", span, "insert it between <style> and </style>, or <script> and </script>");
+
+    public static Problem ClosesElement(SourceSpan span, string name) => Problem.Error(
+        "template-place", $"{ProblemText.Quote(name)} holds an end tag or a comment of HTML", span, "write </ as <\\/ in a script, and leave out <!--");
+
     public static Problem UnknownMember(SourceSpan span, string name, string? nearest, IReadOnlyCollection<string> known) => Problem.Error(
         "template-unknown-name", $"there is no `{name}` here", span,
         (nearest is null ? "" : $"did you mean `{nearest}`? ") + (known.Count == 0 ? "it has no members" : "there are: " + string.Join(", ", known)));

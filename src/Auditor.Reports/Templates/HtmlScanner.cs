@@ -1,0 +1,202 @@
+namespace Auditor.Reports.Templates;
+
+/// <summary>
+/// Follows HTML character by character, as far as is needed to tell whether a text put in next stays text: the tokenizer of the HTML
+/// standard, its states reduced to those that differ in this.
+/// </summary>
+internal sealed class HtmlScanner
+{
+    private static readonly HashSet<string> RawElements =
+        new(["script", "style", "xmp", "iframe", "noembed", "noframes", "noscript", "plaintext"], StringComparer.OrdinalIgnoreCase);
+
+    private static readonly HashSet<string> LinkAttributes = new(
+        ["href", "xlink:href", "src", "srcset", "action", "formaction", "data", "poster", "cite", "background", "ping", "manifest", "longdesc", "usemap"],
+        StringComparer.OrdinalIgnoreCase);
+
+    private string _element = "";
+    private string _attribute = "";
+    private string _word = "";
+    private bool _isEndTag;
+    private bool _isOwnPage;
+
+    /// <summary>Where the next character stands.</summary>
+    public HtmlPlace Place { get; private set; }
+
+    /// <summary>Name of the element whose content is not text, such as <c>script</c>; empty elsewhere.</summary>
+    public string RawElement => Place == HtmlPlace.RawText ? _element : "";
+
+    /// <summary>Whether a text may be put in here.</summary>
+    public bool TakesText => Place == HtmlPlace.Text || (Place is HtmlPlace.DoubleQuoted or HtmlPlace.SingleQuoted && TakesValue());
+
+    /// <summary>Follows what is written.</summary>
+    public void Follow(ReadOnlySpan<char> text)
+    {
+        for (var i = 0; i < text.Length; i++)
+        {
+            if (Place == HtmlPlace.Text)
+            {
+                var next = text[i..].IndexOf('<');
+                if (next < 0)
+                {
+                    return;
+                }
+
+                i += next;
+            }
+
+            Step(text[i]);
+        }
+    }
+
+    private void Step(char c)
+    {
+        Place = Place switch
+        {
+            HtmlPlace.Text => Open(),
+            HtmlPlace.TagStart => TagStart(c),
+            HtmlPlace.TagName => TagName(c),
+            HtmlPlace.Tag => InTag(c),
+            HtmlPlace.AttributeName => AttributeName(c),
+            HtmlPlace.BeforeValue => BeforeValue(c),
+            HtmlPlace.DoubleQuoted => Quoted(c, '"'),
+            HtmlPlace.SingleQuoted => Quoted(c, '\''),
+            HtmlPlace.Unquoted => char.IsWhiteSpace(c) ? HtmlPlace.Tag : c == '>' ? EndTag() : HtmlPlace.Unquoted,
+            HtmlPlace.Declaration => Declaration(c),
+            HtmlPlace.Comment => Until(c, "-->", HtmlPlace.Comment),
+            _ => Raw(c),
+        };
+    }
+
+    private HtmlPlace Open()
+    {
+        _word = "";
+        return HtmlPlace.TagStart;
+    }
+
+    private HtmlPlace TagStart(char c)
+    {
+        _isEndTag = c == '/';
+        _element = char.IsAsciiLetter(c) ? c.ToString() : "";
+        return c switch
+        {
+            '/' => HtmlPlace.TagName,
+            '!' or '?' => HtmlPlace.Declaration,
+            '<' => HtmlPlace.TagStart,
+            _ => char.IsAsciiLetter(c) ? HtmlPlace.TagName : HtmlPlace.Text,
+        };
+    }
+
+    private HtmlPlace TagName(char c)
+    {
+        if (char.IsWhiteSpace(c) || c == '/')
+        {
+            return HtmlPlace.Tag;
+        }
+
+        if (c == '>')
+        {
+            return EndTag();
+        }
+
+        _element += c;
+        return HtmlPlace.TagName;
+    }
+
+    private HtmlPlace InTag(char c)
+    {
+        if (c == '>')
+        {
+            return EndTag();
+        }
+
+        _attribute = c.ToString();
+        return char.IsWhiteSpace(c) || c == '/' ? HtmlPlace.Tag : HtmlPlace.AttributeName;
+    }
+
+    private HtmlPlace AttributeName(char c)
+    {
+        if (c == '=')
+        {
+            return HtmlPlace.BeforeValue;
+        }
+
+        if (c is '>' or '/')
+        {
+            return InTag(c);
+        }
+
+        _attribute += char.IsWhiteSpace(c) ? "" : c;
+        return HtmlPlace.AttributeName;
+    }
+
+    private HtmlPlace BeforeValue(char c)
+    {
+        _word = "";
+        _isOwnPage = false;
+        return c switch
+        {
+            '"' => HtmlPlace.DoubleQuoted,
+            '\'' => HtmlPlace.SingleQuoted,
+            '>' => EndTag(),
+            _ => char.IsWhiteSpace(c) ? HtmlPlace.BeforeValue : HtmlPlace.Unquoted,
+        };
+    }
+
+    private HtmlPlace Quoted(char c, char quote)
+    {
+        if (c == quote)
+        {
+            return HtmlPlace.Tag;
+        }
+
+        _isOwnPage |= c == '#' && _word.Length == 0;
+        _word = "x";
+        return Place;
+    }
+
+    private HtmlPlace EndTag()
+    {
+        _word = "";
+        return !_isEndTag && RawElements.Contains(_element) ? HtmlPlace.RawText : HtmlPlace.Text;
+    }
+
+    private HtmlPlace Declaration(char c)
+    {
+        _word += c;
+        if (_word == "--")
+        {
+            _word = "";
+            return HtmlPlace.Comment;
+        }
+
+        return c == '>' ? HtmlPlace.Text : HtmlPlace.Declaration;
+    }
+
+    private HtmlPlace Raw(char c) => Until(c, "</" + _element, HtmlPlace.RawText) == HtmlPlace.RawText ? HtmlPlace.RawText : CloseRaw();
+
+    private HtmlPlace CloseRaw()
+    {
+        _isEndTag = true;
+        return HtmlPlace.TagName;
+    }
+
+    private HtmlPlace Until(char c, string end, HtmlPlace here)
+    {
+        _word += c;
+        if (_word.Length > end.Length)
+        {
+            _word = _word[^end.Length..];
+        }
+
+        return _word.Equals(end, StringComparison.OrdinalIgnoreCase) ? HtmlPlace.Text : here;
+    }
+
+    /// <summary>
+    /// Whether the value of this attribute may hold a text: none that a browser runs or takes for style, none that sets a policy, and
+    /// an address only where the template has begun it with <c>#</c>, a place on the same page.
+    /// </summary>
+    private bool TakesValue() =>
+        !_attribute.StartsWith("on", StringComparison.OrdinalIgnoreCase)
+        && !(_attribute.ToUpperInvariant() is "STYLE" or "SRCDOC" or "CONTENT" or "HTTP-EQUIV")
+        && (!LinkAttributes.Contains(_attribute) || _isOwnPage);
+}

@@ -1,0 +1,1 @@
+let plain = 1;

@@ -11,5 +11,6 @@ internal static class RulesCommand
         RulesShowCommand.Make(terminal),
         RulesCheckCommand.Make(terminal),
         RulesTestCommand.Make(terminal),
+        RulesPrepareCommand.Make(terminal),
     };
 }

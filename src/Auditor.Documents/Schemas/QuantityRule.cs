@@ -14,17 +14,18 @@ internal sealed record QuantityRule(QuantityKind Kind, bool MayBeNegative, bool 
     private const double Slack = 1e-9;
 
     /// <summary>Reads the rule from the keywords of a schema; null when the schema asks for no quantity.</summary>
+    /// <param name="keyword">Tells whether the schema has a keyword, and its value: a text or a flag, null for any other.</param>
     /// <exception cref="InvalidDataException">A keyword has a value that means nothing.</exception>
-    public static QuantityRule? From(IDictionary<string, object?> keywords)
+    public static QuantityRule? From(Func<string, (bool IsGiven, object? Value)> keyword)
     {
-        if (!keywords.TryGetValue("quantity", out var name))
+        if (keyword("quantity") is not (true, var name))
         {
             return null;
         }
 
         var kind = QuantityKind.Find(name as string ?? "")
             ?? throw new InvalidDataException($"`{name}` is not a kind of quantity; there are {string.Join(", ", QuantityKind.All.Select(each => each.Name))}");
-        return new QuantityRule(kind, Flag(keywords, "signed"), Flag(keywords, "may-be-zero"), Limit(keywords, "at-least", kind), Limit(keywords, "at-most", kind));
+        return new QuantityRule(kind, Flag(keyword, "signed"), Flag(keyword, "may-be-zero"), Limit(keyword, "at-least", kind), Limit(keyword, "at-most", kind));
     }
 
     /// <summary>Says what is wrong with the scalar that states a quantity; null when nothing is.</summary>
@@ -61,12 +62,12 @@ internal sealed record QuantityRule(QuantityKind Kind, bool MayBeNegative, bool 
             : null;
     }
 
-    private static bool Flag(IDictionary<string, object?> keywords, string name) => keywords.TryGetValue(name, out var value)
+    private static bool Flag(Func<string, (bool IsGiven, object? Value)> keyword, string name) => keyword(name) is (true, var value)
         && (value as bool? ?? throw new InvalidDataException($"`{name}` takes `true` or `false`"));
 
-    private static StatedQuantity? Limit(IDictionary<string, object?> keywords, string name, QuantityKind kind)
+    private static StatedQuantity? Limit(Func<string, (bool IsGiven, object? Value)> keyword, string name, QuantityKind kind)
     {
-        if (!keywords.TryGetValue(name, out var value))
+        if (keyword(name) is not (true, var value))
         {
             return null;
         }

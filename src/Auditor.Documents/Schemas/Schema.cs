@@ -1,6 +1,5 @@
 using System.Collections.Concurrent;
-using Newtonsoft.Json;
-using Newtonsoft.Json.Linq;
+using System.Text.Json;
 using NJsonSchema;
 
 namespace Auditor.Documents;
@@ -12,14 +11,14 @@ namespace Auditor.Documents;
 /// </summary>
 public sealed class Schema
 {
-    private readonly JsonSchema _schema;
-    private readonly NodeValidator _validator;
+    private readonly QuickSchema _quick;
+    private readonly Lazy<(JsonSchema Schema, NodeValidator Validator)> _explaining;
     private readonly ConcurrentDictionary<JsonSchema, QuantityRule?> _rules = new(ReferenceEqualityComparer.Instance);
 
-    private Schema(JsonSchema schema)
+    private Schema(QuickSchema quick, string text)
     {
-        _schema = schema;
-        _validator = new NodeValidator(RuleOf);
+        _quick = quick;
+        _explaining = new(() => (JsonSchema.FromJsonAsync(text, ".", schema => new LocalReferences(schema)).GetAwaiter().GetResult(), new NodeValidator(RuleOf)));
     }
 
     /// <summary>Reads a schema.</summary>
@@ -28,14 +27,15 @@ public sealed class Schema
     {
         try
         {
-            SchemaKeywords.Check(JToken.Parse(jsonText.Text));
-            return new Schema(JsonSchema.FromJsonAsync(jsonText.Text, ".", schema => new LocalReferences(schema)).GetAwaiter().GetResult());
+            using var json = JsonDocument.Parse(jsonText.Text);
+            SchemaKeywords.Check(json.RootElement);
+            return new Schema(new QuickSchemaReader(json.RootElement).Read(), jsonText.Text);
         }
-        catch (JsonReaderException fault)
+        catch (JsonException fault)
         {
-            throw new InvalidDataException($"{jsonText.Path}:{fault.LineNumber}:{fault.LinePosition}: the text is not JSON", fault);
+            throw new InvalidDataException($"{jsonText.Path}:{fault.LineNumber + 1}:{fault.BytePositionInLine + 1}: the text is not JSON", fault);
         }
-        catch (Exception fault) when (fault is InvalidDataException or InvalidOperationException or JsonException or NotSupportedException)
+        catch (Exception fault) when (fault is InvalidDataException or InvalidOperationException or ArgumentException)
         {
             throw new InvalidDataException($"{jsonText.Path}: {fault.Message}", fault);
         }
@@ -48,14 +48,28 @@ public sealed class Schema
     /// </param>
     public void Validate(Node root, Problems problems)
     {
-        foreach (var error in ErrorUnfolding.Unfold(_validator.Validate(NodeTokens.From(root), _schema)))
+        if (Look(root) != Acceptance.Yes)
+        {
+            Explain(root, problems);
+        }
+    }
+
+    /// <summary>Looks whether the schema takes a document.</summary>
+    internal Acceptance Look(Node root) => _quick.Look(root);
+
+    /// <summary>Has the validator check a document, which tells what is wrong with it.</summary>
+    internal void Explain(Node root, Problems problems)
+    {
+        var (schema, validator) = _explaining.Value;
+        foreach (var error in ErrorUnfolding.Unfold(validator.Validate(NodeTokens.From(root), schema)))
         {
             problems.Add(SchemaProblems.Word(error));
         }
     }
 
-    private QuantityRule? RuleOf(JsonSchema schema)
-        => schema.ExtensionData is { } keywords && keywords.ContainsKey("quantity") ? _rules.GetOrAdd(schema, _ => QuantityRule.From(keywords)) : null;
+    private QuantityRule? RuleOf(JsonSchema schema) => schema.ExtensionData is { } keywords && keywords.ContainsKey("quantity")
+        ? _rules.GetOrAdd(schema, _ => QuantityRule.From(name => (keywords.TryGetValue(name, out var value), value)))
+        : null;
 
     /// <summary>Keeps references inside the schema: nothing is read from another file or from the network.</summary>
     private sealed class LocalReferences(JsonSchema schema) : JsonReferenceResolver(new JsonSchemaAppender(schema, new DefaultTypeNameGenerator()))

@@ -1,4 +1,4 @@
-using Newtonsoft.Json.Linq;
+using System.Text.Json;
 
 namespace Auditor.Documents;
 
@@ -13,61 +13,80 @@ internal static class SchemaKeywords
 
     /// <summary>Checks a schema and all schemas in it.</summary>
     /// <exception cref="InvalidDataException">A keyword is not supported, or has a value that means nothing.</exception>
-    public static void Check(JToken schema)
+    public static void Check(JsonElement schema) => Check(schema, "");
+
+    private static void Check(JsonElement schema, string path)
     {
-        if (schema is not JObject keywords)
+        if (schema.ValueKind != JsonValueKind.Object)
         {
             return;
         }
 
-        var unsupported = Unchecked.FirstOrDefault(keywords.ContainsKey);
-        if (unsupported is not null)
+        if (Fault(schema) is { } fault)
         {
-            throw Fault(keywords, $"the keyword `{unsupported}` is not supported");
+            throw new InvalidDataException($"{(path.Length == 0 ? "$" : path)}: {fault}");
         }
 
-        if (keywords["items"] is JArray)
+        foreach (var (child, step) in Children(schema))
         {
-            throw Fault(keywords, "`items` takes one schema for all items");
+            Check(child, path.Length == 0 ? step : $"{path}.{step}");
+        }
+    }
+
+    private static string? Fault(JsonElement schema)
+    {
+        if (Unchecked.FirstOrDefault(keyword => schema.TryGetProperty(keyword, out _)) is { } unsupported)
+        {
+            return $"the keyword `{unsupported}` is not supported";
         }
 
-        if (keywords["format"] is JValue format && format.Value as string != "date")
+        if (schema.TryGetProperty("items", out var items) && items.ValueKind == JsonValueKind.Array)
         {
-            throw Fault(keywords, "`format` knows `date` only");
+            return "`items` takes one schema for all items";
         }
 
-        if (keywords["enum"] is JArray words && words.Any(word => word is JContainer))
+        if (schema.TryGetProperty("format", out var format) && format.ValueKind == JsonValueKind.String && format.GetString() != "date")
         {
-            throw Fault(keywords, "`enum` lists single values only");
+            return "`format` knows `date` only";
         }
 
-        if (keywords["$ref"] is JValue { Type: JTokenType.String } reference && !reference.Value<string>()!.StartsWith('#'))
+        if (schema.TryGetProperty("enum", out var words) && words.ValueKind == JsonValueKind.Array
+            && words.EnumerateArray().Any(word => word.ValueKind is JsonValueKind.Object or JsonValueKind.Array))
         {
-            throw Fault(keywords, "`$ref` refers to the same file only");
+            return "`enum` lists single values only";
+        }
+
+        if (schema.TryGetProperty("$ref", out var reference) && reference.ValueKind == JsonValueKind.String && !reference.GetString()!.StartsWith('#'))
+        {
+            return "`$ref` refers to the same file only";
         }
 
         try
         {
-            QuantityRule.From(keywords.Properties().ToDictionary(property => property.Name, property => (property.Value as JValue)?.Value));
+            QuantityRule.From(keyword => schema.TryGetProperty(keyword, out var value) ? (true, ValueOf(value)) : (false, null));
+            return null;
         }
         catch (InvalidDataException fault)
         {
-            throw Fault(keywords, fault.Message);
-        }
-
-        foreach (var child in Children(keywords))
-        {
-            Check(child);
+            return fault.Message;
         }
     }
 
-    private static IEnumerable<JToken> Children(JObject schema) => schema.Properties().SelectMany(keyword => keyword.Name switch
+    /// <summary>The value of a keyword as the quantity rule takes it: a text, a flag, or nothing for all else.</summary>
+    public static object? ValueOf(JsonElement value) => value.ValueKind switch
     {
-        "properties" or "patternProperties" or "definitions" or "$defs" => keyword.Value.Children<JProperty>().Select(property => property.Value),
-        "oneOf" or "anyOf" or "allOf" => keyword.Value.Children(),
-        "items" or "additionalProperties" or "not" => [keyword.Value],
-        _ => Enumerable.Empty<JToken>(),
-    });
+        JsonValueKind.String => value.GetString(),
+        JsonValueKind.True => true,
+        JsonValueKind.False => false,
+        _ => null,
+    };
 
-    private static InvalidDataException Fault(JObject schema, string message) => new($"{(schema.Path.Length == 0 ? "$" : schema.Path)}: {message}");
+    private static IEnumerable<(JsonElement Schema, string Step)> Children(JsonElement schema) => schema.EnumerateObject().SelectMany(keyword => (keyword.Name, keyword.Value.ValueKind) switch
+    {
+        ("properties" or "patternProperties" or "definitions" or "$defs", JsonValueKind.Object) =>
+            keyword.Value.EnumerateObject().Select(property => (property.Value, $"{keyword.Name}.{property.Name}")),
+        ("oneOf" or "anyOf" or "allOf", JsonValueKind.Array) => keyword.Value.EnumerateArray().Select((choice, index) => (choice, $"{keyword.Name}[{index}]")),
+        ("items" or "additionalProperties" or "not", _) => [(keyword.Value, keyword.Name)],
+        _ => Enumerable.Empty<(JsonElement, string)>(),
+    });
 }

@@ -1,4 +1,6 @@
 using System.Collections.Concurrent;
+using System.Security.Cryptography;
+using System.Text;
 using Auditor.Documents;
 
 namespace Auditor.Engine.RuleSets;
@@ -6,7 +8,8 @@ namespace Auditor.Engine.RuleSets;
 /// <summary>Reads files of rule data and holds each against the schema of its kind.</summary>
 /// <param name="home">Where the schemas stand.</param>
 /// <param name="problems">Receives what is wrong.</param>
-internal sealed class RuleFileReader(RuleHome home, Problems problems)
+/// <param name="prepared">Trees that need neither.</param>
+internal sealed class RuleFileReader(RuleHome home, Problems problems, PreparedRules prepared)
 {
     private static readonly Dictionary<string, string> SchemaOfKind = new()
     {
@@ -38,8 +41,14 @@ internal sealed class RuleFileReader(RuleHome home, Problems problems)
             return null;
         }
 
+        var sha256 = Convert.ToHexStringLower(SHA256.HashData(Encoding.UTF8.GetBytes(source.Text)));
+        if (prepared.Find(source, sha256) is MappingNode known)
+        {
+            return new RuleFile(known.Entries[0].Key.Value, known, sha256);
+        }
+
         var own = new Problems();
-        var file = Check(YamlReader.Read(source, own), own);
+        var file = Check(YamlReader.Read(source, own), sha256, own);
         foreach (var problem in own.All)
         {
             problems.Add(problem);
@@ -48,7 +57,7 @@ internal sealed class RuleFileReader(RuleHome home, Problems problems)
         return own.HasErrors ? null : file;
     }
 
-    private RuleFile? Check(Node? node, Problems own)
+    private RuleFile? Check(Node? node, string sha256, Problems own)
     {
         if (node is not MappingNode { Entries: [var first, ..] } root)
         {
@@ -67,7 +76,7 @@ internal sealed class RuleFileReader(RuleHome home, Problems problems)
         }
 
         SchemaFor(schema).Validate(root, own);
-        return new RuleFile(first.Key.Value, root);
+        return new RuleFile(first.Key.Value, root, sha256);
     }
 
     private Schema SchemaFor(string name) => _schemas.GetOrAdd(name, key => new Lazy<Schema>(() => Load(key))).Value;

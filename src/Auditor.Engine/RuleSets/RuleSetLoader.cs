@@ -19,7 +19,7 @@ public sealed class RuleSetLoader
     {
         _home = home;
         _problems = problems;
-        _reader = new RuleFileReader(home, problems);
+        _reader = new RuleFileReader(home, problems, PreparedRules.Open(home));
     }
 
     /// <summary>Loads a rule set.</summary>
@@ -124,8 +124,7 @@ public sealed class RuleSetLoader
     private static string LastSaid(IReadOnlyList<SetFile> chain, string key) => chain.Select(set => set.Root.Text(key)).LastOrDefault(text => text is not null) ?? "";
 
     private static List<InputFile> Hashes(IReadOnlyList<SetFile> chain, IReadOnlyList<RuleFile>[] files) =>
-        [.. chain.Select(set => set.Root).Concat(files.SelectMany(list => list).Select(file => file.Root))
-            .Select(root => new InputFile(root.Span.Source.Path, Hash(root.Span.Source.Text)))
+        [.. chain.Select(set => set.File).Concat(files.SelectMany(list => list)).Select(file => new InputFile(file.Path, file.Sha256))
             .OrderBy(file => file.Path, StringComparer.Ordinal)];
 
     private static string Hash(string text) => Convert.ToHexStringLower(SHA256.HashData(Encoding.UTF8.GetBytes(text)));

@@ -46,7 +46,7 @@ internal sealed class SetChain(RuleHome home, RuleFileReader reader, Problems pr
             }
 
             var (root, rootShown) = RootOf(full, shown!);
-            var set = new SetFile(file.Root, root, rootShown);
+            var set = new SetFile(file, root, rootShown);
             chain.Insert(0, set);
             if (file.Root.Scalar("extends") is not { } next)
             {

@@ -3,11 +3,14 @@ using Auditor.Documents;
 namespace Auditor.Engine.RuleSets;
 
 /// <summary>A set file, and the folder that its paths are relative to.</summary>
-/// <param name="Root">Its root mapping.</param>
+/// <param name="File">The file.</param>
 /// <param name="Folder">Full path of the folder of its rule data.</param>
 /// <param name="Display">How files of that folder are shown.</param>
-internal sealed record SetFile(MappingNode Root, string Folder, string Display)
+internal sealed record SetFile(RuleFile File, string Folder, string Display)
 {
+    /// <summary>Its root mapping.</summary>
+    public MappingNode Root => File.Root;
+
     /// <summary>Its name.</summary>
     public string Id => Root.Text("set")!;
 
@@ -34,7 +37,7 @@ internal sealed record SetFile(MappingNode Root, string Folder, string Display)
             return [];
         }
 
-        if (File.Exists(full))
+        if (System.IO.File.Exists(full))
         {
             return [(full, Show(full))];
         }

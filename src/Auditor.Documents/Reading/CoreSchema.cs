@@ -1,10 +1,9 @@
 using System.Globalization;
-using System.Text.RegularExpressions;
 
 namespace Auditor.Documents;
 
 /// <summary>What an unquoted scalar is by the YAML 1.2 core schema (YAML 1.2.2, section 10.3.2), but that <c>.inf</c> and <c>.nan</c> are texts.</summary>
-internal static partial class CoreSchema
+internal static class CoreSchema
 {
     public static ScalarKind Resolve(string text, out double number)
     {
@@ -32,7 +31,7 @@ internal static partial class CoreSchema
 
         return text.StartsWith("0o", StringComparison.Ordinal)
             ? TryDigits(text, "01234567", out number)
-            : DecimalNumber().IsMatch(text) && double.TryParse(text, NumberStyles.Float, CultureInfo.InvariantCulture, out number) && double.IsFinite(number);
+            : IsDecimalNumber(text) && double.TryParse(text, NumberStyles.Float, CultureInfo.InvariantCulture, out number) && double.IsFinite(number);
     }
 
     private static bool TryDigits(string text, string digits, out double number)
@@ -52,6 +51,40 @@ internal static partial class CoreSchema
         return text.Length > 2 && double.IsFinite(number);
     }
 
-    [GeneratedRegex(@"^[-+]?(\.[0-9]+|[0-9]+(\.[0-9]*)?)([eE][-+]?[0-9]+)?\z", RegexOptions.ExplicitCapture | RegexOptions.NonBacktracking)]
-    private static partial Regex DecimalNumber();
+    /// <summary>Whether a text is a sign, digits with a point anywhere among or beside them, and an exponent; all but digits may be left out.</summary>
+    private static bool IsDecimalNumber(ReadOnlySpan<char> text)
+    {
+        var at = text[0] is '+' or '-' ? 1 : 0;
+        var whole = Digits(text, ref at);
+        var decimals = 0;
+        if (at < text.Length && text[at] == '.')
+        {
+            at++;
+            decimals = Digits(text, ref at);
+        }
+
+        return whole + decimals > 0 && (at == text.Length || IsExponent(text[at..]));
+    }
+
+    private static bool IsExponent(ReadOnlySpan<char> text)
+    {
+        if (text[0] is not ('e' or 'E'))
+        {
+            return false;
+        }
+
+        var at = text.Length > 1 && text[1] is '+' or '-' ? 2 : 1;
+        return Digits(text, ref at) > 0 && at == text.Length;
+    }
+
+    private static int Digits(ReadOnlySpan<char> text, ref int at)
+    {
+        var start = at;
+        while (at < text.Length && char.IsAsciiDigit(text[at]))
+        {
+            at++;
+        }
+
+        return at - start;
+    }
 }

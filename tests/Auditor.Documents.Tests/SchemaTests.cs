@@ -23,7 +23,7 @@ public class SchemaTests
     [InlineData("""{ "quantity": "length", "at-most": "10 A" }""", "`at-most` takes a length as text, such as \"25 m\"")]
     [InlineData("""{ "quantity": "length", "at-least": 10 }""", "`at-least` takes a length as text")]
     [InlineData("""{ "quantity": "length", "signed": "yes" }""", "`signed` takes `true` or `false`")]
-    [InlineData("""{ "type": """, "test.schema.json:1:10: the text is not JSON")]
+    [InlineData("""{ "type": """, "test.schema.json:1:11: the text is not JSON")]
     [InlineData("""{ "$ref": "#/definitions/nowhere" }""", "test.schema.json: ")]
     public void A_schema_that_cannot_be_held_to_is_refused(string schema, string message)
         => Assert.Contains(message, Assert.Throws<InvalidDataException>(() => Schema.Parse(new SourceText("test.schema.json", schema))).Message, StringComparison.Ordinal);

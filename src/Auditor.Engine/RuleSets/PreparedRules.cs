@@ -54,7 +54,7 @@ public sealed class PreparedRules
     }
 
     /// <summary>Makes the tree of a text, without problems and held against its schema; null for a text that was not prepared.</summary>
-    internal Node? Find(SourceText source, string sha256) => _places.TryGetValue(sha256, out var place)
+    public Node? Find(SourceText source, string sha256) => _places.TryGetValue(sha256, out var place)
         ? new NodeReader(source, _bytes.AsMemory(place.Start, place.Length)).Read()
         : null;
 

@@ -40,7 +40,7 @@ public class DeterminismTests
     {
         var result = Sheds.Audit("garden", folder);
 
-        Assert.Equal(Findings(""), Encoding.UTF8.GetString(FindingsJson.Write(result, Sheds.Register, new FindingsOptions(AllEvidence: true))));
+        Assert.Equal(Findings(""), Encoding.UTF8.GetString(Sheds.Json(result, new FindingsOptions(AllEvidence: true))));
     }
 
     private static string Everything() =>
@@ -49,7 +49,7 @@ public class DeterminismTests
         + Findings("");
 
     private static string Findings(string folder) =>
-        Encoding.UTF8.GetString(FindingsJson.Write(Sheds.Audit("garden", folder), Sheds.Register, new FindingsOptions(AllEvidence: true)));
+        Encoding.UTF8.GetString(Sheds.Json(Sheds.Audit("garden", folder), new FindingsOptions(AllEvidence: true)));
 
     /// <summary>A culture that writes numbers and days as differently as can be.</summary>
     private static CultureInfo Contrary()

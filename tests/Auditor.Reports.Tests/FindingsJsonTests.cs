@@ -40,7 +40,7 @@ public class FindingsJsonTests
     [Fact]
     public void The_file_is_UTF8_without_a_mark_and_its_lines_end_with_LF()
     {
-        var bytes = FindingsJson.Write(Sheds.Audit("garden"), Sheds.Register, new FindingsOptions());
+        var bytes = Sheds.Json(Sheds.Audit("garden"), new FindingsOptions());
         var text = Encoding.UTF8.GetString(bytes);
 
         Assert.Equal((byte)'{', bytes[0]);
@@ -132,7 +132,7 @@ public class FindingsJsonTests
     }
 
     private static string Write(string design, bool evidence) =>
-        Encoding.UTF8.GetString(FindingsJson.Write(Sheds.Audit(design), Sheds.Register, new FindingsOptions(evidence)));
+        Encoding.UTF8.GetString(Sheds.Json(Sheds.Audit(design), new FindingsOptions(evidence)));
 
     private static JsonDocument Parse(string design, bool evidence) => JsonDocument.Parse(Write(design, evidence));
 

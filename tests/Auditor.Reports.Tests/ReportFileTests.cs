@@ -12,7 +12,7 @@ public class ReportFileTests
         var path = folder.Write("report.md", "a much longer report of yesterday");
         var problems = new Problems();
 
-        Assert.True(ReportFile.Write(path, "new"u8, problems));
+        Assert.True(ReportFile.Write(path, "new"u8.ToArray(), problems));
 
         Assert.Equal("new", File.ReadAllText(path));
         Assert.Equal([path], Directory.GetFileSystemEntries(folder.Path));
@@ -25,7 +25,7 @@ public class ReportFileTests
         using var folder = new TemporaryFolder();
         var path = Path.Combine(folder.Path, new string('n', 252) + ".md");
 
-        Assert.True(ReportFile.Write(path, "new"u8, new Problems()));
+        Assert.True(ReportFile.Write(path, "new"u8.ToArray(), new Problems()));
 
         Assert.Equal("new", File.ReadAllText(path));
     }
@@ -37,7 +37,7 @@ public class ReportFileTests
         folder.Write("report.md", "old");
         var problems = new Problems();
 
-        Assert.False(ReportFile.Write(Path.Combine(folder.Path, new string('n', 300) + ".md"), "new"u8, problems));
+        Assert.False(ReportFile.Write(Path.Combine(folder.Path, new string('n', 300) + ".md"), "new"u8.ToArray(), problems));
 
         Assert.Equal("report-not-written", Assert.Single(problems.All).Code);
         Assert.Equal(["report.md"], Directory.GetFileSystemEntries(folder.Path).Select(Path.GetFileName));
@@ -50,7 +50,7 @@ public class ReportFileTests
         folder.Write("report.md/inside", "old");
         var problems = new Problems();
 
-        Assert.False(ReportFile.Write(Path.Combine(folder.Path, "report.md"), "new"u8, problems));
+        Assert.False(ReportFile.Write(Path.Combine(folder.Path, "report.md"), "new"u8.ToArray(), problems));
 
         Assert.Contains("it is a folder", Assert.Single(problems.All).Message, StringComparison.Ordinal);
         Assert.Equal("old", File.ReadAllText(Path.Combine(folder.Path, "report.md", "inside")));
@@ -63,7 +63,7 @@ public class ReportFileTests
         using var folder = new TemporaryFolder();
         var problems = new Problems();
 
-        Assert.False(ReportFile.Write(Path.Combine(folder.Path, "none", "report.md"), "new"u8, problems));
+        Assert.False(ReportFile.Write(Path.Combine(folder.Path, "none", "report.md"), "new"u8.ToArray(), problems));
 
         Assert.Contains("its folder does not exist", Assert.Single(problems.All).Message, StringComparison.Ordinal);
         Assert.Empty(Directory.GetFileSystemEntries(folder.Path));
@@ -76,7 +76,7 @@ public class ReportFileTests
         var (path, before) = FileInUnwritableFolder(folder);
         var problems = new Problems();
 
-        Assert.False(ReportFile.Write(path, "new"u8, problems));
+        Assert.False(ReportFile.Write(path, "new"u8.ToArray(), problems));
 
         var problem = Assert.Single(problems.All);
         Assert.Equal("report-not-written", problem.Code);

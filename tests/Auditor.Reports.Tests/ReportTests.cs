@@ -25,7 +25,7 @@ public class ReportTests
     [Fact]
     public void The_findings_file_is_as_approved() =>
         Golden.Match(
-            Encoding.UTF8.GetString(FindingsJson.Write(Sheds.Audit("garden"), Sheds.Register, new FindingsOptions())), $"{Designs}/garden", "json");
+            Encoding.UTF8.GetString(Sheds.Json(Sheds.Audit("garden"), new FindingsOptions())), $"{Designs}/garden", "json");
 
     [Fact]
     public void No_golden_file_is_left_over() => Assert.Empty(Golden.OrphansBelow("tests/Auditor.Reports.Tests/data"));

@@ -8,6 +8,7 @@ using Auditor.Reports.Files;
 using Auditor.Reports.Model;
 using Auditor.Reports.Schedules;
 using Auditor.Reports.Templates;
+using Auditor.Reports.Json;
 using Auditor.Testing;
 
 namespace Auditor.Reports.Tests;
@@ -57,6 +58,14 @@ internal static class Sheds
     /// <summary>A report from a template that has no fault.</summary>
     public static string Render(string design, ReportFormat format, TemplateFile template) =>
         System.Text.Encoding.UTF8.GetString(Faultless(problems => TemplateReport.Render(Model(design), format, template, problems)!));
+
+    /// <summary>The findings file of an audit.</summary>
+    public static byte[] Json(AuditResult result, FindingsOptions options)
+    {
+        using var stream = new MemoryStream();
+        FindingsJson.Write(result, Register, options, stream);
+        return stream.ToArray();
+    }
 
     private static RuleSet LoadRules() => Faultless(problems =>
         RuleSetLoader.Load(new RuleHome(Repository.PathOf("rules"), "rules"), "rules/sets/shed.yaml", Data(""), null, problems)!);

@@ -54,18 +54,19 @@ internal sealed record ReportTarget(string Path, ReportFormat Format)
     public bool Write(
         AuditResult result, RevisionComparison? against, Register register, string? template, FindingsOptions options, Problems problems)
     {
-        var bytes = Bytes(result, against, register, template, options, problems);
-        return bytes is not null && ReportFile.Write(Named(Path, result.Design.File.Path), bytes, problems);
+        var path = Named(Path, result.Design.File.Path);
+        if (Format == ReportFormat.Json)
+        {
+            return ReportFile.Write(path, stream => FindingsJson.Write(result, register, options, stream), problems);
+        }
+
+        var bytes = Bytes(result, against, register, template, problems);
+        return bytes is not null && ReportFile.Write(path, bytes, problems);
     }
 
     private byte[]? Bytes(
-        AuditResult result, RevisionComparison? against, Register register, string? template, FindingsOptions options, Problems problems)
+        AuditResult result, RevisionComparison? against, Register register, string? template, Problems problems)
     {
-        if (Format == ReportFormat.Json)
-        {
-            return FindingsJson.Write(result, register, options);
-        }
-
         if (Format == ReportFormat.Sarif)
         {
             return SarifReport.Write(result, against is null ? null : ComparisonReport.Baselines(against));

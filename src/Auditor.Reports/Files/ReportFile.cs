@@ -10,7 +10,14 @@ public static class ReportFile
     /// <param name="bytes">What to write.</param>
     /// <param name="problems">Receives the reason when it cannot be written.</param>
     /// <returns>Whether it was written.</returns>
-    public static bool Write(string path, ReadOnlySpan<byte> bytes, Problems problems)
+    public static bool Write(string path, byte[] bytes, Problems problems) => Write(path, stream => stream.Write(bytes), problems);
+
+    /// <summary>Writes a file beside its target as <see cref="Write(string, byte[], Problems)"/> does, piece by piece.</summary>
+    /// <param name="path">Where to write.</param>
+    /// <param name="content">Writes the content.</param>
+    /// <param name="problems">Receives the reason when it cannot be written.</param>
+    /// <returns>Whether it was written.</returns>
+    public static bool Write(string path, Action<Stream> content, Problems problems)
     {
         var full = Path.GetFullPath(path);
         var folder = Path.GetDirectoryName(full);
@@ -23,23 +30,25 @@ public static class ReportFile
         var beside = Path.Combine(folder, "." + Path.GetRandomFileName());
         try
         {
-            WriteWhole(beside, bytes);
+            WriteWhole(beside, content);
             File.Move(beside, full, overwrite: true);
             return true;
         }
         catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
         {
             problems.Add(Directory.Exists(full) ? FileMessages.IsFolder(path) : FileMessages.Failed(path, Reason(fault)));
+            return false;
         }
-
-        Remove(beside);
-        return false;
+        finally
+        {
+            Remove(beside);
+        }
     }
 
-    private static void WriteWhole(string path, ReadOnlySpan<byte> bytes)
+    private static void WriteWhole(string path, Action<Stream> content)
     {
         using var stream = new FileStream(path, FileMode.CreateNew, FileAccess.Write, FileShare.None);
-        stream.Write(bytes);
+        content(stream);
         stream.Flush(flushToDisk: true);
     }
 

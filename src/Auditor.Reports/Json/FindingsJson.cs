@@ -11,13 +11,12 @@ public static class FindingsJson
     /// <param name="result">The audit.</param>
     /// <param name="register">The register of requirements.</param>
     /// <param name="options">What to add.</param>
-    /// <returns>Indented JSON in UTF-8 without a byte order mark; lines end with LF.</returns>
-    public static byte[] Write(AuditResult result, Register register, FindingsOptions options) =>
-        Invariantly.Make(() => Whole(result, register, options));
+    /// <param name="stream">Receives indented JSON in UTF-8 without a byte order mark, piece by piece; lines end with LF.</param>
+    public static void Write(AuditResult result, Register register, FindingsOptions options, Stream stream) =>
+        Invariantly.Do(() => Whole(result, register, options, stream));
 
-    private static byte[] Whole(AuditResult result, Register register, FindingsOptions options)
+    private static void Whole(AuditResult result, Register register, FindingsOptions options, Stream stream)
     {
-        using var stream = new MemoryStream();
         using (var output = new JsonOutput(stream, new Places(result.Design.File)))
         {
             var supports = new Supports(result);
@@ -34,6 +33,5 @@ public static class FindingsJson
         }
 
         stream.WriteByte((byte)'\n');
-        return stream.ToArray();
     }
 }

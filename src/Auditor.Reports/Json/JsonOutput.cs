@@ -16,6 +16,9 @@ internal sealed class JsonOutput(Stream stream, Places? places = null) : IDispos
     /// </summary>
     private const string TwelveDigits = "E11";
 
+    /// <summary>So many bytes are kept before they go to the stream.</summary>
+    private const int MostPending = 1 << 16;
+
     private readonly Utf8JsonWriter _writer = new(stream, new JsonWriterOptions
     {
         Indented = true,
@@ -56,6 +59,10 @@ internal sealed class JsonOutput(Stream stream, Places? places = null) : IDispos
         foreach (var each in items)
         {
             item(each);
+            if (_writer.BytesPending > MostPending)
+            {
+                _writer.Flush();
+            }
         }
 
         _writer.WriteEndArray();

@@ -43,7 +43,7 @@ internal sealed class MarginStrips(Scene scene, PicturePlan plan)
         var bottom = Top + (strips.Length * StripHeight);
         using (canvas.Definitions())
         {
-            Badges.Define(canvas, Badges.All.Select(badge => badge.Mark));
+            Badges.Define(canvas, scene.Marks);
         }
 
         Axis(canvas, scale, bottom);
@@ -52,7 +52,7 @@ internal sealed class MarginStrips(Scene scene, PicturePlan plan)
             Draw(canvas, scale, strip, Top + ((index + 1) * StripHeight) - 10);
         }
 
-        Badges.Legend(canvas, ["nonconforming", "advised", "departed"], 24, bottom + 38);
+        Badges.Legend(canvas, scene.Marks.Except(["undetermined", "conforms"]), 24, bottom + 38);
         return new Picture(plan.Id, plan.Kind, plan.Title, plan.About, canvas.Finish(Width, bottom + 56), Table(strips));
     }
 

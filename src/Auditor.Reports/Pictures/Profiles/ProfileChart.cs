@@ -44,7 +44,7 @@ internal sealed class ProfileChart(Scene scene, PicturePlan plan, IReadOnlyList<
         var canvas = new Canvas(id, title, plan.About);
         using (canvas.Definitions())
         {
-            Badges.Define(canvas, Badges.All.Select(badge => badge.Mark));
+            Badges.Define(canvas, scene.Marks);
         }
 
         plot.Draw(canvas);

@@ -14,7 +14,7 @@ namespace Auditor.Reports.Pictures.Balance;
 /// <param name="plan">What to show.</param>
 internal sealed class BalanceBars(Scene scene, PicturePlan plan)
 {
-    private const int MostOfPage = 22;
+    private const int MostOfPage = 16;
     private const double Left = 270;
     private const double Full = 780;
     private const double Width = 960;
@@ -90,9 +90,12 @@ internal sealed class BalanceBars(Scene scene, PicturePlan plan)
                 canvas.Rect(Left, y + 2, Math.Max(1, length), Bar - 4, Series[Array.IndexOf(order, line) % Series.Length]);
             }
 
-            canvas.Text(Left + length + 6, y + 11, line.Show(subject), "s halo");
+            canvas.Text(Beside(Left + length + 6, line.Show(subject), Left + scale), y + 11, line.Show(subject), "s");
         }
     }
+
+    /// <summary>Where a text stands clear of the line of the limit: where it wants to, or right of the line.</summary>
+    private static double Beside(double x, string text, double limit) => x < limit + 4 && x + Canvas.WidthOf(text, "s") > limit - 4 ? limit + 5 : x;
 
     private PictureTable Table(DesignSubject[] subjects)
     {

@@ -20,6 +20,7 @@ internal sealed class MarginStrips(Scene scene, PicturePlan plan)
     private const double Step = 7;
     private const double Slack = 1e-6;
     private const int MostStacked = 5;
+    private const int MostMarked = 6;
 
     private static readonly Unit Percent = UnitCatalog.Find("%")!;
 
@@ -90,14 +91,14 @@ internal sealed class MarginStrips(Scene scene, PicturePlan plan)
         var most = bins.Max(bin => bin.Count());
         if (most > MostStacked)
         {
-            Bars(canvas, bins, most, y);
+            Bars(canvas, bins, most, y, conforming: true);
         }
         else
         {
             Dots(canvas, bins, y);
         }
 
-        Marks(canvas, scale, strip, y);
+        Marks(canvas, scale, bins, most, strip, y);
         foreach (var (index, finding) in strip.Measured.Take((int)Labelled).Index())
         {
             using var link = canvas.Link(Anchor.Of(finding.Key), $"{finding.Key}: {ValueText.ShowMargin(Margin(finding)!.Value)}, {finding.VerdictText}");
@@ -127,33 +128,32 @@ internal sealed class MarginStrips(Scene scene, PicturePlan plan)
     }
 
     /// <summary>Where dots would not fit a bar stands for how many conform, as a share of the most that any bar of the strip has.</summary>
-    private static void Bars(Canvas canvas, IGrouping<double, Finding>[] bins, int most, double y)
+    private static void Bars(Canvas canvas, IGrouping<double, Finding>[] bins, int most, double y, bool conforming)
     {
         var bars = new StringBuilder();
-        foreach (var bin in bins.Where(bin => bin.Any(finding => finding.Verdict == Verdict.Conforms)))
+        foreach (var bin in bins.Where(bin => bin.Any(finding => finding.Verdict == Verdict.Conforms == conforming)))
         {
-            var height = Math.Max(2, 30.0 * bin.Count(finding => finding.Verdict == Verdict.Conforms) / most);
+            var height = Math.Max(2, 30.0 * bin.Count(finding => finding.Verdict == Verdict.Conforms == conforming) / most);
             bars.Append(CultureInfo.InvariantCulture, $"M{Canvas.N(bin.Key - 2.5)} {Canvas.N(y + 4)}v-{Canvas.N(height)}h5v{Canvas.N(height)}z");
         }
 
-        Path(canvas, bars, "conforms solid");
+        Path(canvas, bars, conforming ? "conforms solid" : "nonconforming solid");
     }
 
-    /// <summary>A mark of its own, with a link, for each finding that does not conform, as far as there is room; the tightest go before.</summary>
-    private static void Marks(Canvas canvas, MarginScale scale, Strip strip, double y)
+    /// <summary>A mark of its own, with a link, for each finding that does not conform; where they are many bars, and a mark for the tightest.</summary>
+    private static void Marks(Canvas canvas, MarginScale scale, IGrouping<double, Finding>[] bins, int most, Strip strip, double y)
     {
-        var free = double.NegativeInfinity;
-        foreach (var finding in strip.Measured.Where(finding => finding.Verdict != Verdict.Conforms))
+        var marked = strip.Measured.Where(finding => finding.Verdict != Verdict.Conforms).ToArray();
+        if (marked.Length > MostMarked)
         {
-            var x = scale.Of(Margin(finding)!.Value);
-            if (x < free)
-            {
-                continue;
-            }
+            Bars(canvas, bins, most, y, conforming: false);
+            marked = marked[..1];
+        }
 
+        foreach (var finding in marked)
+        {
             using var link = canvas.Link(Anchor.Of(finding.Key), $"{finding.Key}: {ValueText.ShowMargin(Margin(finding)!.Value)}, {finding.VerdictText}");
-            canvas.Use(Standing.Mark(finding), x, y - 5);
-            free = x + 4;
+            canvas.Use(Standing.Mark(finding), scale.Of(Margin(finding)!.Value), y - 5);
         }
     }
 

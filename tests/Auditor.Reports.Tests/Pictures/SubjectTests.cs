@@ -1,3 +1,5 @@
+using Auditor.Testing;
+
 
 namespace Auditor.Reports.Tests.Pictures;
 
@@ -47,5 +49,19 @@ public class SubjectTests
 
         Assert.Equal("#f-voltage-drop-lighting__BK_-16", link.Attribute("href")!.Value);
         Assert.Equal("BK/16 Yard floodlights and gable sign: nonconforming, -50.8 %, voltage drop", link.Attribute("aria-label")!.Value);
+    }
+
+    [Fact]
+    public void What_is_kept_only_as_stated_has_a_mark_of_its_own()
+    {
+        var design = File.ReadAllText(Repository.PathOf("examples/one-circuit/one-circuit.design.yaml"))
+            .Replace("basis: {", "basis: { decision: guarded,", StringComparison.Ordinal)
+            .Replace("length: 18 m", "length: 18 m ± 14 m", StringComparison.Ordinal)
+            .Replace("current: 12 A", "current: 19 A ± 2 A", StringComparison.Ordinal);
+        var svg = Gallery.Xml(Gallery.OfText(design).Of("single-line").Single());
+        var node = svg.Descendants().Single(element => element.Attribute("data-subject")?.Value == "GO/1");
+
+        Assert.Contains(node.Descendants(), element => element.Attribute("href")?.Value == "#single-line-unproven");
+        Assert.Contains(svg.Descendants(), element => element.Name.LocalName == "text" && element.Value == "unproven within tolerances");
     }
 }

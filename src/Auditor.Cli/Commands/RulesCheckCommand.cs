@@ -28,7 +28,7 @@ internal static class RulesCheckCommand
 
         terminal.Output.WriteLine(
             $"{set.Title.Id}: {set.Files.Count} files, {set.World.Lookups.Count} lookups, {set.World.Curves.All.Count} curves, {set.Parameters.Count} parameters, " +
-            $"{set.Quantities.Count()} quantities, {set.Rules.Count} rules: no problems");
+            $"{set.Quantities.Count()} quantities, {set.Rules.Count} rules, {set.Pictures.Count} pictures: no problems");
         return ExitCode.Clean;
     }
 }

@@ -9,9 +9,9 @@ namespace Auditor.Reports.Pictures;
 /// A complete <c>svg</c> element to stand inside a page, safe whatever the design says. It is an image, or a group where it holds links.
 /// Colours come from the classes and custom properties of <c>templates/pictures.css</c> alone:
 /// <list type="bullet">
-/// <item>properties <c>--ink --paper --muted --grid --band --nonconforming --undetermined --departed --conforms --series-1 … --series-4</c>;</item>
-/// <item>classes, all with the prefix <c>p-</c>: strokes <c>line heavy thin grid limit dash dots stroke cut dot</c>, areas <c>solid fill band hollow</c>,
-/// texts <c>t s b m e c</c> (text, small, bold, muted, ended at, centred at), states <c>nonconforming undetermined departed conforms</c>,
+/// <item>properties <c>--ink --paper --muted --grid --band --nonconforming --unproven --undetermined --departed --conforms --series-1 … --series-4</c>;</item>
+/// <item>classes, all with the prefix <c>p-</c>: strokes <c>line heavy thin grid faint limit stroke cut dot</c> and their dashes <c>dash dots long close chain chains</c>, areas <c>solid fill band area hollow</c>,
+/// texts <c>t s b m e c halo</c> (text, small, bold, muted, ended at, centred at, set off), states <c>nonconforming unproven undetermined departed conforms</c>,
 /// series <c>s1 … s4</c>, and <c>picture</c> on the element itself.</item>
 /// </list>
 /// </param>

@@ -1,5 +1,6 @@
 using Auditor.Engine.Findings;
 using Auditor.Engine.Installation;
+using Auditor.Reports.Pictures.Drawing;
 using Auditor.Reports.Reading;
 
 namespace Auditor.Reports.Pictures;
@@ -37,6 +38,10 @@ internal sealed class Scene
 
     /// <summary>The circuits of each board.</summary>
     public ILookup<DesignSubject, DesignSubject> CircuitsOf { get; }
+
+    /// <summary>The marks that the findings may need, the gravest first; what only guarded acceptance finds has none where nothing was found so.</summary>
+    public IEnumerable<string> Marks => Badges.All.Select(badge => badge.Mark)
+        .Where(mark => mark != Badges.Unproven || Result.Findings.Any(finding => finding.Verdict == Verdict.Unproven));
 
     /// <summary>The findings of a subject; those of a circuit's legs count as its own.</summary>
     public IReadOnlyList<Finding> FindingsOf(DesignSubject subject) => [.. subject.Legs.Prepend(subject).SelectMany(part => _findings[part])];

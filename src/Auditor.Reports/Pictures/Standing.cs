@@ -5,7 +5,7 @@ namespace Auditor.Reports.Pictures;
 
 /// <summary>How one subject stands: its gravest finding and its least margin.</summary>
 /// <param name="Lead">
-/// The finding that a reader should see first: an unmet requirement, then an undecided one, then recommendations likewise, then what was departed
+/// The finding that a reader should see first: an unmet requirement, then one that is unproven, then an undecided one, then recommendations likewise, then what was departed
 /// from, then what conforms; among equals the least margin, and what has none before that. Null where no rule applied.
 /// </param>
 /// <param name="Tightest">The finding with the least relative margin; null where nothing was measured.</param>
@@ -27,6 +27,7 @@ internal sealed record Standing(Finding? Lead, Finding? Tightest, int NotMet, in
     {
         (Verdict.Nonconforming, Provision.Requirement) => "nonconforming",
         (Verdict.Nonconforming, _) => "advised",
+        (Verdict.Unproven, _) => "unproven",
         (Verdict.Undetermined, _) => "undetermined",
         (Verdict.Departed, _) => "departed",
         _ => "conforms",
@@ -37,6 +38,7 @@ internal sealed record Standing(Finding? Lead, Finding? Tightest, int NotMet, in
     {
         null => "no rule applied",
         { Verdict: Verdict.Undetermined } => Open == 1 ? "1 open" : $"{Open} open",
+        { Verdict: Verdict.Unproven } => "unproven",
         { Verdict: Verdict.Conforms } => Tightest is null ? "conforms" : ValueText.ShowMargin(Margin(Tightest)!.Value),
         var finding when Margin(finding) is { } margin => ValueText.ShowMargin(margin),
         { Verdict: Verdict.Departed } => "departed",
@@ -51,15 +53,17 @@ internal sealed record Standing(Finding? Lead, Finding? Tightest, int NotMet, in
         Tightest is { } tightest && ValueText.ShowMargin(Margin(tightest)!.Value) is var least && least != Headline ? "least " + least : "";
 
     /// <summary>How grave the lead is; lower is graver.</summary>
-    public int Gravity => Lead is null ? 6 : GravityOf(Lead);
+    public int Gravity => Lead is null ? 8 : GravityOf(Lead);
 
     private static int GravityOf(Finding finding) => (finding.Verdict, finding.Rule.Provision) switch
     {
         (Verdict.Nonconforming, Provision.Requirement) => 0,
-        (Verdict.Undetermined, Provision.Requirement) => 1,
-        (Verdict.Nonconforming, _) => 2,
-        (Verdict.Undetermined, _) => 3,
-        (Verdict.Departed, _) => 4,
-        _ => 5,
+        (Verdict.Unproven, Provision.Requirement) => 1,
+        (Verdict.Undetermined, Provision.Requirement) => 2,
+        (Verdict.Nonconforming, _) => 3,
+        (Verdict.Unproven, _) => 4,
+        (Verdict.Undetermined, _) => 5,
+        (Verdict.Departed, _) => 6,
+        _ => 7,
     };
 }

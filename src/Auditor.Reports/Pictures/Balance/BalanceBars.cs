@@ -14,7 +14,7 @@ namespace Auditor.Reports.Pictures.Balance;
 /// <param name="plan">What to show.</param>
 internal sealed class BalanceBars(Scene scene, PicturePlan plan)
 {
-    private const int MostOfPage = 22;
+    private const int MostOfPage = 16;
     private const double Left = 270;
     private const double Full = 780;
     private const double Width = 960;
@@ -70,6 +70,7 @@ internal sealed class BalanceBars(Scene scene, PicturePlan plan)
     private void Draw(Canvas canvas, DesignSubject subject, double top, double scale)
     {
         using var group = canvas.Subject(subject.Key);
+        var lines = Lines(subject).ToArray();
         var standing = scene.StandingOf(subject);
         using (standing.Lead is { } lead ? canvas.Link(Anchor.Of(lead.Key), $"{Scene.Label(subject)}: {lead.VerdictText}") : canvas.Open("g"))
         {
@@ -77,20 +78,24 @@ internal sealed class BalanceBars(Scene scene, PicturePlan plan)
         }
 
         var limit = plan.One(subject.Shape, "limit") is { } rated && !rated.Of(subject).IsMissing ? "of " + rated.Show(subject) : "rating not known";
-        canvas.TextWithin(16, top + 26, string.Join(", ", new[] { limit, plan.Known(subject, "text") }.Where(text => text.Length > 0)), "s m", Left - 60);
-        foreach (var (index, line) in Lines(subject).Index())
+        canvas.TextWithin(16, top + 26, string.Join(", ", new[] { limit, lines.Length > 1 ? plan.Known(subject, "text") : "" }.Where(text => text.Length > 0)), "s m", Left - 60);
+        var order = plan.All(subject.Shape, "line").Concat(plan.All(subject.Shape, "neutral")).ToArray();
+        foreach (var (index, line) in lines.Index())
         {
             var (y, value) = (top + (index * Bar), line.Of(subject));
             canvas.Text(Left - 10, y + 11, line.Label, "s b e");
             var length = Share(subject, value) * scale;
             if (length > 0)
             {
-                canvas.Rect(Left, y + 2, Math.Max(1, length), Bar - 4, Series[index % Series.Length]);
+                canvas.Rect(Left, y + 2, Math.Max(1, length), Bar - 4, Series[Array.IndexOf(order, line) % Series.Length]);
             }
 
-            canvas.Text(Left + length + 6, y + 11, line.Show(subject), "s halo");
+            canvas.Text(Beside(Left + length + 6, line.Show(subject), Left + scale), y + 11, line.Show(subject), "s");
         }
     }
+
+    /// <summary>Where a text stands clear of the line of the limit: where it wants to, or right of the line.</summary>
+    private static double Beside(double x, string text, double limit) => x < limit + 4 && x + Canvas.WidthOf(text, "s") > limit - 4 ? limit + 5 : x;
 
     private PictureTable Table(DesignSubject[] subjects)
     {

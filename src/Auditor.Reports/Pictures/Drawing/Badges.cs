@@ -2,14 +2,17 @@ namespace Auditor.Reports.Pictures.Drawing;
 
 /// <summary>
 /// The marks for the state of a finding. Each has a shape of its own, so that none rests on colour: a filled square with a cross, a hollow one
-/// for recommendations, a diamond with a question mark, a triangle, a disc with a tick.
+/// for recommendations, a broken ring with a tick, a diamond with a question mark, a triangle, a disc with a tick.
 /// </summary>
 internal static class Badges
 {
+    /// <summary>The mark of what is kept as stated, but not everywhere within the tolerances.</summary>
+    public const string Unproven = "unproven";
+
     /// <summary>Names of the marks with the words for them, the gravest first.</summary>
     public static readonly (string Mark, string Words)[] All =
     [
-        ("nonconforming", "requirement not met"), ("undetermined", "open: input missing"), ("advised", "recommendation not met"),
+        ("nonconforming", "requirement not met"), (Unproven, "unproven within tolerances"), ("undetermined", "open: input missing"), ("advised", "recommendation not met"),
         ("departed", "departed from"), ("conforms", "conforms"),
     ];
 
@@ -53,6 +56,10 @@ internal static class Badges
             case "undetermined":
                 canvas.Path("M0 -8L8 0L0 8L-8 0Z", "undetermined hollow");
                 canvas.Text(0, 3.6, "?", "undetermined s b c");
+                break;
+            case Unproven:
+                canvas.Circle(0, 0, 6.5, "unproven hollow close");
+                canvas.Path("M-3 0.3L-0.8 2.6L3.2 -2.4", "unproven stroke");
                 break;
             case "departed":
                 canvas.Path("M0 -7L7.5 6H-7.5Z", "departed hollow");

@@ -151,7 +151,7 @@ internal sealed class Canvas
     }
 
     /// <summary>Size by which a text is measured; bold letters are wider.</summary>
-    private static double SizeOf(string look) => (look.StartsWith('s') ? Small : Ordinary) * (look.Contains(" b", StringComparison.Ordinal) ? 1.1 : 1);
+    private static double SizeOf(string look) => (look.StartsWith('s') ? Small : Ordinary) * (look.Contains(" b", StringComparison.Ordinal) ? 1.14 : 1);
 
     /// <summary>The classes of a look. Their prefix keeps them apart from those of the page: selectors cannot, since nothing reaches into a used symbol.</summary>
     private static string Classes(string look) => string.Join(' ', look.Split(' ').Select(part => "p-" + part));

@@ -17,8 +17,10 @@ internal sealed class MarginStrips(Scene scene, PicturePlan plan)
     private const double Width = 960;
     private const double Top = 44;
     private const double StripHeight = 44;
-    private const int Step = 7;
+    private const double Step = 7;
+    private const double Slack = 1e-6;
     private const int MostStacked = 5;
+    private const int MostMarked = 6;
 
     private static readonly Unit Percent = UnitCatalog.Find("%")!;
 
@@ -42,7 +44,7 @@ internal sealed class MarginStrips(Scene scene, PicturePlan plan)
         var bottom = Top + (strips.Length * StripHeight);
         using (canvas.Definitions())
         {
-            Badges.Define(canvas, Badges.All.Select(badge => badge.Mark));
+            Badges.Define(canvas, scene.Marks);
         }
 
         Axis(canvas, scale, bottom);
@@ -51,7 +53,7 @@ internal sealed class MarginStrips(Scene scene, PicturePlan plan)
             Draw(canvas, scale, strip, Top + ((index + 1) * StripHeight) - 10);
         }
 
-        Badges.Legend(canvas, ["nonconforming", "advised", "departed"], 24, bottom + 38);
+        Badges.Legend(canvas, scene.Marks.Except(["undetermined", "conforms"]), 24, bottom + 38);
         return new Picture(plan.Id, plan.Kind, plan.Title, plan.About, canvas.Finish(Width, bottom + 56), Table(strips));
     }
 
@@ -83,24 +85,27 @@ internal sealed class MarginStrips(Scene scene, PicturePlan plan)
         canvas.Line(24, y + 5, Width - 16, y + 5, "grid");
         canvas.TextWithin(24, y - 14, strip.Type, "t b", Left - 34);
         canvas.Text(24, y, $"{strip.Measured.Count} measured" + (strip.Open > 0 ? $", {strip.Open} open" : ""), "s m");
-        var bins = strip.Measured.GroupBy(finding => (int)Math.Round(scale.Of(Margin(finding)!.Value) / Step)).ToArray();
+        // Bins begin at the zero line, so that none holds margins of both sides.
+        var zero = scale.Of(0);
+        var bins = strip.Measured.GroupBy(finding => zero + ((Math.Floor((scale.Of(Margin(finding)!.Value) - zero + Slack) / Step) + 0.5) * Step)).ToArray();
         var most = bins.Max(bin => bin.Count());
         if (most > MostStacked)
         {
-            Bars(canvas, bins, most, y);
+            Bars(canvas, bins, most, y, conforming: true);
         }
         else
         {
             Dots(canvas, bins, y);
         }
 
-        Marks(canvas, scale, strip, y);
+        Marks(canvas, scale, bins, most, strip, y);
         foreach (var (index, finding) in strip.Measured.Take((int)Labelled).Index())
         {
             using var link = canvas.Link(Anchor.Of(finding.Key), $"{finding.Key}: {ValueText.ShowMargin(Margin(finding)!.Value)}, {finding.VerdictText}");
             var at = y - 14 - (index * 12);
             canvas.Text(Right + 18, at, ValueText.ShowMargin(Margin(finding)!.Value), "t b");
-            canvas.TextWithin(Right + 80, at, Scene.Label(finding.Subject), "t", Width - Right - 88);
+            var name = Right + 28 + Canvas.WidthOf(ValueText.ShowMargin(Margin(finding)!.Value), "t b");
+            canvas.TextWithin(name, at, Scene.Label(finding.Subject), "t", Width - name - 8);
             canvas.TextWithin(Right + 18, y, finding.Rule.Id, "s m", Width - Right - 34);
         }
     }
@@ -108,14 +113,14 @@ internal sealed class MarginStrips(Scene scene, PicturePlan plan)
     private double Labelled => (plan.Settings.Find("labelled") as Documents.ScalarNode)?.Number ?? 1;
 
     /// <summary>A dot for each finding that conforms, those of nearly the same margin stacked; all in one path, for there are many.</summary>
-    private static void Dots(Canvas canvas, IGrouping<int, Finding>[] bins, double y)
+    private static void Dots(Canvas canvas, IGrouping<double, Finding>[] bins, double y)
     {
         var dots = new StringBuilder();
         foreach (var bin in bins)
         {
             for (var level = 0; level < bin.Count(finding => finding.Verdict == Verdict.Conforms); level++)
             {
-                dots.Append(CultureInfo.InvariantCulture, $"M{bin.Key * Step} {Canvas.N(y - 1 - (level * 6.5))}h0");
+                dots.Append(CultureInfo.InvariantCulture, $"M{Canvas.N(bin.Key)} {Canvas.N(y - 1 - (level * 6.5))}h0");
             }
         }
 
@@ -123,33 +128,32 @@ internal sealed class MarginStrips(Scene scene, PicturePlan plan)
     }
 
     /// <summary>Where dots would not fit a bar stands for how many conform, as a share of the most that any bar of the strip has.</summary>
-    private static void Bars(Canvas canvas, IGrouping<int, Finding>[] bins, int most, double y)
+    private static void Bars(Canvas canvas, IGrouping<double, Finding>[] bins, int most, double y, bool conforming)
     {
         var bars = new StringBuilder();
-        foreach (var bin in bins.Where(bin => bin.Any(finding => finding.Verdict == Verdict.Conforms)))
+        foreach (var bin in bins.Where(bin => bin.Any(finding => finding.Verdict == Verdict.Conforms == conforming)))
         {
-            var height = Math.Max(2, 30.0 * bin.Count(finding => finding.Verdict == Verdict.Conforms) / most);
-            bars.Append(CultureInfo.InvariantCulture, $"M{(bin.Key * Step) - 2} {Canvas.N(y + 4)}v-{Canvas.N(height)}h5v{Canvas.N(height)}z");
+            var height = Math.Max(2, 30.0 * bin.Count(finding => finding.Verdict == Verdict.Conforms == conforming) / most);
+            bars.Append(CultureInfo.InvariantCulture, $"M{Canvas.N(bin.Key - 2.5)} {Canvas.N(y + 4)}v-{Canvas.N(height)}h5v{Canvas.N(height)}z");
         }
 
-        Path(canvas, bars, "conforms solid");
+        Path(canvas, bars, conforming ? "conforms solid" : "nonconforming solid");
     }
 
-    /// <summary>A mark of its own, with a link, for each finding that does not conform, as far as there is room; the tightest go before.</summary>
-    private static void Marks(Canvas canvas, MarginScale scale, Strip strip, double y)
+    /// <summary>A mark of its own, with a link, for each finding that does not conform; where they are many bars, and a mark for the tightest.</summary>
+    private static void Marks(Canvas canvas, MarginScale scale, IGrouping<double, Finding>[] bins, int most, Strip strip, double y)
     {
-        var free = double.NegativeInfinity;
-        foreach (var finding in strip.Measured.Where(finding => finding.Verdict != Verdict.Conforms))
+        var marked = strip.Measured.Where(finding => finding.Verdict != Verdict.Conforms).ToArray();
+        if (marked.Length > MostMarked)
         {
-            var x = scale.Of(Margin(finding)!.Value);
-            if (x < free)
-            {
-                continue;
-            }
+            Bars(canvas, bins, most, y, conforming: false);
+            marked = marked[..1];
+        }
 
+        foreach (var finding in marked)
+        {
             using var link = canvas.Link(Anchor.Of(finding.Key), $"{finding.Key}: {ValueText.ShowMargin(Margin(finding)!.Value)}, {finding.VerdictText}");
-            canvas.Use(Standing.Mark(finding), x, y - 5);
-            free = x + 4;
+            canvas.Use(Standing.Mark(finding), scale.Of(Margin(finding)!.Value), y - 5);
         }
     }
 

@@ -50,7 +50,7 @@ internal sealed class PartsCharts(Scene scene, PicturePlan plan)
         var canvas = new Canvas(id, title, plan.About);
         using (canvas.Definitions())
         {
-            Badges.Define(canvas, Badges.All.Select(badge => badge.Mark));
+            Badges.Define(canvas, scene.Marks);
         }
 
         plot.Draw(canvas);

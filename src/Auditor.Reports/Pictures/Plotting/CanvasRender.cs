@@ -73,9 +73,9 @@ internal sealed class CanvasRender(Canvas canvas, Looks looks, OxySize size) : R
             _clipIds.Add(key, id);
             using (canvas.Open("clipPath", ("id", id)))
             {
-                canvas.Path(
-                    $"M{Canvas.N(clippingRectangle.Left)} {Canvas.N(clippingRectangle.Top)}H{Canvas.N(clippingRectangle.Right)}V{Canvas.N(clippingRectangle.Bottom)}H{Canvas.N(clippingRectangle.Left)}Z",
-                    "clip");
+                canvas.Add(
+                    "rect", ("x", Canvas.N(clippingRectangle.Left)), ("y", Canvas.N(clippingRectangle.Top)), ("width", Canvas.N(clippingRectangle.Width)),
+                    ("height", Canvas.N(clippingRectangle.Height)));
             }
         }
 

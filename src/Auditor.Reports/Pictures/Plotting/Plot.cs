@@ -48,15 +48,16 @@ internal sealed class Plot
         MinorGridlineStyle = LineStyle.Solid,
     };
 
-    /// <summary>An even axis.</summary>
+    /// <summary>An even axis; where both begin at nil only one says so.</summary>
     /// <param name="from">Where it begins, in coherent units.</param>
     /// <param name="to">Where it ends.</param>
     /// <param name="unit">Unit of its labels.</param>
-    public static Axis Linear(double from, double to, Unit unit) => new LinearAxis
+    /// <param name="isNilSaid">Whether nil has a label.</param>
+    public static Axis Linear(double from, double to, Unit unit, bool isNilSaid) => new LinearAxis
     {
         Minimum = from,
         Maximum = to,
-        LabelFormatter = value => ValueText.ShowNumber(value, unit),
+        LabelFormatter = value => value == 0 && !isNilSaid ? "" : ValueText.ShowNumber(value, unit),
     };
 
     /// <summary>An axis that is not drawn.</summary>

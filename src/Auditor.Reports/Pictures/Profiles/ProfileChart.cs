@@ -37,14 +37,14 @@ internal sealed class ProfileChart(Scene scene, PicturePlan plan, IReadOnlyList<
         var known = ends.Select(End).OfType<PathEnd>().ToArray();
         var limits = known.Select(end => end.Limit).OfType<double>().Distinct().Order().ToArray();
         var plot = new Plot(
-            Size, Area, Plot.Linear(0, known.Max(end => end.Along) * 1.06, _length),
-            Plot.Linear(0, known.Select(end => end.Value).Concat(limits).Max() * 1.08, _unit));
+            Size, Area, Plot.Linear(0, known.Max(end => end.Along) * 1.06, _length, isNilSaid: false),
+            Plot.Linear(0, known.Select(end => end.Value).Concat(limits).Max() * 1.08, _unit, isNilSaid: true));
         plot.Line(known.SelectMany(end => Segment(end.Circuit.Parent!, end)), "thin");
         plot.Line(Ways(known), "stroke");
         var canvas = new Canvas(id, title, plan.About);
         using (canvas.Definitions())
         {
-            Badges.Define(canvas, Badges.All.Select(badge => badge.Mark));
+            Badges.Define(canvas, scene.Marks);
         }
 
         plot.Draw(canvas);

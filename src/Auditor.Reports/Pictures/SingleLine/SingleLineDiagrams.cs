@@ -54,7 +54,7 @@ internal sealed class SingleLineDiagrams(Scene scene, PicturePlan plan)
         var pen = new DiagramPen(scene, plan, canvas, columns, board => scene.CircuitsOf[board].Any() ? IdOf(board) : plan.Id, isOverview);
         using (canvas.Definitions())
         {
-            Badges.Define(canvas, Badges.All.Select(badge => badge.Mark));
+            Badges.Define(canvas, scene.Marks);
             Symbols.Define(canvas, layout.Items.SelectMany(pen.SymbolsOf).Distinct().Order(StringComparer.Ordinal));
         }
 
@@ -64,7 +64,7 @@ internal sealed class SingleLineDiagrams(Scene scene, PicturePlan plan)
             pen.Draw(item);
         }
 
-        Badges.Legend(canvas, Badges.All.Select(badge => badge.Mark), 24, layout.Height + 6);
+        Badges.Legend(canvas, scene.Marks, 24, layout.Height + 6);
         return new Picture(id, plan.Kind, title, plan.About, canvas.Finish(columns.Width, layout.Height + 24), Table(layout));
     }
 

@@ -20,8 +20,8 @@ internal sealed class TimeCurrentChart(Scene scene, PicturePlan plan, DesignSubj
     private static readonly Unit Ampere = UnitCatalog.Find("A")!;
     private static readonly Unit Second = UnitCatalog.Find("s")!;
 
-    private static readonly string[] FaultLooks = ["line s4", "line s4 dash"];
-    private static readonly string[] WithstandLooks = ["line s3", "line s3 dash"];
+    private static readonly string[] FaultLooks = ["line s4 dash", "line s4 close"];
+    private static readonly string[] WithstandLooks = ["line s3 chain", "line s3 chains"];
 
     private readonly List<(string Look, string Label, string Value)> _legend = [];
 
@@ -120,7 +120,7 @@ internal sealed class TimeCurrentChart(Scene scene, PicturePlan plan, DesignSubj
     private void Words(Canvas canvas)
     {
         canvas.TextWithin(16, 22, Scene.Label(circuit), "t b", Area.Right - 20);
-        canvas.Text(Area.Left, 40, "time", "s m e");
+        canvas.Text(Area.Left, 38, "time", "s m e");
         canvas.Text(Area.Right, Area.Bottom + 30, "current", "s m e");
         var standing = scene.StandingOf(circuit);
         if (standing.Lead is { } lead)

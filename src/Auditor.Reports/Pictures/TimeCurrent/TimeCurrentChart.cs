@@ -148,9 +148,10 @@ internal sealed class TimeCurrentChart(Scene scene, PicturePlan plan, DesignSubj
         }
     }
 
+    /// <summary>What has a name of its own; a setting that the chart only computes with has none.</summary>
     private PictureTable Table(string note) => new(
         $"What the chart of {circuit.Key} draws." + (note.Length > 0 ? " " + note : ""), ["Quantity", "Value"],
-        [.. plan.Quantities.Where(quantity => quantity.Shape == circuit.Shape)
+        [.. plan.Quantities.Where(quantity => quantity.Shape == circuit.Shape && quantity.Label != quantity.Formula.Text)
             .Where(quantity => quantity.IsLabelled || !quantity.Of(circuit).IsMissing)
             .Select(IReadOnlyList<string> (quantity) => [quantity.Label, quantity.Show(circuit)])]);
 }

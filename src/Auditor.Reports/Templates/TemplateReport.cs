@@ -1,6 +1,8 @@
 using System.Text;
 using Auditor.Documents;
 using Auditor.Reports.Files;
+using Auditor.Reports.Limits;
+using Auditor.Reports.Model;
 using Scriban.Syntax;
 
 namespace Auditor.Reports.Templates;
@@ -30,15 +32,27 @@ public static class TemplateReport
             return null;
         }
 
-        var context = new ReportContext(model, ink, folder);
+        var context = new ReportContext(model, LoosenedOf(model), ink, folder);
         try
         {
             var text = ink.Finish(parsed.Render(context).Replace("\r\n", "\n", StringComparison.Ordinal));
-            return context.HasShownCaution ? Encoding.UTF8.GetBytes(text) : folder.Refuse(TemplateMessages.WithoutCaution);
+            if (!context.HasShownCaution)
+            {
+                return folder.Refuse(TemplateMessages.WithoutCaution);
+            }
+
+            return context.HasShownLoosened ? Encoding.UTF8.GetBytes(text) : folder.Refuse(TemplateMessages.WithoutLoosened);
         }
         catch (ScriptRuntimeException fault)
         {
             return folder.Refuse(fault);
         }
     }
+
+    private static string LoosenedOf(object model) => model switch
+    {
+        ReportModel report => report.RuleSet.Loosened,
+        LimitsModel limits => limits.RuleSet.Loosened,
+        _ => "",
+    };
 }

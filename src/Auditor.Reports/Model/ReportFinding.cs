@@ -78,6 +78,9 @@ public sealed record ReportFinding
     /// <summary>Inputs that can put it right, as the design file names them.</summary>
     public required IReadOnlyList<string> PutRightBy { get; init; }
 
+    /// <summary>The nearest proven remedy, or that there is none; empty where nobody asked.</summary>
+    public required string Remedy { get; init; }
+
     /// <summary>Where to look in the design, as path:line:column.</summary>
     public required string Location { get; init; }
 

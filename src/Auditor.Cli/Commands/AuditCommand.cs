@@ -99,7 +99,7 @@ internal static class AuditCommand
         }
 
         private AuditResult WithRemediesIfAsked(AuditResult result) => WithRemedies
-            ? result with { Remedies = RemedySearch.Run(result, RemedySearch.Wanting(result), Designs.RereadOf(result.Design)) }
+            ? result with { Remedies = RemedySearch.Run(result, RemedySearch.Wanting(result)) }
             : result;
 
         private RevisionComparison? Compare(AuditResult result, RevisionReader reader)

@@ -55,10 +55,9 @@ internal static class RemediesCommand
                 return ExitCode.Problems;
             }
 
-            var reread = Designs.RereadOf(audit.Design);
-            var result = RemedySearch.Run(audit, findings, reread);
+            var result = RemedySearch.Run(audit, findings);
             Log.Information("Judged {Judged} times for {Findings} findings", result.Judged, findings.Count);
-            Write(result, targets, reread, problems);
+            Write(result, targets, problems);
             if (!Quiet)
             {
                 new RemedyList(Terminal.Console()).Write(RemediesModel.Build(result));
@@ -92,9 +91,9 @@ internal static class RemediesCommand
             return [];
         }
 
-        private void Write(RemedyResult result, IReadOnlyList<RemediesTarget> targets, Reread reread, Problems problems)
+        private void Write(RemedyResult result, IReadOnlyList<RemediesTarget> targets, Problems problems)
         {
-            var chosen = targets.Any(target => target.IsPatch) ? Chosen(result.Findings[0], result, reread, problems) : null;
+            var chosen = targets.Any(target => target.IsPatch) ? Chosen(result.Findings[0], result, problems) : null;
             foreach (var target in targets.Where(target => !target.IsPatch || chosen is not null))
             {
                 target.Write(result, chosen, problems);
@@ -102,7 +101,7 @@ internal static class RemediesCommand
         }
 
         /// <summary>The remedy of the patch, after the text as patched has been audited as a whole.</summary>
-        private Remedy? Chosen(FindingRemedies each, RemedyResult result, Reread reread, Problems problems)
+        private Remedy? Chosen(FindingRemedies each, RemedyResult result, Problems problems)
         {
             if (Number < 1 || Number > each.Remedies.Count)
             {
@@ -111,7 +110,7 @@ internal static class RemediesCommand
             }
 
             var remedy = each.Remedies[Number - 1];
-            var patched = RemedySearch.Reaudit(result.Audit, remedy.Inputs, reread);
+            var patched = RemedySearch.Reaudit(result.Audit, remedy.Inputs, Designs.RereadOf(result.Audit.Design));
             if (patched is null || patched.Find(each.Finding.Key) is { Verdict: not Verdict.Conforms })
             {
                 problems.Add(CommandMessages.PatchNotProven(each.Finding.Key));

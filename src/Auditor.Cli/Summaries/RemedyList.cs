@@ -39,5 +39,5 @@ internal sealed class RemedyList(IAnsiConsole console)
     }
 
     private static IEnumerable<string> Lines(RemedyRow row) =>
-        row.Changes.Append(string.Join("; ", new[] { row.Margins }.Concat(row.Besides).Where(text => text.Length > 0)));
+        row.Changes.Append(string.Join("; ", row.Besides.Prepend(row.Margins).Where(text => text.Length > 0))).Where(line => line.Length > 0);
 }

@@ -18,6 +18,7 @@ public sealed class AdjustedDesign
     /// <param name="places">What is adjusted. Where two of them change the same input, the later one counts.</param>
     public AdjustedDesign(DependencyMap map, params IReadOnlyList<Adjustable> places)
     {
+        Map = map;
         Places = places;
         var inputs = places.SelectMany(place => place.Inputs).ToArray();
         _variant = new Variant(map, inputs);
@@ -27,6 +28,9 @@ public sealed class AdjustedDesign
             : [.. inputs.SelectMany(input => map.ReachOf(input).Rules).Distinct()
                 .OrderBy(at => at.Subject.Index).ThenBy(at => at.Rule.Id, StringComparer.Ordinal)];
     }
+
+    /// <summary>The map of the design as it is.</summary>
+    public DependencyMap Map { get; }
 
     /// <summary>What is adjusted.</summary>
     public IReadOnlyList<Adjustable> Places { get; }
@@ -78,7 +82,7 @@ public sealed class AdjustedDesign
     public IReadOnlyList<ChangedInput> Changes() =>
         [.. _variant.Inputs.Distinct()
             .Select(input => new ChangedInput(input, _variant.Of(input.Subject).Input(input.Slot.Index)))
-            .Where(changed => !Adjustable.Same(changed.After, changed.Input.Stated))];
+            .Where(changed => !changed.After.IsMissing && !Adjustable.Same(changed.After, changed.Input.Stated))];
 
     /// <summary>A quantity of a subject with the adjustments made.</summary>
     internal Value Quantity(QuantityDefinition quantity, DesignSubject subject) => _variant.Of(subject).Quantity(quantity.Slot.Index);

@@ -14,18 +14,15 @@ internal sealed class Attempt
     private static readonly double[] Places = [1.0 / 3, 2.0 / 3, 1];
 
     private readonly Recheck _recheck;
-    private readonly Func<IReadOnlyList<ChangedInput>, AuditResult?> _reaudit;
     private readonly IReadOnlyList<Candidate> _candidates;
     private readonly AdjustedDesign _design;
     private readonly RuleAt _target;
     private readonly double _loss;
     private readonly HashSet<RuleAt> _blockers = [];
 
-    public Attempt(
-        DependencyMap map, Recheck recheck, Func<IReadOnlyList<ChangedInput>, AuditResult?> reaudit, Finding finding, IReadOnlyList<Candidate> candidates)
+    public Attempt(DependencyMap map, Recheck recheck, Finding finding, IReadOnlyList<Candidate> candidates)
     {
         _recheck = recheck;
-        _reaudit = reaudit;
         _candidates = candidates;
         _design = new AdjustedDesign(map, [.. candidates.Select(candidate => candidate.Place)]);
         _target = new RuleAt(finding.Rule, finding.Subject);
@@ -34,6 +31,9 @@ internal sealed class Attempt
 
     /// <summary>How many rules have been judged.</summary>
     public long Judged { get; private set; }
+
+    /// <summary>Rules that ruled out what would have put the finding right.</summary>
+    public IReadOnlyCollection<RuleAt> Obstacles => _blockers;
 
     public Remedy? Run()
     {
@@ -116,22 +116,24 @@ internal sealed class Attempt
 
     private Remedy? Prove(IReadOnlyList<Change> changes)
     {
-        var inputs = _design.Changes();
-        if (_recheck.IsGuarded)
+        // What is broken as stated is so by guarded acceptance as well, and told sooner.
+        if (Recheck() is not { } simple)
         {
-            var changed = _reaudit(inputs);
-            Judged += changed?.Findings.Count ?? 0;
-            var standing = changed?.Find(_target.Key) is { } found ? Standing.Of(found, true) : default;
-            return changed is not null && standing.IsKept && _recheck.Run(changed, _target) is { } outcome ? Tell(changes, inputs, standing, outcome) : null;
+            return null;
         }
 
-        return Recheck() is { } simple ? Tell(changes, inputs, Standing.Of(_design.Judge(_target)), simple) : null;
+        if (!_recheck.IsGuarded)
+        {
+            return Tell(changes, Standing.Of(_design.Judge(_target)), simple);
+        }
+
+        return _recheck.RunGuarded(_design, _target, _blockers, out var after) is { } guarded ? Tell(changes, after, guarded) : null;
     }
 
-    private Remedy Tell(IReadOnlyList<Change> changes, IReadOnlyList<ChangedInput> inputs, Standing after, Outcome outcome) => new()
+    private Remedy Tell(IReadOnlyList<Change> changes, Standing after, Outcome outcome) => new()
     {
         Changes = changes,
-        Inputs = inputs,
+        Inputs = _design.Changes(),
         Effort = changes.Sum(change => change.Effort),
         Verdict = after.Verdict,
         Before = _recheck.Before(_target).Margin,
@@ -142,6 +144,7 @@ internal sealed class Attempt
         Rechecked = outcome.Rechecked + 1,
     };
 
-    private static RuleAt[] InOrder(IEnumerable<RuleAt> rules) =>
+    /// <summary>Rules in the order of findings.</summary>
+    public static RuleAt[] InOrder(IEnumerable<RuleAt> rules) =>
         [.. rules.OrderBy(at => at.Subject.Index).ThenBy(at => at.Rule.Id, StringComparer.Ordinal)];
 }

@@ -11,7 +11,8 @@ internal static class Candidates
     private const string CablePrefix = "cable.";
 
     /// <summary>
-    /// The adjustments at the subject of the finding and at everything between it and the origin, cable runs included: those that the rule
+    /// The adjustments at the subject of the finding and at everything between it and the origin, cable runs included, and at bonding
+    /// conductors for a finding at the origin: those that the rule
     /// reads, however indirectly, and those beside them that may make up for what another one breaks.
     /// </summary>
     public static (IReadOnlyList<Candidate> Reading, IReadOnlyList<Candidate> Beside) Of(DependencyMap map, Finding finding)
@@ -33,7 +34,8 @@ internal static class Candidates
             chain.UnionWith(each.Legs);
         }
 
-        return design.Subjects.Where(chain.Contains);
+        var isOrigin = subject.Parent is null;
+        return design.Subjects.Where(each => chain.Contains(each) || (isOrigin && each.Shape == design.Evaluator.Rules.Schema.Shapes.Bonding));
     }
 
     private static bool IsNamed(Finding finding, Adjustable place) =>

@@ -1,4 +1,3 @@
-using Auditor.Engine.Adjustments;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Variation;
 
@@ -7,11 +6,11 @@ namespace Auditor.Engine.Remedies;
 /// <summary>Searches for what would put one finding right.</summary>
 /// <param name="map">The map of the design.</param>
 /// <param name="recheck">Judges again what a change touches.</param>
-/// <param name="reaudit">Audits the design with changes as a whole.</param>
 /// <param name="finding">The finding.</param>
-internal sealed class FindingSearch(
-    DependencyMap map, Recheck recheck, Func<IReadOnlyList<ChangedInput>, AuditResult?> reaudit, Finding finding)
+internal sealed class FindingSearch(DependencyMap map, Recheck recheck, Finding finding)
 {
+    private readonly HashSet<RuleAt> _obstacles = [];
+
     public long Judged { get; private set; }
 
     public FindingRemedies Run()
@@ -31,14 +30,15 @@ internal sealed class FindingSearch(
 
         var ordered = found.OrderBy(pair => pair.Remedy.Effort).ThenBy(pair => pair.Remedy.Changes.Count).ThenBy(pair => pair.IsNamed ? 0 : 1)
             .ThenBy(pair => string.Join(' ', pair.Remedy.Changes.Select(change => $"{change.Place.Subject.Key} {change.Place.Adjustment.Id}")), StringComparer.Ordinal);
-        return new FindingRemedies(finding, [.. ordered.Select(pair => pair.Remedy)], tried);
+        return new FindingRemedies(finding, [.. ordered.Select(pair => pair.Remedy)], tried, Attempt.InOrder(_obstacles));
     }
 
     private bool Add(List<(Remedy Remedy, bool IsNamed)> found, params IReadOnlyList<Candidate> candidates)
     {
-        var attempt = new Attempt(map, recheck, reaudit, finding, candidates);
+        var attempt = new Attempt(map, recheck, finding, candidates);
         var remedy = attempt.Run();
         Judged += attempt.Judged;
+        _obstacles.UnionWith(attempt.Obstacles);
         if (remedy is not null)
         {
             found.Add((remedy, candidates.All(candidate => candidate.IsNamed)));

@@ -11,7 +11,7 @@ internal sealed class Outcome
     /// <summary>Other nonconformities put right.</summary>
     public List<RuleAt> AlsoRight { get; } = [];
 
-    /// <summary>Recommendations that can no longer be judged.</summary>
+    /// <summary>Rules that come to apply and lack input, and recommendations that can no longer be judged.</summary>
     public List<RuleAt> Open { get; } = [];
 
     /// <summary>Rules with less margin, the greatest loss first.</summary>
@@ -21,8 +21,8 @@ internal sealed class Outcome
     public int Rechecked { get; private set; }
 
     /// <summary>
-    /// Takes a rule in; false where it rules the change out: it is newly broken, or a requirement that could be judged before, or did not
-    /// apply, can no longer be judged. A remedy that cannot be proven is none.
+    /// Takes a rule in; false where it rules the change out: it is newly broken, or a requirement that was kept can no longer be judged,
+    /// so that what was proven would be lost.
     /// </summary>
     public bool Takes(RuleAt at, Standing before, Standing after)
     {
@@ -35,7 +35,7 @@ internal sealed class Outcome
         if (after.Verdict == Findings.Verdict.Undetermined && before.Verdict != Findings.Verdict.Undetermined)
         {
             Open.Add(at);
-            return at.Rule.Provision == Provision.Recommendation;
+            return before.Verdict is null || at.Rule.Provision == Provision.Recommendation;
         }
 
         if (before.IsBroken && after.IsKept)

@@ -1,7 +1,6 @@
 using Auditor.Engine.Adjustments;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Guarded;
-using Auditor.Engine.Installation;
 using Auditor.Engine.Variation;
 
 namespace Auditor.Engine.Remedies;
@@ -10,13 +9,13 @@ namespace Auditor.Engine.Remedies;
 internal sealed class Recheck
 {
     private readonly Dictionary<RuleAt, Standing> _before;
-    private readonly Dictionary<string, DesignSubject> _subjects;
+    private readonly IReadOnlyList<TolerancedInput> _tolerances;
 
     public Recheck(AuditResult audit)
     {
         IsGuarded = audit.Decision == Decision.Guarded;
         _before = audit.Findings.ToDictionary(finding => new RuleAt(finding.Rule, finding.Subject), finding => Standing.Of(finding, IsGuarded));
-        _subjects = audit.Design.Subjects.ToDictionary(subject => subject.Key);
+        _tolerances = IsGuarded ? ToleranceReader.Read(audit.Design) : [];
     }
 
     /// <summary>Whether values must keep their limits everywhere within the tolerances.</summary>
@@ -47,12 +46,43 @@ internal sealed class Recheck
         return outcome;
     }
 
-    /// <summary>Holds a whole audit of the changed design against that of the design as it is; null where it rules the change out.</summary>
-    public Outcome? Run(AuditResult changed, RuleAt target)
+    /// <summary>
+    /// By guarded acceptance: finds the worst case anew for every rule within reach of the changes; null where the finding is not put right
+    /// or, with the rule, where one is broken.
+    /// </summary>
+    /// <param name="design">The design with the changes made.</param>
+    /// <param name="target">The finding to be put right.</param>
+    /// <param name="blockers">Receives the rule that rules the changes out.</param>
+    /// <param name="after">How the finding comes out then.</param>
+    public Outcome? RunGuarded(AdjustedDesign design, RuleAt target, HashSet<RuleAt> blockers, out Standing after)
     {
+        var changes = design.Changes();
+        var inputs = ToleranceReader.After(_tolerances, design, changes);
+        after = Guarded(design, target, GuardedAcceptance.Run(design.Map, inputs, changes, new HashSet<RuleAt> { target }));
+        if (!after.IsKept)
+        {
+            return null;
+        }
+
+        var cases = GuardedAcceptance.Run(design.Map, inputs, changes, design.Rules.ToHashSet());
         var outcome = new Outcome();
-        var after = changed.Findings.ToDictionary(finding => new RuleAt(finding.Rule, _subjects[finding.Subject.Key]), finding => Standing.Of(finding, IsGuarded));
-        var all = after.Keys.Union(_before.Keys).Where(at => at != target);
-        return all.All(at => outcome.Takes(at, Before(at), after.GetValueOrDefault(at))) ? outcome : null;
+        foreach (var at in design.Rules.Where(at => at != target))
+        {
+            if (!outcome.Takes(at, Before(at), Guarded(design, at, cases)))
+            {
+                blockers.Add(at);
+                return null;
+            }
+        }
+
+        return outcome;
+    }
+
+    private static Standing Guarded(AdjustedDesign design, RuleAt at, IReadOnlyDictionary<RuleAt, WorstCase> cases)
+    {
+        var stated = Standing.Of(design.Judge(at));
+        return cases.GetValueOrDefault(at) is not { } worst
+            ? stated
+            : new Standing(stated.IsKept && !worst.IsKept ? Verdict.Unproven : stated.Verdict, worst.Margin);
     }
 }

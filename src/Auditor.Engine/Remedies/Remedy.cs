@@ -31,7 +31,7 @@ public sealed record Remedy
     /// <summary>Other nonconformities that are put right as well, in the order of findings.</summary>
     public required IReadOnlyList<RuleAt> AlsoRight { get; init; }
 
-    /// <summary>Recommendations that can no longer be judged, in the order of findings.</summary>
+    /// <summary>Rules that come to apply and lack input, and recommendations that can no longer be judged; in the order of findings.</summary>
     public required IReadOnlyList<RuleAt> Open { get; init; }
 
     /// <summary>How many rules were judged again to prove it.</summary>

@@ -8,7 +8,7 @@ namespace Auditor.Engine.Remedies;
 
 /// <summary>
 /// Searches the changes that rule data declare as remedies, singly and in pairs, for those that put a finding right. Each is proven by
-/// judging again everything that it touches, downstream included; by guarded acceptance, by a whole audit of the changed text.
+/// judging again everything that it touches, downstream included; by guarded acceptance, in the worst case within the tolerances.
 /// </summary>
 public static class RemedySearch
 {
@@ -19,8 +19,7 @@ public static class RemedySearch
     /// <summary>Runs the search.</summary>
     /// <param name="audit">The audit of the design.</param>
     /// <param name="findings">The findings to look into.</param>
-    /// <param name="reread">Reads the design again with changes.</param>
-    public static RemedyResult Run(AuditResult audit, IReadOnlyList<Finding> findings, Reread reread)
+    public static RemedyResult Run(AuditResult audit, IReadOnlyList<Finding> findings)
     {
         var map = new DependencyMap(audit.Design);
         var recheck = new Recheck(audit);
@@ -28,7 +27,7 @@ public static class RemedySearch
         long judged = 0;
         Parallel.For(0, findings.Count, i =>
         {
-            var search = new FindingSearch(map, recheck, changes => Reaudit(audit, changes, reread), findings[i]);
+            var search = new FindingSearch(map, recheck, findings[i]);
             found[i] = search.Run();
             Interlocked.Add(ref judged, search.Judged);
         });

@@ -38,6 +38,7 @@ public static class RemediesJson
         output.Text("verdict", each.Finding.VerdictText);
         output.Text("message", each.Finding.Message);
         output.Whole("tried", each.Tried);
+        output.Texts("obstacles", each.Obstacles.Select(at => at.Key));
         output.Array("remedies", each.Remedies, remedy => output.Object(null, () => Remedy(output, remedy)));
     }
 

@@ -66,7 +66,7 @@ public static class RemedyText
 
         if (remedy.Open.Count > 0)
         {
-            lines.Add($"leaves open {Named(remedy.Open.Select(at => at.Key))}");
+            lines.Add($"leaves open, for want of input, {Named(remedy.Open.Select(at => at.Key))}");
         }
 
         return lines;
@@ -82,7 +82,9 @@ public static class RemedyText
     {
         { Remedies.Count: > 0 } => "",
         { Tried: 0 } => "the rule set declares no adjustment that has a part in this rule",
-        _ => $"none of the {each.Tried} adjustments tried, singly and in pairs, puts it right without creating a nonconformity",
+        { Obstacles: [] } => $"none of the {each.Tried} adjustments tried, singly and in pairs, puts it right",
+        _ => $"of the {each.Tried} adjustments tried, singly and in pairs, those that put it right break other rules or leave them open: " +
+            Named(each.Obstacles.Select(at => at.Key)),
     };
 
     private static string Named(IEnumerable<string> names)

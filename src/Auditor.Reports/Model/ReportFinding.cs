@@ -21,7 +21,7 @@ public sealed record ReportFinding
     /// <summary>The verdict, with the assumption that it hangs on.</summary>
     public required string Verdict { get; init; }
 
-    /// <summary>The verdict in one word: nonconforming, undetermined, departed or conforms.</summary>
+    /// <summary>The verdict in one word: nonconforming, unproven, undetermined, departed or conforms.</summary>
     public required string VerdictWord { get; init; }
 
     /// <summary>Id of the finding within the report.</summary>

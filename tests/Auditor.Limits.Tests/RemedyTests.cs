@@ -63,11 +63,14 @@ public class RemedyTests
     [Fact]
     public void What_a_remedy_costs_elsewhere_is_told()
     {
-        var found = Find(Radial.With("MB/2", "device.curve", "D").With("MB/2/leg 1", "length", "30 m"), "disconnection-tn:MB/2");
-        var size = Assert.Single(found.Remedies, remedy => Ids(remedy) is ["cable-size"]);
+        // 12 A on In of 20 A leaves 40 % of it, on 16 A 25 %; 16 A lie within the 17.55 A that four bunched circuits leave of 2.5 mm².
+        var found = Find(Radial.With("MB/2/leg 1", "grouped-circuits", "4"), "overload-capacity:MB/2");
+        var rating = Assert.Single(found.Remedies, remedy => Ids(remedy) is ["device-rating"]);
+        var move = Assert.Single(rating.Worsened, move => move.At.Key == "overload-design-current:MB/2");
 
-        Assert.All(size.Worsened, move => Assert.True(move.Loss > 0));
-        Assert.Equal(size.Worsened.Select(move => move.Loss).OrderDescending(), size.Worsened.Select(move => move.Loss));
+        Assert.Equal(16, rating.Changes[0].Value.Number, 9);
+        Assert.Equal(0.40, move.Before.Relative!.Value, 9);
+        Assert.Equal(0.25, move.After.Relative!.Value, 9);
     }
 
     [Fact]

@@ -12,6 +12,7 @@ public sealed class AdjustedDesign
 {
     private readonly Variant _variant;
     private readonly int[] _first;
+    private IReadOnlyList<RuleAt>? _rules;
 
     /// <summary>Makes a design that as yet differs in nothing.</summary>
     /// <param name="map">The map of the design.</param>
@@ -20,13 +21,8 @@ public sealed class AdjustedDesign
     {
         Map = map;
         Places = places;
-        var inputs = places.SelectMany(place => place.Inputs).ToArray();
-        _variant = new Variant(map, inputs);
+        _variant = new Variant(map, [.. places.SelectMany(place => place.Inputs)]);
         _first = [.. places.Select((_, i) => places.Take(i).Sum(place => place.Inputs.Count))];
-        Rules = inputs.Length == 1
-            ? map.ReachOf(inputs[0]).Rules
-            : [.. inputs.SelectMany(input => map.ReachOf(input).Rules).Distinct()
-                .OrderBy(at => at.Subject.Index).ThenBy(at => at.Rule.Id, StringComparer.Ordinal)];
     }
 
     /// <summary>The map of the design as it is.</summary>
@@ -36,7 +32,10 @@ public sealed class AdjustedDesign
     public IReadOnlyList<Adjustable> Places { get; }
 
     /// <summary>The rules that may come out otherwise, in the order of findings.</summary>
-    public IReadOnlyList<RuleAt> Rules { get; }
+    public IReadOnlyList<RuleAt> Rules => _rules ??= _variant.Inputs.Count == 1
+        ? Map.ReachOf(_variant.Inputs[0]).Rules
+        : [.. _variant.Inputs.SelectMany(input => Map.ReachOf(input).Rules).Distinct()
+            .OrderBy(at => at.Subject.Index).ThenBy(at => at.Rule.Id, StringComparer.Ordinal)];
 
     /// <summary>Makes the adjustments, in the order of the places; with its stated value a place is as it was.</summary>
     public void Set(params ReadOnlySpan<Value> values)

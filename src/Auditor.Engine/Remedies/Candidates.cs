@@ -21,7 +21,7 @@ internal static class Candidates
         var all = Adjustables.Remedies(map.Design, Chain(map.Design, finding.Subject))
             .Select(place => new Candidate(map, place, IsNamed(finding, place)))
             .Where(candidate => candidate.Steps.Count > 0 || candidate.Ends.Count > 0)
-            .ToLookup(candidate => candidate.Place.Inputs.Any(input => map.ReachOf(input).Rules.Contains(at)));
+            .ToLookup(candidate => candidate.Place.Inputs.Any(input => map.ReachOf(input).Holds(at)));
         return ([.. all[true]], [.. all[false]]);
     }
 

@@ -26,6 +26,7 @@ internal static class AuditorProgram
             CompareCommand.Make(terminal),
             EvidenceCommand.Make(terminal),
             LimitsCommand.Make(terminal),
+            RemediesCommand.Make(terminal),
             RulesCommand.Make(terminal),
             NewCommand.Make(terminal),
             ImportCommand.Make(terminal),

@@ -18,7 +18,7 @@ public class LimitTests
         {
             var design = plan.Build(Shipped.UnitedKingdom);
             var tried = 0;
-            foreach (var limit in LimitSearch.Run(design, Adjustables.Of(design)).Inputs.Where(limit => limit.Input.Adjustment.Ladder is RangeLadder))
+            foreach (var limit in LimitSearch.Run(design, Adjustables.WithLimits(design)).Inputs.Where(limit => limit.Input.Adjustment.Ladder is RangeLadder))
             {
                 foreach (var (rule, edge) in EdgesOf(limit).Where(pair => !pair.Edge.IsUnknownBeyond && Math.Abs(pair.Edge.Margin) < 1e-6))
                 {
@@ -42,7 +42,7 @@ public class LimitTests
         Plans.Any.Sample(plan =>
         {
             var design = plan.Build(Shipped.UnitedKingdom);
-            foreach (var limit in LimitSearch.Run(design, Adjustables.Of(design)).Inputs)
+            foreach (var limit in LimitSearch.Run(design, Adjustables.WithLimits(design)).Inputs)
             {
                 foreach (var (rule, edge) in EdgesOf(limit).Where(pair => !pair.Edge.IsUnknownBeyond && Math.Abs(pair.Edge.Margin) >= 1e-6))
                 {
@@ -60,7 +60,7 @@ public class LimitTests
         Gen.Select(Plans.Any, Gen.Double[0, 1].Array[20]).Sample((plan, shares) =>
         {
             var design = plan.Build(Shipped.UnitedKingdom);
-            foreach (var limit in LimitSearch.Run(design, Adjustables.Of(design)).Inputs)
+            foreach (var limit in LimitSearch.Run(design, Adjustables.WithLimits(design)).Inputs)
             {
                 if (limit.Input.Adjustment.Ladder is not RangeLadder range)
                 {
@@ -115,7 +115,7 @@ public class LimitTests
     public void The_protective_conductor_of_a_flat_cable_goes_with_its_size()
     {
         var design = Plans.Fixed.Build(Shipped.UnitedKingdom);
-        var input = Adjustables.Of(design).Single(place => place.Subject.Key == "MB/2" && place.Adjustment.Id == "cable-size");
+        var input = Adjustables.WithLimits(design).Single(place => place.Subject.Key == "MB/2" && place.Adjustment.Id == "cable-size");
         var adjusted = new AdjustedDesign(new DependencyMap(design), input);
         adjusted.Set(Value.Of(6e-6));
 
@@ -161,7 +161,7 @@ public class LimitTests
     private static InputLimit Find(Plan plan, string subject, string adjustment)
     {
         var design = plan.Build(Shipped.UnitedKingdom);
-        var input = Adjustables.Of(design).Single(place => place.Subject.Key == subject && place.Adjustment.Id == adjustment);
+        var input = Adjustables.WithLimits(design).Single(place => place.Subject.Key == subject && place.Adjustment.Id == adjustment);
         return LimitSearch.Run(design, [input]).Inputs[0];
     }
 

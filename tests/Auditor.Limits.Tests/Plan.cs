@@ -2,6 +2,7 @@ using System.Text;
 using Auditor.Documents;
 using Auditor.Engine.Evaluation;
 using Auditor.Engine.Installation;
+using Auditor.Engine.Remedies;
 using Auditor.Engine.RuleSets;
 
 namespace Auditor.Limits.Tests;
@@ -18,14 +19,22 @@ internal sealed record Plan(
     public Plan With(string subject, string path, string text) =>
         this with { Stated = new Dictionary<(string, string), string>(Stated) { [(subject, path)] = text } };
 
+    private const string Name = "plan.design.yaml";
+
+    /// <summary>Reads the design of a plan again, with its text changed.</summary>
+    public static Reread Rereading(RuleSet rules) => texts => Build(rules, texts[Name]);
+
     /// <summary>Builds the design; the test fails when it is not valid.</summary>
-    public Design Build(RuleSet rules)
+    public Design Build(RuleSet rules) => Build(rules, Text());
+
+    /// <summary>Builds a design from text; the test fails when it is not valid.</summary>
+    public static Design Build(RuleSet rules, string text)
     {
         var problems = new Problems();
-        var root = (MappingNode)YamlReader.Read(new SourceText("plan.design.yaml", Text()), problems)!;
+        var root = (MappingNode)YamlReader.Read(new SourceText(Name, text), problems)!;
         rules.Schema.Validation.Validate(root, problems);
-        var design = DesignBuilder.Build(new DesignFile("plan.design.yaml", root, []), new Evaluator(rules), problems);
-        Assert.Equal("", ProblemText.Render(problems.All));
+        var design = DesignBuilder.Build(new DesignFile(Name, root, []), new Evaluator(rules), problems);
+        Assert.True(problems.All.Count == 0, ProblemText.Render(problems.All));
         return design!;
     }
 

@@ -158,7 +158,7 @@ public class TradeCaseTests
     private static InputLimit Find(Plan plan, RuleSet rules, string subject, string adjustment)
     {
         var design = plan.Build(rules);
-        var input = Adjustables.Of(design).Single(place => place.Subject.Key == subject && place.Adjustment.Id == adjustment);
+        var input = Adjustables.WithLimits(design).Single(place => place.Subject.Key == subject && place.Adjustment.Id == adjustment);
         return LimitSearch.Run(design, [input]).Inputs[0];
     }
 }

@@ -9,11 +9,7 @@ internal sealed class AcceptanceOptions
 {
     private const int MostSamples = 1_000_000;
 
-    private readonly Option<Decision?> _decision = new("--decision")
-    {
-        Description = "Hold values against limits as stated (simple), or wherever within the tolerances the true inputs lie (guarded); " +
-            "the design decides when left out.",
-    };
+    private readonly Option<Decision?> _decision = MakeDecision();
 
     private readonly Option<int> _samples = new("--sample")
     {
@@ -22,6 +18,13 @@ internal sealed class AcceptanceOptions
     };
 
     private readonly Option<int> _seed = new("--seed") { Description = "Where the random numbers of --sample begin.", HelpName = "N", DefaultValueFactory = _ => 1 };
+
+    /// <summary>The option that names the decision rule.</summary>
+    public static Option<Decision?> MakeDecision() => new("--decision")
+    {
+        Description = "Hold values against limits as stated (simple), or wherever within the tolerances the true inputs lie (guarded); " +
+            "the design decides when left out.",
+    };
 
     /// <summary>Adds the options to a command.</summary>
     public void AddTo(Command command)

@@ -6,6 +6,7 @@ using Auditor.Engine.Comparisons;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Guarded;
 using Auditor.Engine.Registers;
+using Auditor.Engine.Remedies;
 using Auditor.Reports.Comparisons;
 using Auditor.Reports.Json;
 using Auditor.Reports.Model;
@@ -31,6 +32,7 @@ internal static class AuditCommand
             HelpName = "FINDINGS",
         };
         var acceptance = new AcceptanceOptions();
+        var withRemedies = new Option<bool>("--with-remedies") { Description = "Tell with each finding the nearest proven remedy, as `remedies` finds it." };
         var quiet = new Option<bool>("--quiet", "-q") { Description = "Print no summary." };
         var command = new ExampleCommand(
             "audit", "Audit design files against a rule set.",
@@ -39,11 +41,11 @@ internal static class AuditCommand
             "auditor audit site.design.yaml --write site.html --write site.json",
             "auditor audit designs --write '{name}.report.md' --as-of 2026-12-01",
             "auditor audit designs --against '{name}.findings.json'",
-            "auditor audit site.design.yaml --decision guarded --sample 2000") { designs, rules, write, template, evidence, asOf, failOn, against, quiet };
+            "auditor audit site.design.yaml --decision guarded --sample 2000") { designs, rules, write, template, evidence, asOf, failOn, against, withRemedies, quiet };
         acceptance.AddTo(command);
         command.SetAction(parsed => new AuditRun(
             terminal, problems => acceptance.Read(parsed, problems), parsed.GetValue(rules), parsed.GetValue(write) ?? [], parsed.GetValue(template),
-            new FindingsOptions(parsed.GetValue(evidence)), parsed.GetValue(failOn), parsed.GetValue(against), parsed.GetValue(quiet))
+            new FindingsOptions(parsed.GetValue(evidence)), parsed.GetValue(failOn), parsed.GetValue(against), parsed.GetValue(withRemedies), parsed.GetValue(quiet))
             .Execute(parsed.GetValue(designs)!, parsed.GetValue(asOf)));
         return command;
     }
@@ -51,7 +53,7 @@ internal static class AuditCommand
     /// <summary>One run of the command.</summary>
     private sealed record AuditRun(
         Terminal Terminal, Func<Problems, Acceptance> Acceptance, string? RuleSet, IReadOnlyList<string> Writes, string? Template,
-        FindingsOptions Options, FailOn FailOn, string? Against, bool Quiet)
+        FindingsOptions Options, FailOn FailOn, string? Against, bool WithRemedies, bool Quiet)
     {
         public int Execute(string[] arguments, string? asOfText)
         {
@@ -73,7 +75,7 @@ internal static class AuditCommand
 
             var register = targets.Count == 0 ? null : Task.Run(() => Register.Load(Shipped.Rules, problems));
             var auditing = new Auditing(RuleSet, asOf, problems, acceptance);
-            var results = paths.Select(auditing.Run).OfType<AuditResult>().ToArray();
+            var results = paths.Select(auditing.Run).OfType<AuditResult>().Select(WithRemediesIfAsked).ToArray();
             var reader = new RevisionReader(auditing, problems);
             var audited = problems.HasErrors ? [] : results.Select(result => new Audited(result, Compare(result, reader))).ToArray();
             if (problems.HasErrors)
@@ -95,6 +97,10 @@ internal static class AuditCommand
 
             return Terminal.Tell(problems) ? ExitCode.Problems : Code(audited);
         }
+
+        private AuditResult WithRemediesIfAsked(AuditResult result) => WithRemedies
+            ? result with { Remedies = RemedySearch.Run(result, RemedySearch.Wanting(result)) }
+            : result;
 
         private RevisionComparison? Compare(AuditResult result, RevisionReader reader)
         {

@@ -21,6 +21,27 @@ internal static class CommandMessages
     public static Problem UnknownLimitsFormat(string path, IEnumerable<string> endings) => Problem.Error(
         "unknown-report-format", $"`{path}` has no ending that names a format of limits", null, "known endings: " + string.Join(", ", endings));
 
+    public static Problem UnknownRemediesFormat(string path, IEnumerable<string> endings) => Problem.Error(
+        "unknown-report-format", $"`{path}` has no ending that names a format of remedies", null, "known endings: " + string.Join(", ", endings));
+
+    public static Problem PatchOfMany(string path) => Problem.Error(
+        "patch-of-many", $"`{path}` can hold the remedy of one finding only", null, "name the finding by its key, as `auditor remedies DESIGN` lists it");
+
+    public static Problem UnknownFinding(string key, string? nearest) => Problem.Error(
+        "unknown-finding", $"the audit has no finding `{key}`", null,
+        nearest is null ? "write `rule:subject`, as the report does" : $"did you mean `{nearest}`?");
+
+    public static Problem NothingToRemedy(string key, string verdict) => Problem.Error(
+        "nothing-to-remedy", $"the finding `{key}` is {verdict}", null, "remedies are sought for what is nonconforming or unproven");
+
+    public static Problem NoSuchRemedy(string key, int number, int count) => Problem.Error(
+        "no-such-remedy", $"the finding `{key}` has no remedy number {number}", null,
+        count == 0 ? "no proven remedy was found for it" : $"it has {count}: choose one with `--number`");
+
+    public static Problem PatchNotProven(string key) => Problem.Error(
+        "patch-not-proven", $"the audit of the patched design does not put `{key}` right, so no patch was written", null,
+        "this is a fault of auditor; make the change by hand and audit again");
+
     public static Problem NotSamples(int samples, int most) => Problem.Error(
         "not-a-count", $"{samples} samples cannot be drawn", null, $"give `--sample` a number from 1 to {most}");
 

@@ -63,13 +63,13 @@ internal static class LimitsCommand
     {
         public IReadOnlyList<Adjustable> Of(Design design, Problems problems)
         {
-            var all = Adjustables.Of(design);
+            var all = Adjustables.WithLimits(design);
             if (Subject is not null && design.Find(Subject) is null)
             {
                 problems.Add(CommandMessages.UnknownSubject(Subject, NearestWord.Find(Subject, design.Subjects.Select(subject => subject.Key))));
             }
 
-            var paths = design.Evaluator.Rules.Adjustments.Select(adjustment => adjustment.Path).Distinct().ToArray();
+            var paths = design.Evaluator.Rules.Adjustments.Where(adjustment => adjustment.HasLimits).Select(adjustment => adjustment.Path).Distinct().ToArray();
             if (Input is not null && !paths.Contains(Input))
             {
                 problems.Add(CommandMessages.NotAdjustable(Input, NearestWord.Find(Input, paths), paths));

@@ -2,6 +2,7 @@ using Auditor.Engine.Findings;
 using Auditor.Engine.Guarded;
 using Auditor.Engine.RuleSets;
 using Auditor.Reports.Model;
+using Auditor.Reports.Remedies;
 using Spectre.Console;
 
 namespace Auditor.Cli.Summaries;
@@ -58,8 +59,9 @@ internal sealed class Summary(IAnsiConsole console)
         var table = Columns("subject", "finding", "margin", "where");
         foreach (var finding in findings)
         {
+            var remedy = result.Remedies?.Of(finding.Key) is { } remedies ? $" Nearest remedy: {RemedyText.Nearest(remedies)}." : "";
             table.AddRow(
-                Markup.Escape(finding.Subject.Key), Markup.Escape($"{finding.Message} [{finding.Rule.Id}]"),
+                Markup.Escape(finding.Subject.Key), Markup.Escape($"{finding.Message} [{finding.Rule.Id}]{remedy}"),
                 Markup.Escape(Margin(finding)), Markup.Escape(Place(finding)));
         }
 

@@ -11,20 +11,21 @@ public static class DocumentLoader
     /// <param name="displayPath">The path to show: relative, with forward slashes.</param>
     /// <param name="problems">Receives whatever is wrong; never throws for a bad file.</param>
     /// <param name="limits">How much the document may ask of the reader; null for the default limits.</param>
+    /// <param name="texts">Texts to take for what files hold, by display path; null for none.</param>
     /// <returns>
     /// The document, or null when the top file could not be read. Where an included file could not be read, its keys are left out
     /// and the mapping is marked as partial.
     /// </returns>
-    public static Document? Load(string fullPath, string displayPath, Problems problems, ReadingLimits? limits = null)
+    public static Document? Load(string fullPath, string displayPath, Problems problems, ReadingLimits? limits = null, IReadOnlyDictionary<string, string>? texts = null)
     {
         var budget = new ReadingBudget(limits ?? ReadingLimits.Default);
         budget.TrySpendFile();
-        if (SourceReader.Read(fullPath, displayPath, problems, budget) is not { } top)
+        if (SourceReader.Read(fullPath, displayPath, problems, budget, texts) is not { } top)
         {
             return null;
         }
 
         var root = YamlReader.Read(top.Text, problems, budget, 0);
-        return root is null ? null : new IncludeResolver(fullPath, displayPath, top, problems, budget).Resolve(root);
+        return root is null ? null : new IncludeResolver(fullPath, displayPath, top, problems, budget, texts).Resolve(root);
     }
 }

@@ -7,14 +7,16 @@ internal sealed class IncludeResolver
 
     private readonly Problems _problems;
     private readonly ReadingBudget _budget;
+    private readonly IReadOnlyDictionary<string, string>? _texts;
     private readonly IncludeFolder _folder;
     private readonly Dictionary<string, SourceFile> _files = new(StringComparer.Ordinal);
     private readonly List<Inclusion> _way = [];
 
-    public IncludeResolver(string fullPath, string displayPath, SourceFile top, Problems problems, ReadingBudget budget)
+    public IncludeResolver(string fullPath, string displayPath, SourceFile top, Problems problems, ReadingBudget budget, IReadOnlyDictionary<string, string>? texts)
     {
         _problems = problems;
         _budget = budget;
+        _texts = texts;
         _folder = new IncludeFolder(fullPath, displayPath);
         _files.Add(_folder.TopFile, top);
         _way.Add(new Inclusion(_folder.TopFile, top.Text.WholeSpan() with { End = 0 }));
@@ -141,7 +143,7 @@ internal sealed class IncludeResolver
                 return null;
             }
         }
-        else if (SourceReader.Read(file, _folder.DisplayPathOf(file), _problems, _budget) is { } read)
+        else if (SourceReader.Read(file, _folder.DisplayPathOf(file), _problems, _budget, _texts) is { } read)
         {
             _files.Add(file, known = read);
         }

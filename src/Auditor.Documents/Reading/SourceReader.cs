@@ -17,7 +17,19 @@ public static class SourceReader
     public static SourceText? Read(string fullPath, string displayPath, Problems problems, ReadingLimits? limits = null)
         => Read(fullPath, displayPath, problems, new ReadingBudget(limits ?? ReadingLimits.Default))?.Text;
 
-    internal static SourceFile? Read(string fullPath, string displayPath, Problems problems, ReadingBudget budget)
+    internal static SourceFile? Read(
+        string fullPath, string displayPath, Problems problems, ReadingBudget budget, IReadOnlyDictionary<string, string>? texts = null)
+    {
+        if (texts?.GetValueOrDefault(displayPath) is { } text)
+        {
+            var bytes = Encoding.UTF8.GetBytes(text);
+            return new SourceFile(new SourceText(displayPath, text), bytes.Length, Convert.ToHexStringLower(SHA256.HashData(bytes)));
+        }
+
+        return ReadFile(fullPath, displayPath, problems, budget);
+    }
+
+    private static SourceFile? ReadFile(string fullPath, string displayPath, Problems problems, ReadingBudget budget)
     {
         var nowhere = new SourceText(displayPath, "").WholeSpan();
         try

@@ -1,83 +1,106 @@
 using Auditor.Engine.Findings;
+using Auditor.Engine.Installation;
+using Auditor.Engine.RuleSets;
 using Auditor.Engine.Variation;
 using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Values;
 
 namespace Auditor.Engine.Adjustments;
 
-/// <summary>A design in which one adjustment is made. One thread at a time may use it.</summary>
+/// <summary>A design in which one or more adjustments are made. One thread at a time may use it.</summary>
 public sealed class AdjustedDesign
 {
     private readonly Variant _variant;
-    private readonly int _inputsOfHolder;
+    private readonly int[] _first;
+    private IReadOnlyList<RuleAt>? _rules;
 
     /// <summary>Makes a design that as yet differs in nothing.</summary>
-    public AdjustedDesign(DependencyMap map, Adjustable adjustable)
+    /// <param name="map">The map of the design.</param>
+    /// <param name="places">What is adjusted. Where two of them change the same input, the later one counts.</param>
+    public AdjustedDesign(DependencyMap map, params IReadOnlyList<Adjustable> places)
     {
-        Adjustable = adjustable;
-        _variant = new Variant(map, adjustable.Inputs);
-        _inputsOfHolder = adjustable.Inputs.Count / adjustable.Holders.Count;
-        Rules = adjustable.Inputs.Count == 1
-            ? map.ReachOf(adjustable.Inputs[0]).Rules
-            : [.. adjustable.Inputs.SelectMany(input => map.ReachOf(input).Rules).Distinct()
-                .OrderBy(at => at.Subject.Index).ThenBy(at => at.Rule.Id, StringComparer.Ordinal)];
+        Map = map;
+        Places = places;
+        _variant = new Variant(map, [.. places.SelectMany(place => place.Inputs)]);
+        _first = [.. places.Select((_, i) => places.Take(i).Sum(place => place.Inputs.Count))];
     }
+
+    /// <summary>The map of the design as it is.</summary>
+    public DependencyMap Map { get; }
 
     /// <summary>What is adjusted.</summary>
-    public Adjustable Adjustable { get; }
+    public IReadOnlyList<Adjustable> Places { get; }
 
     /// <summary>The rules that may come out otherwise, in the order of findings.</summary>
-    public IReadOnlyList<RuleAt> Rules { get; }
+    public IReadOnlyList<RuleAt> Rules => _rules ??= _variant.Inputs.Count == 1
+        ? Map.ReachOf(_variant.Inputs[0]).Rules
+        : [.. _variant.Inputs.SelectMany(input => Map.ReachOf(input).Rules).Distinct()
+            .OrderBy(at => at.Subject.Index).ThenBy(at => at.Rule.Id, StringComparer.Ordinal)];
 
-    /// <summary>Makes the adjustment; with the stated value the design is as it was.</summary>
-    public void Set(in Value value)
+    /// <summary>Makes the adjustments, in the order of the places; with its stated value a place is as it was.</summary>
+    public void Set(params ReadOnlySpan<Value> values)
     {
-        var isStated = Adjustable.Same(value, Adjustable.Stated);
-        for (var holder = 0; holder < Adjustable.Holders.Count; holder++)
+        for (var input = 0; input < _variant.Inputs.Count; input++)
         {
-            var first = holder * _inputsOfHolder;
-            for (var i = 0; i < _inputsOfHolder; i++)
-            {
-                _variant.Reset(first + i);
-            }
+            _variant.Reset(input);
+        }
 
-            if (!isStated)
+        for (var place = 0; place < values.Length; place++)
+        {
+            if (!Adjustable.Same(values[place], Places[place].Stated))
             {
-                _variant.Set(first, value);
-                Follow(first, _variant.Of(Adjustable.Holders[holder]));
+                Set(place, values[place]);
             }
         }
     }
 
-    /// <summary>The steps of a ladder that there are, the stated one always among them; null where every value between two bounds may be taken.</summary>
-    public IReadOnlyList<Value>? Steps()
+    /// <summary>The steps of a place's ladder that there are, the stated one always among them; null where every value between two bounds may be taken.</summary>
+    public IReadOnlyList<Value>? Steps(int place = 0)
     {
-        var exists = Adjustable.Adjustment.Exists;
-        if (Adjustable.Steps() is not { } steps || exists is null)
+        var (adjustable, exists) = (Places[place], Places[place].Adjustment.Exists);
+        if (adjustable.Steps() is not { } steps || exists is null)
         {
-            return Adjustable.Steps();
+            return adjustable.Steps();
         }
 
-        var stated = Adjustable.Stated;
+        var stated = adjustable.Stated;
         var there = steps.Where(step =>
         {
-            Set(step);
-            return Adjustable.Same(step, stated) || Adjustable.Holders.All(holder => exists.Evaluate(_variant.Of(holder).Scope).IsTrue);
+            Set();
+            Set(place, step);
+            return Adjustable.Same(step, stated) || adjustable.Holders.All(holder => exists.Evaluate(_variant.Of(holder).Scope).IsTrue);
         }).ToArray();
-        Set(stated);
+        Set();
         return there;
     }
 
     /// <summary>Judges a rule.</summary>
     public Judgement Judge(RuleAt at) => _variant.Judge(at);
 
-    /// <summary>A quantity of a subject with the adjustment made.</summary>
-    internal Value Quantity(RuleSets.QuantityDefinition quantity, Installation.DesignSubject subject) => _variant.Of(subject).Quantity(quantity.Slot.Index);
+    /// <summary>The inputs that differ from the design, subject by subject.</summary>
+    public IReadOnlyList<ChangedInput> Changes() =>
+        [.. _variant.Inputs.Distinct()
+            .Select(input => new ChangedInput(input, _variant.Of(input.Subject).Input(input.Slot.Index)))
+            .Where(changed => !changed.After.IsMissing && !Adjustable.Same(changed.After, changed.Input.Stated))];
 
-    private void Follow(int first, ISubject holder)
+    /// <summary>A quantity of a subject with the adjustments made.</summary>
+    internal Value Quantity(QuantityDefinition quantity, DesignSubject subject) => _variant.Of(subject).Quantity(quantity.Slot.Index);
+
+    private void Set(int place, in Value value)
     {
-        var also = Adjustable.Adjustment.Also;
-        var values = also.Select(each => each.Formula.Evaluate(holder.Scope)).ToArray();
+        var holders = Places[place].Holders;
+        var inputsOfHolder = Places[place].Inputs.Count / holders.Count;
+        for (var holder = 0; holder < holders.Count; holder++)
+        {
+            var first = _first[place] + (holder * inputsOfHolder);
+            _variant.Set(first, value);
+            Follow(Places[place].Adjustment, first, _variant.Of(holders[holder]));
+        }
+    }
+
+    private void Follow(Adjustment adjustment, int first, ISubject holder)
+    {
+        var values = adjustment.Also.Select(each => each.Formula.Evaluate(holder.Scope)).ToArray();
         for (var i = 0; i < values.Length; i++)
         {
             if (!values[i].IsMissing)

@@ -40,6 +40,12 @@ public sealed record Adjustment
     /// <summary>What a reading should show if the work is as designed; null where nothing is said.</summary>
     public required Formula? Expect { get; init; }
 
+    /// <summary>Whether it is worth telling how far it may go.</summary>
+    public required bool HasLimits { get; init; }
+
+    /// <summary>How it may serve as a remedy; null where it may not.</summary>
+    public required RemedyTerms? Remedy { get; init; }
+
     /// <summary>Its file.</summary>
     public required MappingNode Node { get; init; }
 

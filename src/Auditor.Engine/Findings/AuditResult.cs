@@ -1,6 +1,7 @@
 using Auditor.Engine.Departures;
 using Auditor.Engine.Guarded;
 using Auditor.Engine.Installation;
+using Auditor.Engine.Remedies;
 using Auditor.Engine.RuleSets;
 
 namespace Auditor.Engine.Findings;
@@ -19,6 +20,9 @@ public sealed record AuditResult(
 {
     /// <summary>How values were held against limits.</summary>
     public Decision Decision { get; init; }
+
+    /// <summary>What would put findings right; null where nobody asked.</summary>
+    public RemedyResult? Remedies { get; init; }
 
     /// <summary>How many findings have a verdict.</summary>
     public int Count(Verdict verdict) => Findings.Count(finding => finding.Verdict == verdict);

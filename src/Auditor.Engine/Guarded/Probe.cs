@@ -1,3 +1,4 @@
+using Auditor.Engine.Adjustments;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Variation;
 
@@ -9,11 +10,20 @@ internal sealed class Probe
     private readonly Variant _variant;
     private readonly double[] _point;
 
-    public Probe(DependencyMap map, IReadOnlyList<TolerancedInput> inputs)
+    /// <summary>Makes a probe at the stated values.</summary>
+    /// <param name="map">The map of the design.</param>
+    /// <param name="inputs">The toleranced inputs, with the values that they have after the changes.</param>
+    /// <param name="changes">What is otherwise than in the design; empty for nothing.</param>
+    public Probe(DependencyMap map, IReadOnlyList<TolerancedInput> inputs, IReadOnlyList<ChangedInput> changes)
     {
         Inputs = inputs;
-        _variant = new Variant(map, [.. inputs.Select(input => input.Input)]);
+        var moved = inputs.Select(input => input.Input).ToArray();
+        _variant = new Variant(map, [.. moved, .. changes.Select(change => change.Input).Except(moved)]);
         _point = [.. inputs.Select(input => input.Stated)];
+        foreach (var change in changes)
+        {
+            _variant.Set(_variant.Inputs.ToList().IndexOf(change.Input), change.After);
+        }
     }
 
     public IReadOnlyList<TolerancedInput> Inputs { get; }

@@ -24,7 +24,7 @@ public static class Sampler
     {
         var kept = new int[rules.Count];
         var blocks = (samples + Block - 1) / Block;
-        Parallel.For(0, blocks, () => (Probe: new Probe(map, inputs), Kept: new int[rules.Count]), (block, _, own) =>
+        Parallel.For(0, blocks, () => (Probe: new Probe(map, inputs, []), Kept: new int[rules.Count]), (block, _, own) =>
         {
             Draw(own.Probe, rules, Math.Min(Block, samples - (block * Block)), new Xoshiro256StarStar(seed + block), own.Kept);
             return own;

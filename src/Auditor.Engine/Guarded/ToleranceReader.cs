@@ -1,3 +1,4 @@
+using Auditor.Engine.Adjustments;
 using Auditor.Engine.Installation;
 using Auditor.Engine.Variation;
 using Auditor.Formulas.Subjects;
@@ -31,6 +32,38 @@ public static class ToleranceReader
         return found;
     }
 
+    /// <summary>The toleranced inputs with the values and tolerances that they have in a design with changes; a changed value keeps its tolerance.</summary>
+    /// <param name="inputs">The toleranced inputs of the design as it is.</param>
+    /// <param name="changed">The design with the changes made.</param>
+    /// <param name="changes">The changes.</param>
+    internal static IReadOnlyList<TolerancedInput> After(IReadOnlyList<TolerancedInput> inputs, AdjustedDesign changed, IReadOnlyList<ChangedInput> changes)
+    {
+        var values = changes.ToDictionary(change => change.Input, change => change.After);
+        return [.. inputs.Select(input => After(input, changed, values)).OfType<TolerancedInput>()];
+    }
+
+    private static TolerancedInput? After(TolerancedInput input, AdjustedDesign changed, Dictionary<SubjectInput, Value> values)
+    {
+        var (subject, slot) = input.Input;
+        var design = changed.Map.Design;
+        if (input.Kind == ToleranceKind.Instrument)
+        {
+            var size = changed.Quantity(design.Evaluator.Rules.UncertaintyOf(subject.Shape, slot)!, subject);
+            return Make(design, input.Input, input.Stated, Size(size), Size(size), input.Kind, size.Marks);
+        }
+
+        if (!values.TryGetValue(input.Input, out var value)
+            || !QuantityText.TryParse(subject.Source(slot)!.Text, out var stated, out _) || stated.Tolerance is not { } tolerance)
+        {
+            return input;
+        }
+
+        var scale = tolerance.IsRelative ? Math.Abs(value.Number / input.Stated) : 1;
+        return Make(design, input.Input, value.Number, scale * tolerance.Below, scale * tolerance.Above, input.Kind, input.Marks);
+    }
+
+    private static double Size(in Value uncertainty) => uncertainty.IsMissing ? 0 : Math.Abs(uncertainty.Number);
+
     private static TolerancedInput? Read(Design design, DesignSubject subject, InputSlot slot)
     {
         if (subject.Input(slot.Index).IsMissing || subject.Source(slot) is not { } scalar || !QuantityText.TryParse(scalar.Text, out var stated, out _))
@@ -39,7 +72,7 @@ public static class ToleranceReader
         }
 
         return stated.Tolerance is { } tolerance
-            ? Make(design, subject, slot, tolerance.Below, tolerance.Above, ToleranceKind.Stated, Marks.None)
+            ? Make(design, new SubjectInput(subject, slot), subject.Input(slot.Index).Number, tolerance.Below, tolerance.Above, ToleranceKind.Stated, Marks.None)
             : OfInstrument(design, subject, slot, stated.Standing);
     }
 
@@ -52,16 +85,15 @@ public static class ToleranceReader
         }
 
         var uncertainty = subject.Quantity(quantity.Slot.Index);
-        var size = uncertainty.IsMissing ? 0 : Math.Abs(uncertainty.Number);
-        return Make(design, subject, slot, size, size, ToleranceKind.Instrument, uncertainty.Marks);
+        var input = new SubjectInput(subject, slot);
+        return Make(design, input, input.Stated.Number, Size(uncertainty), Size(uncertainty), ToleranceKind.Instrument, uncertainty.Marks);
     }
 
     private static TolerancedInput? Make(
-        Design design, DesignSubject subject, InputSlot slot, double below, double above, ToleranceKind kind, Marks marks)
+        Design design, SubjectInput input, double stated, double below, double above, ToleranceKind kind, Marks marks)
     {
-        var stated = subject.Input(slot.Index).Number;
-        var bounds = design.Evaluator.Rules.Schema.BoundsOf(subject.Shape, slot);
+        var bounds = design.Evaluator.Rules.Schema.BoundsOf(input.Subject.Shape, input.Slot);
         var (low, high) = (Math.Min(stated, bounds.Clamp(stated - below)), Math.Max(stated, bounds.Clamp(stated + above)));
-        return low < high ? new TolerancedInput(new SubjectInput(subject, slot), stated, low, high, kind, marks) : null;
+        return low < high ? new TolerancedInput(input, stated, low, high, kind, marks) : null;
     }
 }

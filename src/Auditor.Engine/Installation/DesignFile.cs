@@ -12,9 +12,10 @@ public sealed record DesignFile(string Path, MappingNode Root, IReadOnlyList<Inp
     /// <param name="fullPath">Path to read.</param>
     /// <param name="displayPath">Path to show in problems and reports.</param>
     /// <param name="problems">Receives what is wrong.</param>
-    public static DesignFile? Read(string fullPath, string displayPath, Problems problems)
+    /// <param name="texts">Texts to take for what files hold, by display path; null for none.</param>
+    public static DesignFile? Read(string fullPath, string displayPath, Problems problems, IReadOnlyDictionary<string, string>? texts = null)
     {
-        if (DocumentLoader.Load(fullPath, displayPath, problems) is not { } document)
+        if (DocumentLoader.Load(fullPath, displayPath, problems, texts: texts) is not { } document)
         {
             return null;
         }

@@ -8,7 +8,7 @@ namespace Auditor.Engine.Limits;
 /// <summary>
 /// Finds how far adjustable inputs may go before each rule bites. Values are tried over the whole range of an input; where a rule ceases
 /// to be kept between two of them, the place is found and verified. Where the margin has a peak or a dip between tried values, it is followed
-/// to its end; a jump that comes and goes within a step between them can be missed.
+/// to its end; a jump that comes and goes within a few steps between them can be missed.
 /// </summary>
 public static class LimitSearch
 {

@@ -6,20 +6,48 @@ namespace Auditor.Engine.Limits;
 /// <summary>Finds how each rule that an input has a part in bounds it.</summary>
 internal static class RuleLimits
 {
+    /// <summary>Every so many places of the grid are tried first.</summary>
+    private const int Coarse = 3;
+
     /// <summary>The limits of the rules that apply at some value.</summary>
     public static IReadOnlyList<RuleLimit> Of(Trial trial)
     {
         var scores = trial.Rules.Select(_ => new Score[trial.Grid.Count]).ToArray();
-        for (var place = 0; place < trial.Grid.Count; place++)
+        var (first, others) = Places(trial);
+        Fill(trial, scores, first, [.. Enumerable.Range(0, scores.Length)]);
+        var moving = Enumerable.Range(0, scores.Length).Where(rule => first.Exists(place => !Same(scores[rule][place], scores[rule][first[0]]))).ToArray();
+        Fill(trial, scores, others, moving);
+        foreach (var rule in Enumerable.Range(0, scores.Length).Except(moving))
         {
-            for (var rule = 0; rule < scores.Length; rule++)
-            {
-                scores[rule][place] = trial.ScoreAt(trial.Rules[rule], trial.Grid[place]);
-            }
+            others.ForEach(place => scores[rule][place] = scores[rule][first[0]]);
         }
 
         return [.. trial.Rules.Select((at, rule) => Of(trial, at, scores[rule])).OfType<RuleLimit>()];
     }
+
+    /// <summary>
+    /// The places to try first, both ends and what the design states among them, and the others. A rule that comes out the same to the last
+    /// bit at all of the first is one that the input reaches on paper only.
+    /// </summary>
+    private static (List<int> First, List<int> Others) Places(Trial trial)
+    {
+        var places = Enumerable.Range(0, trial.Grid.Count)
+            .ToLookup(place => trial.HasSteps || place % Coarse == 0 || place == trial.Grid.Count - 1 || trial.Grid[place] == trial.Stated);
+        return ([.. places[true]], [.. places[false]]);
+    }
+
+    private static void Fill(Trial trial, Score[][] scores, List<int> places, int[] rules)
+    {
+        foreach (var place in places)
+        {
+            foreach (var rule in rules)
+            {
+                scores[rule][place] = trial.ScoreAt(trial.Rules[rule], trial.Grid[place]);
+            }
+        }
+    }
+
+    private static bool Same(Score one, Score other) => one.Standing == other.Standing && one.Margin.Equals(other.Margin);
 
     private static RuleLimit? Of(Trial trial, RuleAt at, Score[] scores)
     {

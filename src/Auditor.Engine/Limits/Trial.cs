@@ -66,7 +66,7 @@ internal sealed class Trial
     private double? UncertaintyAt(double position)
     {
         MoveTo(position);
-        var value = _design.Quantity(_uncertainty!, _design.Adjustable.Holders[0]);
+        var value = _design.Quantity(_uncertainty!, _design.Places[0].Holders[0]);
         return value.IsMissing ? null : Math.Abs(value.Number);
     }
 

@@ -28,6 +28,12 @@ internal sealed class AdjustmentReader(Shapes shapes, FormulaWorld world, Proble
 
         var expect = Formula(node, "expect", shape, slot.Type);
         var exists = Formula(node, "exists", shape, FormulaType.Flag);
+        var remedy = node.Mapping("remedy") is { } terms ? new RemedyTermsReader(_ladders).Read(terms, slot) : null;
+        if (remedy is null && node.Find("remedy") is not null)
+        {
+            return null;
+        }
+
         if (Also(node, shape) is not { } also || (expect is null && node.Find("expect") is not null) || (exists is null && node.Find("exists") is not null))
         {
             return null;
@@ -46,6 +52,8 @@ internal sealed class AdjustmentReader(Shapes shapes, FormulaWorld world, Proble
             IsReading = node.Scalar("reading") is { Flag: true },
             IsForSite = node.Scalar("on-site") is { Flag: true },
             Expect = expect,
+            HasLimits = node.Scalar("limits") is not { Flag: false },
+            Remedy = remedy,
             Node = node,
         };
     }

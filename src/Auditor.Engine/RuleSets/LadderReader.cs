@@ -66,7 +66,8 @@ internal sealed class LadderReader(FormulaWorld world, Problems problems)
         return Array.Exists(steps, step => step is null) ? null : new StepLadder([.. steps.Select(step => step!.Value)]);
     }
 
-    private Value? Step(ScalarNode node, InputSlot slot)
+    /// <summary>One value of an input, or null with a problem added.</summary>
+    public Value? Step(ScalarNode node, InputSlot slot)
     {
         var (type, _, value) = ParameterReader.Literal(node);
         if (!type.Equals(slot.Type))

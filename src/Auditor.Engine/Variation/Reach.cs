@@ -19,6 +19,23 @@ public sealed class Reach
     /// <summary>The rules that may come out otherwise when the input changes: subjects in the order of the design, then rules by id.</summary>
     public IReadOnlyList<RuleAt> Rules { get; }
 
+    /// <summary>Whether a rule may come out otherwise when the input changes.</summary>
+    public bool Holds(RuleAt at)
+    {
+        var (low, high) = (0, Rules.Count);
+        while (low < high)
+        {
+            var middle = (low + high) / 2;
+            (low, high) = Order(Rules[middle], at) < 0 ? (middle + 1, high) : (low, middle);
+        }
+
+        return low < Rules.Count && Rules[low] == at;
+    }
+
+    /// <summary>The order of rules at subjects: subjects in the order of the design, then rules by id.</summary>
+    internal static int Order(RuleAt one, RuleAt other) =>
+        one.Subject.Index != other.Subject.Index ? one.Subject.Index - other.Subject.Index : string.CompareOrdinal(one.Rule.Id, other.Rule.Id);
+
     /// <summary>The input, and the groups that it lies in where the design gives nothing of them.</summary>
     internal IReadOnlyList<SubjectInput> Inputs { get; }
 

@@ -24,7 +24,7 @@ internal sealed class ReachSearch(SlotReaders readers, BackLinks links)
         }
 
         var rules = _rules.ToArray();
-        Array.Sort(rules, (a, b) => a.Subject.Index != b.Subject.Index ? a.Subject.Index - b.Subject.Index : string.CompareOrdinal(a.Rule.Id, b.Rule.Id));
+        Array.Sort(rules, Reach.Order);
         return new Reach(inputs, _quantities, rules);
     }
 

@@ -1,9 +1,11 @@
 using Auditor.Engine.Evidence;
 using Auditor.Engine.Findings;
+using Auditor.Engine.Remedies;
 using Auditor.Engine.RuleSets;
 using Auditor.Formulas.Values;
 using Auditor.Quantities;
 using Auditor.Reports.Reading;
+using Auditor.Reports.Remedies;
 
 namespace Auditor.Reports.Json;
 
@@ -32,8 +34,22 @@ internal static class FindingJson
                 output.Null("departure");
             }
 
+            Remedy(output, result.Remedies?.Of(finding.Key));
             output.Location(finding.Location);
         }));
+    }
+
+    /// <summary>Only a run that sought remedies says anything of them.</summary>
+    private static void Remedy(JsonOutput output, FindingRemedies? each)
+    {
+        if (each is { Remedies: [var nearest, ..] })
+        {
+            output.Object("remedy", () => RemediesJson.Remedy(output, nearest));
+        }
+        else if (each is not null)
+        {
+            output.Null("remedy");
+        }
     }
 
     public static void Clause(JsonOutput output, Clause clause) => output.Object("clause", () =>

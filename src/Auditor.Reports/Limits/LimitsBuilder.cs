@@ -14,14 +14,12 @@ internal sealed class LimitsBuilder(LimitResult result)
         var design = result.Design;
         var said = ProjectWords.Of(design);
         var places = new Places(design.File);
-        var title = design.Evaluator.Rules.Title;
         var rows = result.Inputs.Select(limit => (limit.Input, Row: Row(limit))).ToArray();
         return new LimitsModel
         {
             Project = new ReportProject(said("title") ?? "", said("reference") ?? "", said("revision") ?? "", said("designer") ?? "", said("checker") ?? ""),
             Design = places.Design,
-            RuleSet = new ReportRuleSet(
-                title.Id, title.Text, title.Edition, title.Notice, title.Chain, title.Sha256, design.Evaluator.Rules.Rules.Count, Loosened.Text(design.Evaluator.Rules)),
+            RuleSet = ReportRuleSet.Of(design.Evaluator.Rules),
             Inputs = places.Inputs,
             TestTemperature = design.Installation.Shape.Input(TestTemperature) is { } slot ? LimitText.Value(design.Installation.Input(slot.Index), slot) : "",
             Groups = [.. rows.GroupBy(pair => pair.Input.Subject)

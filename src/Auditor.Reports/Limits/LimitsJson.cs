@@ -1,4 +1,3 @@
-using Auditor.Engine.Installation;
 using Auditor.Engine.Limits;
 using Auditor.Reports.Json;
 using Auditor.Reports.Reading;
@@ -22,34 +21,13 @@ public static class LimitsJson
             output.Object(null, () =>
             {
                 output.Whole("format", Format);
-                Head(output, result.Design);
+                FileHead.Write(output, result.Design);
                 output.Array("limits", result.Inputs, limit => output.Object(null, () => Limit(output, limit)));
             });
         }
 
         stream.WriteByte((byte)'\n');
         return stream.ToArray();
-    }
-
-    private static void Head(JsonOutput output, Design design)
-    {
-        output.Object("tool", () =>
-        {
-            output.Text("name", "auditor");
-            output.Text("version", typeof(LimitsJson).Assembly.GetName().Version!.ToString(3));
-        });
-        output.Array("inputs", output.Places.Inputs, file => output.Object(null, () =>
-        {
-            output.Text("path", file.Path);
-            output.Text("sha256", file.Sha256);
-        }));
-        output.Object("ruleSet", () =>
-        {
-            var title = design.Evaluator.Rules.Title;
-            output.Text("name", title.Id);
-            output.TextOrNull("edition", title.Edition);
-            output.Text("sha256", title.Sha256);
-        });
     }
 
     private static void Limit(JsonOutput output, InputLimit limit)

@@ -3,6 +3,7 @@ using Auditor.Engine.Evidence;
 using Auditor.Engine.Findings;
 using Auditor.Engine.RuleSets;
 using Auditor.Reports.Reading;
+using Auditor.Reports.Remedies;
 
 namespace Auditor.Reports.Model;
 
@@ -43,6 +44,7 @@ internal sealed class FindingReader(
             Sentence = finding.Message,
             Why = rule.Why,
             PutRightBy = rule.PutRightBy,
+            Remedy = result.Remedies?.Of(finding.Key) is { } remedies ? RemedyText.Nearest(remedies) : "",
             Location = places.Text(finding.Location),
             RestsOn = [.. supports.Of(finding).Select(Shown)],
             Formulas = _formulas.Of(finding),

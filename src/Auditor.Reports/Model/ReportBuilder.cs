@@ -42,7 +42,7 @@ internal sealed class ReportBuilder
         {
             Project = Project(),
             Basis = Basis(),
-            RuleSet = RuleSet(),
+            RuleSet = ReportRuleSet.Of(_result.Rules),
             Inputs = _places.Inputs,
             Counts = [.. VerdictOrder.GravestFirst.Where(verdict => verdict != Verdict.Unproven || _result.Decision == Decision.Guarded).Select(Count)],
             Action = [.. findings.Where(pair => pair.Verdict == Verdict.Nonconforming && pair.Shown.IsRequirement).Select(pair => pair.Shown)],
@@ -74,12 +74,6 @@ internal sealed class ReportBuilder
     private ReportBasis Basis() => new(
         _places.Design, AuditBasis.StageOf(_result.Design) ?? "not stated", AuditBasis.Sentence(_result.Decision),
         _result.AsOf is { } day ? DayText.Of(day) : "");
-
-    private ReportRuleSet RuleSet()
-    {
-        var title = _result.Rules.Title;
-        return new ReportRuleSet(title.Id, title.Text, title.Edition, title.Notice, title.Chain, title.Sha256, _result.Rules.Rules.Count, Loosened.Text(_result.Rules));
-    }
 
     private VerdictCount Count(Verdict verdict)
     {

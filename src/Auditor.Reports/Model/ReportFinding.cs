@@ -21,7 +21,7 @@ public sealed record ReportFinding
     /// <summary>The verdict, with the assumption that it hangs on.</summary>
     public required string Verdict { get; init; }
 
-    /// <summary>The verdict in one word: nonconforming, undetermined, departed or conforms.</summary>
+    /// <summary>The verdict in one word: nonconforming, unproven, undetermined, departed or conforms.</summary>
     public required string VerdictWord { get; init; }
 
     /// <summary>Id of the finding within the report.</summary>
@@ -77,6 +77,9 @@ public sealed record ReportFinding
 
     /// <summary>Inputs that can put it right, as the design file names them.</summary>
     public required IReadOnlyList<string> PutRightBy { get; init; }
+
+    /// <summary>The nearest proven remedy, or that there is none; empty where nobody asked.</summary>
+    public required string Remedy { get; init; }
 
     /// <summary>Where to look in the design, as path:line:column.</summary>
     public required string Location { get; init; }

@@ -1,3 +1,5 @@
+using Auditor.Engine.RuleSets;
+
 namespace Auditor.Reports.Model;
 
 /// <summary>The rule set in force.</summary>
@@ -10,4 +12,11 @@ namespace Auditor.Reports.Model;
 /// <param name="Rules">How many rules it has.</param>
 /// <param name="Loosened">What house rules loosen, drop or replace; empty for nothing. Every report shows it.</param>
 public sealed record ReportRuleSet(
-    string Id, string Title, string Edition, string Notice, IReadOnlyList<string> Chain, string Sha256, int Rules, string Loosened);
+    string Id, string Title, string Edition, string Notice, IReadOnlyList<string> Chain, string Sha256, int Rules, string Loosened)
+{
+    internal static ReportRuleSet Of(RuleSet rules)
+    {
+        var title = rules.Title;
+        return new ReportRuleSet(title.Id, title.Text, title.Edition, title.Notice, title.Chain, title.Sha256, rules.Rules.Count, Model.Loosened.Text(rules));
+    }
+}

@@ -15,6 +15,9 @@ public sealed record TemplateFile(string FullPath, string DisplayPath)
     /// <summary>The shipped template of the report on limits, in Markdown.</summary>
     public static TemplateFile ShippedLimits { get; } = ShippedAs("limits.scriban-md");
 
+    /// <summary>The shipped template of the report on remedies, in Markdown.</summary>
+    public static TemplateFile ShippedRemedies { get; } = ShippedAs("remedies.scriban-md");
+
     /// <summary>The template at a path that the caller gives.</summary>
     public static TemplateFile At(string path) => new(Path.GetFullPath(path), path.Replace('\\', '/'));
 

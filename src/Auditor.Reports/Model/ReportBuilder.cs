@@ -4,6 +4,7 @@ using Auditor.Engine.Guarded;
 using Auditor.Engine.Registers;
 using Auditor.Engine.RuleSets;
 using Auditor.Formulas.Tables;
+using Auditor.Reports.Pictures;
 using Auditor.Reports.Reading;
 using Auditor.Reports.Schedules;
 
@@ -50,6 +51,7 @@ internal sealed class ReportBuilder
                 .Select(verdict => new FindingGroup(verdict.Word(), [.. findings.Where(pair => pair.Verdict == verdict).Select(pair => pair.Shown)]))
                 .Where(group => group.Findings.Count > 0)],
             MakeRules = new(() => RuleGrouping.Of(findings.Select(pair => (pair.Finding, pair.Shown)))),
+            MakePictures = new(() => [.. PictureBuilder.Of(_result).Select(ReportPicture.Of)]),
             MakeWorkings = new(() => Invariantly.Make(workings.Value.All)),
             ClauseTypes = [.. findings.Select(pair => pair.Shown.ClauseType).Distinct().Order(StringComparer.Ordinal)],
             Boards = [.. _result.Design.Subjects.Where(subject => subject.Shape.Name == "board")

@@ -7,7 +7,14 @@
   const status = form.querySelector('[role=status]');
   const none = document.querySelector('.none');
   const MOST_UNFOLDED = 400;
+  const boards = [...form.elements.board.options].map(option => option.value).slice(2).sort((a, b) => b.length - a.length);
   let known;
+
+  // An id is made of rule and subject; a subject begins with its board.
+  function boardOf(id) {
+    const subject = id.slice(id.indexOf('__') + 2);
+    return boards.find(board => subject === board || subject.startsWith(board + '_-')) ?? '';
+  }
 
   // Read when first asked for, so that opening a large page costs nothing.
   const index = () => known ??= [...document.querySelectorAll('.rule')].map(rule => ({
@@ -18,7 +25,7 @@
     findings: [...rule.querySelectorAll('.f')].map(finding => ({
       finding,
       verdict: /is-(\w+)/.exec(finding.className)[1],
-      board: finding.dataset.board,
+      board: boardOf(finding.id),
     })),
   }));
 

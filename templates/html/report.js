@@ -2,22 +2,32 @@
 (() => {
   'use strict';
   const form = document.querySelector('.filter');
-  const rules = [...document.querySelectorAll('.rule')].map(rule => ({
-    rule,
-    clause: rule.dataset.clause,
-    head: rule.querySelector('summary').textContent + ' ' + rule.querySelector('.about').textContent,
-    wasOpen: rule.open,
-    findings: [...rule.querySelectorAll('.f')].map(finding => ({
-      finding,
-      verdict: /is-(\w+)/.exec(finding.className)[1],
-      board: finding.dataset.board,
-    })),
-  }));
-  const total = rules.reduce((sum, rule) => sum + rule.findings.length, 0);
+  const total = document.querySelectorAll('.f').length;
   const verdicts = [...form.elements.verdict];
   const status = form.querySelector('[role=status]');
   const none = document.querySelector('.none');
   const MOST_UNFOLDED = 400;
+  const boards = [...form.elements.board.options].map(option => option.value).slice(2).sort((a, b) => b.length - a.length);
+  let known;
+
+  // An id is made of rule and subject; a subject begins with its board.
+  function boardOf(id) {
+    const subject = id.slice(id.indexOf('__') + 2);
+    return boards.find(board => subject === board || subject.startsWith(board + '_-')) ?? '';
+  }
+
+  // Read when first asked for, so that opening a large page costs nothing.
+  const index = () => known ??= [...document.querySelectorAll('.rule')].map(rule => ({
+    rule,
+    clause: rule.dataset.clause,
+    head: (rule.querySelector('summary').textContent + ' ' + rule.querySelector('.about').textContent).toLowerCase(),
+    wasOpen: rule.open,
+    findings: [...rule.querySelectorAll('.f')].map(finding => ({
+      finding,
+      verdict: /is-(\w+)/.exec(finding.className)[1],
+      board: boardOf(finding.id),
+    })),
+  }));
 
   const asked = () => ({
     verdicts: new Set(verdicts.filter(box => box.checked).map(box => box.value)),
@@ -28,18 +38,21 @@
 
   const isPlain = ask => ask.verdicts.size === verdicts.length && !ask.clause && ask.board === '*' && !ask.text;
 
-  function matches(ask, rule, { finding, verdict, board }) {
-    return ask.verdicts.has(verdict)
-      && (ask.board === '*' || board === ask.board)
-      && (!ask.text || rule.hit || finding.textContent.toLowerCase().includes(ask.text));
+  const words = entry => entry.words ??= entry.finding.textContent.toLowerCase();
+
+  function matches(ask, rule, entry) {
+    return ask.verdicts.has(entry.verdict)
+      && (ask.board === '*' || entry.board === ask.board)
+      && (!ask.text || rule.hit || words(entry).includes(ask.text));
   }
 
   function apply() {
     const ask = asked();
     const plain = isPlain(ask);
+    const rules = index();
     let shown = 0;
     for (const rule of rules) {
-      rule.hit = ask.text !== '' && rule.head.toLowerCase().includes(ask.text);
+      rule.hit = ask.text !== '' && rule.head.includes(ask.text);
       rule.shown = 0;
       const clause = !ask.clause || rule.clause === ask.clause;
       for (const entry of rule.findings) {
@@ -65,21 +78,21 @@
 
   // The filter in the address, so that it can be passed on; a place on the page keeps its own address.
   function keep(ask, plain) {
-    const words = new URLSearchParams();
-    if (ask.verdicts.size !== verdicts.length) words.set('verdict', [...ask.verdicts].join(','));
-    if (ask.clause) words.set('clause', ask.clause);
-    if (ask.board !== '*') words.set('board', ask.board);
-    if (ask.text) words.set('text', ask.text);
-    if (!plain || location.hash.startsWith('#?')) history.replaceState(null, '', plain ? '#' : '#?' + words);
+    const kept = new URLSearchParams();
+    if (ask.verdicts.size !== verdicts.length) kept.set('verdict', [...ask.verdicts].join(','));
+    if (ask.clause) kept.set('clause', ask.clause);
+    if (ask.board !== '*') kept.set('board', ask.board);
+    if (ask.text) kept.set('text', ask.text);
+    if (!plain || location.hash.startsWith('#?')) history.replaceState(null, '', plain ? '#' : '#?' + kept);
   }
 
   function recall() {
-    const words = new URLSearchParams(location.hash.slice(2));
-    const chosen = words.get('verdict')?.split(',');
+    const kept = new URLSearchParams(location.hash.slice(2));
+    const chosen = kept.get('verdict')?.split(',');
     verdicts.forEach(box => { box.checked = !chosen || chosen.includes(box.value); });
-    form.elements.clause.value = words.get('clause') ?? '';
-    form.elements.board.value = words.get('board') ?? '*';
-    form.elements.text.value = words.get('text') ?? '';
+    form.elements.clause.value = kept.get('clause') ?? '';
+    form.elements.board.value = kept.get('board') ?? '*';
+    form.elements.text.value = kept.get('text') ?? '';
   }
 
   // A link to a finding that the filter hides shows everything again.
@@ -94,6 +107,7 @@
     if (!target) return;
     if (target.closest('.off')) {
       form.reset();
+      apply();
     }
 
     for (let at = target; at; at = at.parentElement) {

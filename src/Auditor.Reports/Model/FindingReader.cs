@@ -2,6 +2,7 @@ using Auditor.Engine.Departures;
 using Auditor.Engine.Evidence;
 using Auditor.Engine.Findings;
 using Auditor.Engine.RuleSets;
+using Auditor.Reports.Pictures;
 using Auditor.Reports.Reading;
 using Auditor.Reports.Remedies;
 
@@ -27,7 +28,7 @@ internal sealed class FindingReader(
             SubjectLabel = SubjectText.Label(finding.Subject),
             Verdict = finding.VerdictText,
             VerdictWord = finding.Verdict.Word(),
-            Anchor = Pictures.Anchor.Of(finding.Key),
+            Anchor = Anchor.Of(finding.Key),
             Board = SubjectText.BoardOf(finding.Subject)?.Key ?? "",
             IsRequirement = rule.Provision == Provision.Requirement,
             ClauseType = rule.Clause.Type,

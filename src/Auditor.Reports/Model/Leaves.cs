@@ -2,7 +2,7 @@ using Auditor.Engine.Evidence;
 
 namespace Auditor.Reports.Model;
 
-/// <summary>What values rest on in the end: lines of the design, cells of tables, curves and parameters.</summary>
+/// <summary>What values rest on in the end and can be looked up: lines of the design, cells of tables, curves and parameters.</summary>
 /// <param name="workings">Derivations of quantities, by subject and symbol.</param>
 internal sealed class Leaves(IReadOnlyDictionary<string, Derivation> workings)
 {
@@ -17,7 +17,7 @@ internal sealed class Leaves(IReadOnlyDictionary<string, Derivation> workings)
     {
         if (source.Kind != EvidenceKind.Quantity)
         {
-            return source.Kind == EvidenceKind.Missing ? [] : [source];
+            return source.Kind == EvidenceKind.Missing || source.Place.Length == 0 ? [] : [source];
         }
 
         if (!_known.TryGetValue(source.Label, out var known))

@@ -4,7 +4,7 @@ using Auditor.Engine.RuleSets;
 namespace Auditor.Reports.Model;
 
 /// <summary>
-/// How much a finding needs to be looked at: requirements not met, recommendations not followed, what cannot be told, departures, and last
+/// How much a finding needs to be looked at: requirements not met, recommendations not followed, what is not proven, what cannot be told, departures, and last
 /// what conforms; within each, the least margin first.
 /// </summary>
 internal static class Need
@@ -12,7 +12,7 @@ internal static class Need
     /// <summary>A margin below this share of the limit is looked at like what needs action.</summary>
     private const double Tight = 0.1;
 
-    private const int UndeterminedGrade = 2;
+    private const int UndeterminedGrade = 3;
 
     /// <summary>Grade, 0 for the gravest, and relative margin, infinite where nothing was measured; less is more urgent.</summary>
     public static (int Grade, double Margin) Of(Finding finding) =>
@@ -28,8 +28,9 @@ internal static class Need
     private static int GradeOf(Finding finding) => finding.Verdict switch
     {
         Verdict.Nonconforming => finding.Rule.Provision == Provision.Requirement ? 0 : 1,
+        Verdict.Unproven => UndeterminedGrade - 1,
         Verdict.Undetermined => UndeterminedGrade,
-        Verdict.Departed => 3,
-        _ => 4,
+        Verdict.Departed => UndeterminedGrade + 1,
+        _ => UndeterminedGrade + 2,
     };
 }

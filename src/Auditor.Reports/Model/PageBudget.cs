@@ -9,8 +9,8 @@ namespace Auditor.Reports.Model;
 internal sealed class PageBudget
 {
     private const int Page = 4_200_000;
-    private const int Least = 1_000_000;
-    private const int OfFinding = 330;
+    private const int LeastForFinding = 30;
+    private const int OfFinding = 290;
     private const int AroundSource = 70;
     private const int AroundWorking = 190;
 
@@ -28,8 +28,8 @@ internal sealed class PageBudget
     /// <summary>How much of it the quantities behind one finding may take.</summary>
     public int ShareOfOne { get; }
 
-    /// <summary>The room beside so many findings.</summary>
-    public static PageBudget For(int findings) => new(Math.Max(Least, Page - (findings * OfFinding)));
+    /// <summary>The room beside so many findings and so many characters of pictures.</summary>
+    public static PageBudget For(int findings, int pictures) => new(Math.Max(findings * LeastForFinding, Page - (findings * OfFinding) - pictures));
 
     /// <summary>Takes the room of a derivation.</summary>
     public void Spend(ReportDerivation derivation) =>

@@ -4,6 +4,7 @@ using Auditor.Engine.Guarded;
 using Auditor.Engine.Registers;
 using Auditor.Engine.RuleSets;
 using Auditor.Formulas.Tables;
+using Auditor.Reports.Pictures;
 using Auditor.Reports.Reading;
 using Auditor.Reports.Schedules;
 
@@ -35,7 +36,9 @@ internal sealed class ReportBuilder
 
     public ReportModel Build()
     {
-        var workings = new Lazy<WorkingsBuilder>(() => Invariantly.Make(() => new WorkingsBuilder(_result, _places)));
+        var pictures = new Lazy<IReadOnlyList<ReportPicture>>(() => [.. PictureBuilder.Of(_result).Select(ReportPicture.Of)]);
+        var workings = new Lazy<WorkingsBuilder>(() =>
+            Invariantly.Make(() => new WorkingsBuilder(_result, _places, pictures.Value.Sum(picture => picture.Svg.Text.Length))));
         var reader = new FindingReader(_result, _places, _supports, _departures, workings);
         var findings = _result.Findings.Select(finding => (Finding: finding, finding.Verdict, Shown: reader.Read(finding))).ToArray();
         return new ReportModel
@@ -50,10 +53,11 @@ internal sealed class ReportBuilder
                 .Select(verdict => new FindingGroup(verdict.Word(), [.. findings.Where(pair => pair.Verdict == verdict).Select(pair => pair.Shown)]))
                 .Where(group => group.Findings.Count > 0)],
             MakeRules = new(() => RuleGrouping.Of(findings.Select(pair => (pair.Finding, pair.Shown)))),
+            MakePictures = pictures,
             MakeWorkings = new(() => Invariantly.Make(workings.Value.All)),
             ClauseTypes = [.. findings.Select(pair => pair.Shown.ClauseType).Distinct().Order(StringComparer.Ordinal)],
             Boards = [.. _result.Design.Subjects.Where(subject => subject.Shape.Name == "board")
-                .Select(board => new ReportBoard(board.Key, SubjectText.Label(board)))],
+                .Select(board => new ReportBoard(board.Key, Anchor.OfSubject(board.Key), SubjectText.Label(board)))],
             Schedule = new ScheduleFiller(_result, _schedule).Fill(),
             Missing = MissingThings.Of(_result),
             Departures = [.. _result.Departures.Select(departure => _departures[departure])],

@@ -45,6 +45,9 @@ public sealed record ReportModel
     /// <summary>How the quantities behind the findings were computed.</summary>
     public ReportWorkings Workings => MakeWorkings.Value;
 
+    /// <summary>The pictures that the rule set plans, for formats that can show them.</summary>
+    public IReadOnlyList<ReportPicture> Pictures => MakePictures.Value;
+
     /// <summary>The schedule of circuits.</summary>
     public required ScheduleTable Schedule { get; init; }
 
@@ -73,6 +76,8 @@ public sealed record ReportModel
     public string Caution { get; } = Model.Caution.Text;
 
     internal Lazy<IReadOnlyList<RuleFindings>> MakeRules { get; init; } = new([]);
+
+    internal Lazy<IReadOnlyList<ReportPicture>> MakePictures { get; init; } = new([]);
 
     internal Lazy<ReportWorkings> MakeWorkings { get; init; } = new(new ReportWorkings([], [], 0, 0));
 

@@ -12,9 +12,13 @@ internal sealed class SourceReader(Places places, IReadOnlyDictionary<string, st
     {
         var isQuantity = source.Kind == EvidenceKind.Quantity;
         return new ReportSource(
-            Word(source.Kind), source.Label, source.Text, places.OfText(source.Place), isQuantity ? "" : source.Remark,
+            Word(source.Kind), Label(source), source.Text, places.OfText(source.Place), isQuantity ? "" : source.Remark,
             isQuantity ? anchors.GetValueOrDefault(source.Label, "") : "");
     }
+
+    /// <summary>The key of the installation is a dash, which says little beside a symbol.</summary>
+    private static string Label(EvidenceSource source) =>
+        source.Label.StartsWith("- ", StringComparison.Ordinal) ? "installation" + source.Label[1..] : source.Label;
 
     private static string Word(EvidenceKind kind) => kind switch
     {

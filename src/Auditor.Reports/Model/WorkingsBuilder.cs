@@ -24,14 +24,18 @@ internal sealed class WorkingsBuilder
     private readonly PageBudget _budget;
     private readonly Places _places;
 
-    public WorkingsBuilder(AuditResult result, Places places)
+    /// <summary>Unfolds the findings of an audit.</summary>
+    /// <param name="result">The audit.</param>
+    /// <param name="places">Names places.</param>
+    /// <param name="pictures">Characters of the pictures on the same page.</param>
+    public WorkingsBuilder(AuditResult result, Places places, int pictures)
     {
         _result = result;
         _places = places;
         _evidence = new EvidenceBuilder(result.Rules);
         _leaves = new Leaves(_told);
         _sources = new SourceReader(places, _anchors);
-        _budget = PageBudget.For(result.Findings.Count);
+        _budget = PageBudget.For(result.Findings.Count, pictures);
         foreach (var finding in result.Findings.OrderBy(Need.OfDerivation).TakeWhile(_ => _budget.IsLeft))
         {
             _derivations.Add(finding, Unfold(finding));

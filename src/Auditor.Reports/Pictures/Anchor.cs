@@ -6,6 +6,10 @@ namespace Auditor.Reports.Pictures;
 /// <summary>The ids by which a page and its pictures name findings.</summary>
 public static class Anchor
 {
+    /// <summary>The part of such an id that names the subject.</summary>
+    /// <param name="subject">Key of the subject.</param>
+    public static string OfSubject(string subject) => Of(":" + subject)["f-__".Length..];
+
     /// <summary>
     /// The id of a finding in a page: <c>f-</c> and its key, with nothing but ASCII letters, digits, hyphens and underscores. The colon after the
     /// rule becomes <c>__</c>, a slash <c>_-</c>, and any other character its code in hexadecimal between underscores, so that no two

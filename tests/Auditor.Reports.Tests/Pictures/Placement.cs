@@ -26,10 +26,21 @@ internal static class Placement
 
     private static readonly Dictionary<string, (double Left, double Top, double Right, double Bottom)> Symbols = new()
     {
-        ["circuit-breaker"] = (-15, -9, 15, 3), ["switch"] = (-15, -9, 15, 5), ["fuse"] = (-15, -5, 15, 5), ["rcd"] = (-4, -8, 4, 8),
-        ["load"] = (0, -4, 18, 4), ["socket-outlet"] = (0, -8, 17, 8), ["luminaire"] = (0, -7, 17, 7), ["motor"] = (0, -8, 18, 8),
-        ["generator"] = (0, -8, 18, 8), ["heater"] = (0, -5, 20, 5), ["nonconforming"] = (-7, -7, 7, 7), ["advised"] = (-6, -6, 6, 6),
-        ["undetermined"] = (-8, -8, 8, 8), ["departed"] = (-7.5, -7, 7.5, 6), ["conforms"] = (-6.5, -6.5, 6.5, 6.5),
+        ["circuit-breaker"] = (-15, -9, 15, 3),
+        ["switch"] = (-15, -9, 15, 5),
+        ["fuse"] = (-15, -5, 15, 5),
+        ["rcd"] = (-4, -8, 4, 8),
+        ["load"] = (0, -4, 18, 4),
+        ["socket-outlet"] = (0, -8, 17, 8),
+        ["luminaire"] = (0, -7, 17, 7),
+        ["motor"] = (0, -8, 18, 8),
+        ["generator"] = (0, -8, 18, 8),
+        ["heater"] = (0, -5, 20, 5),
+        ["nonconforming"] = (-7, -7, 7, 7),
+        ["advised"] = (-6, -6, 6, 6),
+        ["undetermined"] = (-8, -8, 8, 8),
+        ["departed"] = (-7.5, -7, 7.5, 6),
+        ["conforms"] = (-6.5, -6.5, 6.5, 6.5),
     };
 
     /// <summary>The texts of a picture with the boxes that they take; those within definitions stand nowhere.</summary>

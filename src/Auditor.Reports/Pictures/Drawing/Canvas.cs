@@ -115,7 +115,9 @@ internal sealed class Canvas
     public IDisposable Link(string id, string label)
     {
         _root.SetAttributeValue("role", "group");
-        return Open("a", ("href", "#" + id), ("aria-label", label));
+        var link = Open("a", ("href", "#" + id));
+        _open.Peek().Add(new XElement(Svg + "title", Inert(label)));
+        return link;
     }
 
     /// <summary>Opens an element.</summary>

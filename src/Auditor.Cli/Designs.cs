@@ -54,7 +54,7 @@ internal sealed class Designs(string? ruleSet, Problems problems)
         }
 
         var asked = Path.GetFullPath(Path.Combine(folder, named.Text));
-        if (named.Text.Contains('/') && !IsBelow(asked, folder) && !IsBelow(asked, within))
+        if (IsPath(named.Text) && !Enclosure.Holds(folder, asked) && !Enclosure.Holds(within, asked))
         {
             problems.Add(CommandMessages.UnreachableRuleSet(named.Span, named.Text));
             return null;
@@ -65,7 +65,7 @@ internal sealed class Designs(string? ruleSet, Problems problems)
 
     private RuleSet? Load(string name, string folder, SourceSpan? asked)
     {
-        var key = name.Contains('/') || name.EndsWith(".yaml", StringComparison.Ordinal) ? Path.GetFullPath(Path.Combine(folder, name)) : name;
+        var key = IsPath(name) ? Path.GetFullPath(Path.Combine(folder, name)) : name;
         if (!_sets.TryGetValue(key, out var rules))
         {
             rules = RuleSetLoader.Load(Shipped.Rules, name, folder, asked, problems);
@@ -76,5 +76,5 @@ internal sealed class Designs(string? ruleSet, Problems problems)
         return rules;
     }
 
-    private static bool IsBelow(string path, string folder) => path.StartsWith(folder.TrimEnd('/') + "/", StringComparison.Ordinal);
+    private static bool IsPath(string name) => name.Contains('/') || name.EndsWith(".yaml", StringComparison.Ordinal);
 }

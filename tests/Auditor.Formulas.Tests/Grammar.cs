@@ -21,7 +21,7 @@ internal static class Grammar
         .Select(text => Piece.Opaque(Piece.Loosest, text));
 
     private static Gen<Piece> RichFlags { get; } = Gen.OneOf(
-        "on", "wet", "kind == 'ring'", "has(serves ?? none, 'lighting')", "any_of(legs, buried && length > 5 m)", "all_of(legs, theta < this.theta)", "given(rcd)",
+        "on", "wet", "kind == 'ring'", "has(serves ?? none, 'lighting')", "matches(kind ?? 'ring', 'r.*')", "any_of(legs, buried && length > 5 m)", "all_of(legs, theta < this.theta)", "given(rcd)",
         "theta - 20 degC > delta", "one_of(device.standard, 'EN 60898', 'BS 88-3')", "origin.system != 'TT'", "given(fed.Zdb)", "table('words', kind ?? 'spur') == 'red'")
         .Select(text => Piece.Opaque(Piece.Loosest, text));
 

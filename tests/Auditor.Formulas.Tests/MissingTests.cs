@@ -52,6 +52,7 @@ public class MissingTests
     [InlineData("choose(!on, R, Z)")]
     [InlineData("one_of(kind, 'ring')")]
     [InlineData("has(serves, 'lighting')")]
+    [InlineData("matches(kind, 'r.*')")]
     [InlineData("table('capacity', S, 'C')")]
     [InlineData("table('capacity', 1.5 mm2, kind)")]
     [InlineData("table('words', kind)")]

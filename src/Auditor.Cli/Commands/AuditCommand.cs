@@ -21,7 +21,7 @@ internal static class AuditCommand
         var designs = new Argument<string[]>("DESIGN") { Description = "Design files; for a folder, every *.design.yaml below it.", Arity = ArgumentArity.OneOrMore };
         var rules = RuleSetOption.Make();
         var write = new Option<string[]>("--write") { Description = "Write a report (.html, .md, .txt, .json, .sarif, .xml for JUnit, .csv); repeatable. {name} stands for the design's path without .design.yaml.", HelpName = "FILE" };
-        var template = new Option<string?>("--template") { Description = "Template to use instead of the shipped one for .html, .md and .txt.", HelpName = "FILE" };
+        var template = new Option<string?>("--template") { Description = "Template to use for .html, .md and .txt instead of the shipped one, or of that of a house set.", HelpName = "FILE" };
         var evidence = new Option<bool>("--evidence") { Description = "Put every input and every quantity with its derivation into the .json." };
         var asOf = AsOfOption.Make();
         var failOn = FailOnOption.Make();

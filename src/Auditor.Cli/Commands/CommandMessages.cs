@@ -39,6 +39,6 @@ internal static class CommandMessages
         "unknown-schema", $"there is no schema `{name}`", null, "schemas: " + string.Join(", ", known));
 
     public static Problem UnreachableRuleSet(SourceSpan span, string path) => Problem.Error(
-        "rule-set-outside", $"the rule set `{path}` lies outside the folder of the design and the folder auditor runs in", span,
+        "rule-set-outside", $"the rule set `{path}` lies outside the folder of the design and the folder auditor runs in, or is reached by a symbolic link", span,
         "keep the firm's set in the repository, or name it with --rules");
 }

@@ -77,11 +77,17 @@ internal sealed record ReportTarget(string Path, ReportFormat Format)
             return JUnitReport.Write(result);
         }
 
-        var own = template is null ? null : TemplateFile.At(template);
+        var own = template is null ? OfSet(result) : TemplateFile.At(template);
         return Format == ReportFormat.Csv
             ? Schedule.For(own, result.Rules, problems) is { } schedule ? CsvSchedule.Write(result, schedule) : null
             : Render(result, register, own ?? TemplateFile.Shipped(Format), problems);
     }
+
+    /// <summary>The template that the rule set brings for this format; for the schedule alone, the one for Markdown, beside which it stands.</summary>
+    private TemplateFile? OfSet(AuditResult result) =>
+        result.Rules.Templates.TryGetValue(Format == ReportFormat.Csv ? ReportFormat.Markdown.Ending : Format.Ending, out var template)
+            ? new TemplateFile(template.FullPath, template.DisplayPath)
+            : null;
 
     private byte[]? Render(AuditResult result, Register register, TemplateFile template, Problems problems)
     {

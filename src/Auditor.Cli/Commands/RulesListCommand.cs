@@ -1,4 +1,5 @@
 using System.CommandLine;
+using Auditor.Cli.Summaries;
 using Auditor.Documents;
 using Auditor.Engine.Registers;
 using Auditor.Engine.RuleSets;
@@ -13,8 +14,9 @@ internal static class RulesListCommand
         var rules = RuleSetOption.Make();
         var coverage = new Option<bool>("--coverage") { Description = "Show instead how many rows of the register the rules decide, part by part." };
         var command = new ExampleCommand(
-            "list", "List the rules and parameters in force, with the file each comes from.",
+            "list", "List the rules, parameters, tables, curves, quantities and templates in force, with the file each comes from, and what house sets change.",
             "auditor rules list",
+            "auditor rules list --rules house/firm.set.yaml",
             "auditor rules list --coverage") { rules, coverage };
         command.SetAction(parsed => Run(terminal, parsed.GetValue(rules), parsed.GetValue(coverage)));
         return command;
@@ -32,7 +34,7 @@ internal static class RulesListCommand
 
         if (register is null)
         {
-            WriteSet(terminal.Output, set);
+            RuleSetText.Write(terminal.Output, set);
         }
         else
         {
@@ -40,24 +42,6 @@ internal static class RulesListCommand
         }
 
         return ExitCode.Clean;
-    }
-
-    private static void WriteSet(TextWriter output, RuleSet set)
-    {
-        output.WriteLine($"{set.Title.Id}: {set.Title.Text}");
-        output.WriteLine($"edition: {set.Title.Edition}");
-        output.WriteLine($"built from: {string.Join(" → ", set.Title.Chain)}");
-        output.WriteLine();
-        foreach (var rule in set.Rules)
-        {
-            output.WriteLine($"{rule.Id,-40} {rule.Shape.Name,-12} {ProvisionWord(rule),-14} {rule.Clause.Type,-26} {rule.Path}");
-        }
-
-        output.WriteLine();
-        foreach (var parameter in set.Parameters)
-        {
-            output.WriteLine($"param {parameter.Id,-40} {parameter.Text,-12} {parameter.Span}");
-        }
     }
 
     /// <summary>The provision in a word.</summary>

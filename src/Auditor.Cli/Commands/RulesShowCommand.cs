@@ -1,5 +1,6 @@
 using System.CommandLine;
 using Auditor.Documents;
+using Auditor.Engine.HouseSets;
 using Auditor.Engine.RuleSets;
 
 namespace Auditor.Cli.Commands;
@@ -25,7 +26,7 @@ internal static class RulesShowCommand
         var rule = set?.Rule(id);
         if (set is not null && rule is null)
         {
-            problems.Add(CommandMessages.UnknownRule(id, NearestWord.Find(id, set.Rules.Select(known => known.Id))));
+            problems.Add(CommandMessages.UnknownRule(id, NearestWord.Find(id, set.AllRules.Select(known => known.Id))));
         }
 
         if (terminal.Tell(problems) || rule is null)
@@ -33,11 +34,11 @@ internal static class RulesShowCommand
             return ExitCode.Problems;
         }
 
-        Write(terminal.Output, rule);
+        Write(terminal.Output, rule, set!);
         return ExitCode.Clean;
     }
 
-    private static void Write(TextWriter output, Rule rule)
+    private static void Write(TextWriter output, Rule rule, RuleSet set)
     {
         output.WriteLine($"{rule.Id}: {rule.Title}");
         output.WriteLine($"  {RulesListCommand.ProvisionWord(rule)} of every {rule.Shape.Name}; clause type: {rule.Clause.Type}");
@@ -59,7 +60,13 @@ internal static class RulesShowCommand
         output.WriteLine($"  decides       {string.Join(", ", rule.Covers)}");
         output.WriteLine($"  cases         {rule.Node.Items("cases").Count}");
         output.WriteLine($"  file          {rule.Path}");
+        foreach (var change in set.Changes.Where(change => change.Name == rule.Id && IsOfRule(change.What)))
+        {
+            output.WriteLine($"  changed       {change.What.Word()} from {change.Before} to {change.After} by {change.Set}, {change.Span}");
+        }
     }
+
+    private static bool IsOfRule(HouseChangeKind what) => what is HouseChangeKind.Rule or HouseChangeKind.Provision or HouseChangeKind.Departures;
 
     private static string LimitWord(CheckKind how) => how switch
     {

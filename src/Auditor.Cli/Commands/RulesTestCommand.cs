@@ -18,7 +18,7 @@ internal static class RulesTestCommand
         var command = new ExampleCommand(
             "test", "Run every case of every sheet and rule.",
             "auditor rules test",
-            "auditor rules test --rules house/firm.set.yaml",
+            "auditor rules test --rules house/firm.set.yaml --mutate",
             "auditor rules test --mutate") { rules, mutate };
         command.SetAction(parsed => Run(terminal, parsed.GetValue(rules), parsed.GetValue(mutate)));
         return command;

@@ -7,7 +7,7 @@ namespace Auditor.Cli.Revisions;
 /// <param name="commit">Id of the commit.</param>
 internal sealed class GitRevision(Git git, string commit)
 {
-    private static readonly string[] Endings = [".yaml", ".yml", ".json"];
+    private static readonly string[] Endings = [".yaml", ".yml", ".json", ".scriban-html", ".scriban-md", ".scriban-txt"];
 
     /// <summary>Whether the current folder belongs to a repository.</summary>
     public static bool IsInRepository(Git git) => git.Read("rev-parse", "--git-dir") is not null;

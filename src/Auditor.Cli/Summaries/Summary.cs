@@ -1,6 +1,7 @@
 using Auditor.Engine.Findings;
 using Auditor.Engine.Guarded;
 using Auditor.Engine.RuleSets;
+using Auditor.Reports.Model;
 using Spectre.Console;
 
 namespace Auditor.Cli.Summaries;
@@ -20,6 +21,11 @@ internal sealed class Summary(IAnsiConsole console)
         if (title.Notice.Length > 0)
         {
             console.WriteLine(title.Notice);
+        }
+
+        if (Loosened.Text(result.Rules) is { Length: > 0 } loosened)
+        {
+            console.MarkupLineInterpolated($"[bold]{loosened}[/]");
         }
 
         console.WriteLine();

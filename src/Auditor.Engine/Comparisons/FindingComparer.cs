@@ -84,7 +84,7 @@ internal sealed class FindingComparer(
             var (subject, isLater) = later is null ? (earlier!, false) : (later, true);
             if (subject.IsOnRecord)
             {
-                return (MovedBy.Departure, ChangeBits.None);
+                return (OfRecord(subject), ChangeBits.None);
             }
 
             return (MovedBy.Design, index is null ? ChangeBits.None : OfWhole(subject, isLater));
@@ -92,7 +92,7 @@ internal sealed class FindingComparer(
 
         if (later.IsOnRecord)
         {
-            return (MovedBy.Departure, ChangeBits.None);
+            return (OfRecord(later), ChangeBits.None);
         }
 
         var ruleBefore = one?.Rule ?? names.BeforeOf(other!.Rule);
@@ -107,6 +107,8 @@ internal sealed class FindingComparer(
         var by = index.Of(bits).Aggregate(MovedBy.Untold, (all, change) => all | (change is RuleChange ? MovedBy.RuleSet : MovedBy.Design));
         return (by, bits);
     }
+
+    private static MovedBy OfRecord(RevisionSubject subject) => subject.Kind == RevisionSubject.Departure ? MovedBy.Departure : MovedBy.RuleSet;
 
     /// <summary>The change of an added or removed subject; a leg comes and goes with its circuit.</summary>
     private ChangeBits OfWhole(RevisionSubject subject, bool isLater)

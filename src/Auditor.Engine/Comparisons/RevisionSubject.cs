@@ -12,6 +12,9 @@ public sealed class RevisionSubject(string key, string kind, string? name, strin
     /// <summary>Kind of a departure on record.</summary>
     internal const string Departure = "departure";
 
+    /// <summary>Kind of a change that a house set makes.</summary>
+    internal const string Change = "change";
+
     private const string BondingPrefix = "bonding/";
 
     /// <summary>Stable key.</summary>
@@ -33,7 +36,7 @@ public sealed class RevisionSubject(string key, string kind, string? name, strin
     public IReadOnlyList<RevisionInput>? Stated { get; init; }
 
     /// <summary>Whether it is no part of the installation but on record about the audit: such subjects are compared on their own.</summary>
-    public bool IsOnRecord => Kind == Departure;
+    public bool IsOnRecord => Kind is Departure or Change;
 
     /// <summary>Its key without that of what it belongs to: the id of a board or circuit, what a bonding conductor leads to.</summary>
     public string Id => IsOnRecord ? Key : Kind == "bonding" && Key.StartsWith(BondingPrefix, StringComparison.Ordinal)

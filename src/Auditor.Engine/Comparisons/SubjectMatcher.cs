@@ -24,7 +24,7 @@ internal sealed class SubjectMatcher
     public static SubjectPairs Match(Revision before, Revision after)
     {
         var matcher = new SubjectMatcher(before, after);
-        foreach (var kind in new[] { "installation", "board", "circuit", "bonding", RevisionSubject.Departure })
+        foreach (var kind in new[] { "installation", "board", "circuit", "bonding", RevisionSubject.Departure, RevisionSubject.Change })
         {
             matcher.MatchKind(kind);
         }

@@ -2,6 +2,7 @@ using Auditor.Documents;
 using Auditor.Engine.Departures;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Guarded;
+using Auditor.Engine.HouseSets;
 using Auditor.Engine.Installation;
 using Auditor.Engine.RuleSets;
 
@@ -21,12 +22,14 @@ public static class Audit
         var findings = Judged(rules, design.Subjects).ToList();
         var decision = acceptance?.Decision ?? GuardedFindings.AskedBy(design);
         findings = GuardedFindings.Complete(design, findings, decision, acceptance ?? new Acceptance());
+        DesignSubject[] changes = [.. ChangeSubjects.Of(design)];
+        findings.AddRange(Judged(rules, changes));
         var departures = new DepartureReader(rules, asOf, problems).Read(design.File, findings);
-        DesignSubject[] record = [.. DepartureSubjects.Of(design, departures, asOf)];
-        findings.AddRange(Judged(rules, record));
+        DesignSubject[] recorded = [.. DepartureSubjects.Of(design, departures, asOf)];
+        findings.AddRange(Judged(rules, recorded));
         var applied = findings.Select(finding => finding.Rule).ToHashSet();
         return new AuditResult(
-            design, rules, [.. design.Subjects, .. record], findings, departures, departures.Count > 0 ? asOf : null,
+            design, rules, [.. design.Subjects, .. changes, .. recorded], findings, departures, departures.Count > 0 ? asOf : null,
             [.. rules.Rules.Where(rule => !applied.Contains(rule))])
         {
             Decision = decision,

@@ -40,7 +40,7 @@ public sealed class DesignSubject : ISubject
     public MappingNode Node { get; }
 
     /// <summary>Where it is named, or where its mapping begins.</summary>
-    public SourceSpan Place => (Node.Find("id") ?? Node.Find("to") ?? Node.Find("rule"))?.Span ?? Node.Span.Slice(0, 1);
+    public SourceSpan Place => (Node.Find("id") ?? Node.Find("to") ?? Node.Find("rule"))?.Span ?? (Node.Entries.Count == 0 ? Node.Span : Node.Span.Slice(0, 1));
 
     /// <inheritdoc/>
     public Scope Scope { get; }

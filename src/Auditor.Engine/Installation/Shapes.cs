@@ -1,4 +1,5 @@
 using Auditor.Engine.Departures;
+using Auditor.Engine.HouseSets;
 using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Types;
 
@@ -7,7 +8,7 @@ namespace Auditor.Engine.Installation;
 /// <summary>
 /// The kinds of subject and the ways between them. The tree is what every installation has (origin, boards, circuits,
 /// legs, bonding conductors); what may be said of each comes from the design schema, what is computed from the sheets.
-/// Beside it stands what is on record about the audit itself: the departures.
+/// Beside it stands what is on record about the audit itself: the departures, and the changes that a house set makes.
 /// </summary>
 public sealed class Shapes
 {
@@ -38,13 +39,14 @@ public sealed class Shapes
     /// <summary>Makes the kinds with their ways and collections, without inputs or quantities.</summary>
     public Shapes()
     {
-        All = [Installation, Board, Circuit, Leg, Bonding, Departure];
+        All = [Installation, Board, Circuit, Leg, Bonding, Departure, Change];
         Link(Installation, [Installation], "has nothing before it");
         Link(Board, [Circuit, Installation], "is fed by nobody");
         Link(Circuit, [Board], "is on no board");
         Link(Leg, [Circuit], "belongs to no circuit");
         Link(Bonding, [Installation], "belongs to no installation");
         Link(Departure, [Installation], "belongs to no installation");
+        Link(Change, [Installation], "belongs to no installation");
         Circuit.AddWay("fed", Direction.Down, [Board], "feeds no board");
 
         Installation.AddCollection("boards", Board);
@@ -62,6 +64,7 @@ public sealed class Shapes
         Board.AddInput(IsRoot, FormulaType.Flag, null);
         Departure.AddInput(State, FormulaType.OneOf(DepartureStateWords.All), null);
         Departure.AddInput(AsOf, FormulaType.Text, null);
+        ChangeSubjects.AddInputs(Change);
     }
 
     /// <summary>The whole installation, seen from its origin.</summary>
@@ -82,11 +85,14 @@ public sealed class Shapes
     /// <summary>A departure that the design records.</summary>
     public SubjectShape Departure { get; } = new("departure", 5);
 
+    /// <summary>A change that a house set makes to the sets that it is built on.</summary>
+    public SubjectShape Change { get; } = new("change", 6);
+
     /// <summary>All kinds, by number.</summary>
     public IReadOnlyList<SubjectShape> All { get; }
 
     /// <summary>Whether a kind of subject is no part of the installation, but on record about the audit.</summary>
-    public bool IsOnRecord(SubjectShape shape) => shape == Departure;
+    public bool IsOnRecord(SubjectShape shape) => shape == Departure || shape == Change;
 
     /// <summary>The kind of that name, or null.</summary>
     public SubjectShape? Find(string name) => All.FirstOrDefault(shape => shape.Name == name);

@@ -17,4 +17,8 @@ namespace Auditor.Engine.RuleSets;
 /// <param name="Trust">How far it may be trusted; null where it is a choice and not a figure.</param>
 /// <param name="Span">Where the value stands.</param>
 public sealed record Parameter(
-    ParameterSlot Slot, string Id, Value Value, string Text, string About, string Tighter, string Clause, string Source, Trust? Trust, SourceSpan Span);
+    ParameterSlot Slot, string Id, Value Value, string Text, string About, string Tighter, string Clause, string Source, Trust? Trust, SourceSpan Span)
+{
+    /// <summary>The value before any house set, with which the cases of the other files are run; that in force where no house set changes it.</summary>
+    internal Value BeforeHouse { get; init; } = Value;
+}

@@ -23,6 +23,18 @@ internal static class RuleMessages
     public static Problem ExtendsOutside(SourceSpan span, string path) => Problem.Error(
         "extends-outside-folder", $"`{path}` lies outside the folder of this set", span, "name a shipped set, or keep the set that this one builds on in the same folder");
 
+    public static Problem LinkedSet(SourceSpan? span, string path) => Problem.Error(
+        "rule-set-linked", $"`{path}` is reached by a symbolic link", span, "name the file of the set itself");
+
+    public static Problem TighterRestated(SourceSpan span, string id, string before) => Problem.Error(
+        "tighter-restated", $"parameter `{id}` has its stricter direction already: {before}", span, "leave `tighter` out; a set that builds on another does not turn it round");
+
+    public static Problem ChangesUnknownRule(SourceSpan span, string id, string? nearest) => Problem.Error(
+        "change-of-no-rule", $"there is no rule `{id}` to change", span, nearest is null ? "see `auditor rules list`" : $"did you mean `{nearest}`?");
+
+    public static Problem ChangesNothing(SourceSpan span, string id, string what) => Problem.Warning(
+        "change-of-nothing", $"this changes nothing: rule `{id}` has `{what}` already", span, "take the change out");
+
     public static Problem ExtendsTooLong(SourceSpan span, int most) => Problem.Error(
         "extends-too-long", $"more than {most} sets build on one another", span, "build on a set nearer to the base");
 

@@ -1,5 +1,6 @@
 using Auditor.Documents;
 using Auditor.Engine.Adjustments;
+using Auditor.Engine.HouseSets;
 using Auditor.Engine.Installation;
 using Auditor.Formulas.Binding;
 using Auditor.Formulas.Subjects;
@@ -58,6 +59,15 @@ public sealed class RuleSet
 
     /// <summary>The files that it was read from.</summary>
     public IReadOnlyList<InputFile> Files { get; }
+
+    /// <summary>What house sets change in those that they are built on: by kind, then by name.</summary>
+    public required IReadOnlyList<HouseChange> Changes { get; init; }
+
+    /// <summary>The report templates that it brings, by the ending of the reports that they write.</summary>
+    public required IReadOnlyDictionary<string, SetTemplate> Templates { get; init; }
+
+    /// <summary>Display paths of the files that house sets bring.</summary>
+    public required IReadOnlySet<string> HouseFiles { get; init; }
 
     /// <summary>All quantities, by kind of subject, then by slot number.</summary>
     public IEnumerable<QuantityDefinition> Quantities => _quantities.SelectMany(list => list);

@@ -7,4 +7,8 @@ namespace Auditor.Engine.RuleSets;
 /// <param name="Notice">What a reader of every report must know of the edition; empty for nothing.</param>
 /// <param name="Chain">Names of the sets it is made of, the base first.</param>
 /// <param name="Sha256">Hash over all its files, in the order of their paths.</param>
-public sealed record RuleSetTitle(string Id, string Text, string Edition, string Notice, IReadOnlyList<string> Chain, string Sha256);
+public sealed record RuleSetTitle(string Id, string Text, string Edition, string Notice, IReadOnlyList<string> Chain, string Sha256)
+{
+    /// <summary>Name of the set that house sets are built on; its own where there is none.</summary>
+    public required string BuiltOn { get; init; }
+}

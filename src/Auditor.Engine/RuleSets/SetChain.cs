@@ -19,12 +19,19 @@ internal sealed class SetChain(RuleHome home, RuleFileReader reader, Problems pr
         var chain = new List<SetFile>();
         var seen = new HashSet<string>(StringComparer.Ordinal);
         var display = "";
+        SetFile? asker = null;
         while (true)
         {
             var (full, shown) = Locate(name, folder, display);
             if (full is null)
             {
                 problems.Add(RuleMessages.UnknownSet(asked, name, NearestWord.Find(name, home.SetNames()), home.SetNames()));
+                return [];
+            }
+
+            if (asker is null ? IsLinked(full, folder) : !IsShipped(full) && !asker.Holds(full))
+            {
+                problems.Add(asker is null ? RuleMessages.LinkedSet(asked, name) : RuleMessages.ExtendsOutside(asked!.Value, name));
                 return [];
             }
 
@@ -45,23 +52,30 @@ internal sealed class SetChain(RuleHome home, RuleFileReader reader, Problems pr
                 return [];
             }
 
-            var (root, rootShown) = RootOf(full, shown!);
-            var set = new SetFile(file, root, rootShown);
-            chain.Insert(0, set);
+            asker = Make(file, full, shown!);
+            chain.Insert(0, asker);
             if (file.Root.Scalar("extends") is not { } next)
             {
-                return chain;
-            }
-
-            if (IsPath(next.Text) && !set.Holds(Path.GetFullPath(Path.Combine(Path.GetDirectoryName(full)!, next.Text))))
-            {
-                problems.Add(RuleMessages.ExtendsOutside(next.Span, next.Text));
-                return [];
+                return [.. chain.Select((set, place) => IsHouse(chain, place) ? set with { Standing = SetStanding.House } : set)];
             }
 
             (name, folder, display, asked) = (next.Text, Path.GetDirectoryName(full)!, Path.GetDirectoryName(shown!)!.Replace('\\', '/'), next.Span);
         }
     }
+
+    /// <summary>A set is a house set when it is built on a shipped one, or on one that it does not share a folder <c>sets</c> with.</summary>
+    private static bool IsHouse(List<SetFile> chain, int place) =>
+        place > 0 && chain[place].Standing != SetStanding.Shipped
+        && (chain.Take(place).Any(set => set.Standing == SetStanding.Shipped) || !chain[place].SharesSets(chain[place - 1]));
+
+    private bool IsShipped(string full) => Enclosure.Holds(home.Folder, full);
+
+    /// <summary>
+    /// Whether the file of a set is reached by a symbolic link: on the way to it from the folder that the path is relative to, or, where it
+    /// lies elsewhere, itself.
+    /// </summary>
+    private static bool IsLinked(string full, string folder) =>
+        !Enclosure.Holds(full.StartsWith(folder.TrimEnd('/') + "/", StringComparison.Ordinal) ? folder : Path.GetDirectoryName(full)!, full);
 
     private (string? Full, string? Display) Locate(string name, string folder, string display)
     {
@@ -91,16 +105,17 @@ internal sealed class SetChain(RuleHome home, RuleFileReader reader, Problems pr
     }
 
     /// <summary>A set in a folder called <c>sets</c> composes the files beside that folder; any other set those of its own folder.</summary>
-    private static (string Folder, string Display) RootOf(string full, string display)
+    private SetFile Make(RuleFile file, string full, string display)
     {
+        var standing = IsShipped(full) ? SetStanding.Shipped : SetStanding.Own;
         var folder = Path.GetDirectoryName(full)!;
         var shown = Path.GetDirectoryName(display)?.Replace('\\', '/');
         if (Path.GetFileName(folder) != "sets")
         {
-            return (folder, string.IsNullOrEmpty(shown) ? "." : shown);
+            return new SetFile(file, folder, string.IsNullOrEmpty(shown) ? "." : shown, IsInSets: false, standing);
         }
 
         var above = Path.GetDirectoryName(shown ?? "")?.Replace('\\', '/');
-        return (Path.GetDirectoryName(folder)!, string.IsNullOrEmpty(above) ? "." : above);
+        return new SetFile(file, Path.GetDirectoryName(folder)!, string.IsNullOrEmpty(above) ? "." : above, IsInSets: true, standing);
     }
 }

@@ -6,7 +6,9 @@ namespace Auditor.Engine.RuleSets;
 /// <param name="File">The file.</param>
 /// <param name="Folder">Full path of the folder of its rule data.</param>
 /// <param name="Display">How files of that folder are shown.</param>
-internal sealed record SetFile(RuleFile File, string Folder, string Display)
+/// <param name="IsInSets">Whether its file stands in a folder called <c>sets</c>, and its rule data in the folder above.</param>
+/// <param name="Standing">What it is to the sets that it is built on.</param>
+internal sealed record SetFile(RuleFile File, string Folder, string Display, bool IsInSets, SetStanding Standing)
 {
     /// <summary>Its root mapping.</summary>
     public MappingNode Root => File.Root;
@@ -28,9 +30,25 @@ internal sealed record SetFile(RuleFile File, string Folder, string Display)
         return [.. files.DistinctBy(file => file.Item1)];
     }
 
+    /// <summary>Whether both stand in one folder <c>sets</c>.</summary>
+    public bool SharesSets(SetFile other) => Folder == other.Folder && IsInSets && other.IsInSets;
+
+    /// <summary>The templates that it brings, by the ending of the reports that they write.</summary>
+    /// <param name="problems">Receives paths that are not there or lead outside.</param>
+    public IEnumerable<(string Ending, SetTemplate Template)> Templates(Problems problems)
+    {
+        foreach (var entry in Root.Mapping("templates")?.Entries ?? [])
+        {
+            if (Expand((ScalarNode)entry.Value, problems) is [var (full, display)])
+            {
+                yield return ("." + entry.Key.Value, new SetTemplate(full, display));
+            }
+        }
+    }
+
     private List<(string Full, string Display)> Expand(ScalarNode path, Problems problems)
     {
-        var full = System.IO.Path.GetFullPath(System.IO.Path.Combine(Folder, path.Text));
+        var full = Path.GetFullPath(Path.Combine(Folder, path.Text));
         if (!Holds(full))
         {
             problems.Add(RuleMessages.OutsideRoot(path.Span, path.Text));
@@ -53,28 +71,11 @@ internal sealed record SetFile(RuleFile File, string Folder, string Display)
     }
 
     /// <summary>Whether a path lies in the folder, and no symbolic link along it leads elsewhere.</summary>
-    public bool Holds(string full)
-    {
-        var root = Folder.TrimEnd('/') + "/";
-        if (full != Folder && !full.StartsWith(root, StringComparison.Ordinal))
-        {
-            return false;
-        }
-
-        for (var at = full; at is not null && at.Length > Folder.Length; at = System.IO.Path.GetDirectoryName(at))
-        {
-            if (new FileInfo(at).LinkTarget is not null)
-            {
-                return false;
-            }
-        }
-
-        return true;
-    }
+    public bool Holds(string full) => Enclosure.Holds(Folder, full);
 
     private string Show(string full)
     {
-        var path = System.IO.Path.GetRelativePath(Folder, full).Replace('\\', '/');
+        var path = Path.GetRelativePath(Folder, full).Replace('\\', '/');
         return Display == "." ? path : $"{Display}/{path}";
     }
 }

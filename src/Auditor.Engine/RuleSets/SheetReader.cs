@@ -1,4 +1,5 @@
 using Auditor.Documents;
+using Auditor.Engine.HouseSets;
 using Auditor.Engine.Installation;
 using Auditor.Formulas;
 using Auditor.Formulas.Binding;
@@ -10,8 +11,9 @@ namespace Auditor.Engine.RuleSets;
 
 /// <summary>Declares the quantities of all sheets first, then binds their formulas, so that sheets may use one another in any order.</summary>
 /// <param name="shapes">Kinds of subject; receive the quantities.</param>
+/// <param name="changes">Receives what house sets change.</param>
 /// <param name="problems">Receives what is wrong.</param>
-internal sealed class SheetReader(Shapes shapes, Problems problems)
+internal sealed class SheetReader(Shapes shapes, HouseChanges changes, Problems problems)
 {
     private readonly Dictionary<(SubjectShape, string), Declared> _declared = [];
     private readonly UncertaintyReader _uncertainties = new(problems);
@@ -37,6 +39,9 @@ internal sealed class SheetReader(Shapes shapes, Problems problems)
             }
             else if (earlier is not null && earlier.Set < set && earlier.Slot.Type.Equals(type))
             {
+                changes.Add(
+                    set, HouseChangeKind.Quantity, $"{shape.Name} {symbol.Text}", (earlier.Node.Span.Source.Path, file.Path), loosens: true,
+                    "computed by a formula of its own", symbol.Span);
                 _declared[(shape, symbol.Text)] = earlier with { Node = node, Sheet = file.Root.Text("sheet")!, Set = set };
             }
             else

@@ -12,10 +12,18 @@ namespace Auditor.Engine.RuleTests;
 internal sealed class CaseReader(RuleSet rules, Evaluator evaluator, Problems problems)
 {
     /// <summary>The subject that a case describes.</summary>
-    public CaseSubject Read(SubjectShape shape, MappingNode? given)
+    /// <param name="shape">Kind of subject.</param>
+    /// <param name="given">What the case gives; null for nothing.</param>
+    /// <param name="ofHouse">Whether the case stands in a file of a house set: the others know nothing of the parameters that one changes.</param>
+    public CaseSubject Read(SubjectShape shape, MappingNode? given, bool ofHouse)
     {
         var installation = rules.Schema.Shapes.Installation;
         var world = new CaseWorld(evaluator, installation);
+        foreach (var parameter in ofHouse ? [] : rules.Parameters)
+        {
+            world.Parameters[parameter.Slot.Index] = parameter.BeforeHouse;
+        }
+
         var subject = shape == installation ? world.Origin : new CaseSubject(shape, "case", world);
         foreach (var entry in given?.Entries ?? [])
         {

@@ -53,13 +53,16 @@ public sealed class CaseRunner(RuleSet rules, Problems problems)
     /// <summary>What a rule comes to on the subject that a case describes.</summary>
     /// <param name="rule">The rule.</param>
     /// <param name="given">What the case gives; null for nothing.</param>
-    public Judgement Judge(Rule rule, MappingNode? given) => Evaluation.Judge.Decide(rule, _reader.Read(rule.Shape, given).Scope);
+    public Judgement Judge(Rule rule, MappingNode? given) => Evaluation.Judge.Decide(rule, _reader.Read(rule.Shape, given, IsOfHouse(rule.Node)).Scope);
 
     /// <summary>The value of a formula on the subject that a case describes.</summary>
     /// <param name="formula">The formula.</param>
     /// <param name="shape">Kind of subject that it was bound for.</param>
     /// <param name="given">What the case gives; null for nothing.</param>
-    public Value Evaluate(Formula formula, SubjectShape shape, MappingNode? given) => formula.Evaluate(_reader.Read(shape, given).Scope);
+    public Value Evaluate(Formula formula, SubjectShape shape, MappingNode? given) =>
+        formula.Evaluate(_reader.Read(shape, given, given is not null && IsOfHouse(given)).Scope);
+
+    private bool IsOfHouse(MappingNode node) => rules.HouseFiles.Contains(node.Span.Source.Path);
 
     /// <summary>How results and messages call a quantity.</summary>
     internal static string OwnerOf(QuantityDefinition quantity) => $"{quantity.Sheet}: {quantity.Shape.Name} {quantity.Slot.Symbol}";

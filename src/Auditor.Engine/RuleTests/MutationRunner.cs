@@ -15,12 +15,15 @@ public sealed class MutationRunner(RuleSet rules)
     /// <summary>Makes every change, side by side.</summary>
     public MutationReport Run()
     {
-        var quantities = rules.Quantities.ToArray();
-        var all = rules.AllRules.ToArray();
+        var quantities = rules.Quantities.Where(quantity => IsTried(quantity.Node)).ToArray();
+        var all = rules.AllRules.Where(rule => IsTried(rule.Node)).ToArray();
         var reports = new MutationReport[all.Length + quantities.Length];
         Parallel.For(0, reports.Length, i => reports[i] = i < all.Length ? Run(all[i]) : Run(quantities[i - all.Length]));
         return Together(reports);
     }
+
+    /// <summary>Of a house set its own files alone: the others are tried with the set that they belong to.</summary>
+    private bool IsTried(MappingNode node) => rules.HouseFiles.Count == 0 || rules.HouseFiles.Contains(node.Span.Source.Path);
 
     /// <summary>Changes one rule.</summary>
     public MutationReport Run(Rule rule) =>

@@ -25,6 +25,7 @@ internal sealed partial class Binder
         ["given"] = "given(x)",
         ["one_of"] = "one_of(text, 'word', …)",
         ["has"] = "has(words, 'word')",
+        ["matches"] = "matches(text, 'pattern')",
         ["table"] = "table('lookup', key, …)",
         ["round_up_to"] = "round_up_to('lookup', x)",
         ["trip_current"] = "trip_current(standard, type, rating, time)",
@@ -63,6 +64,7 @@ internal sealed partial class Binder
             "given" => BindGiven(span, arguments[0], site),
             "one_of" => BindOneOf(span, arguments, site),
             "has" => BindHas(span, arguments, site),
+            "matches" => BindMatches(span, arguments, site),
             "table" => BindTable(span, arguments, site),
             "round_up_to" => BindRoundUp(span, arguments, site),
             "trip_current" or "trip_time" => BindCurve(span, name, arguments, site),
@@ -76,7 +78,7 @@ internal sealed partial class Binder
         "min" or "max" or "one_of" or "table" => count >= 2,
         "choose" => count == 3,
         "trip_current" or "trip_time" => count == 4,
-        "has" or "round_up_to" or "sum_of" or "min_of" or "max_of" or "count_of" or "all_of" or "any_of" => count == 2,
+        "has" or "matches" or "round_up_to" or "sum_of" or "min_of" or "max_of" or "count_of" or "all_of" or "any_of" => count == 2,
         _ => count == 1,
     };
 

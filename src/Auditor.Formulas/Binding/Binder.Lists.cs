@@ -24,6 +24,24 @@ internal sealed partial class Binder
         return list is null || word is null ? null : new HasTerm(span, list, word);
     }
 
+    private MatchesTerm? BindMatches(SourceSpan span, ScriptExpression[] arguments, Site site)
+    {
+        var text = BindText(arguments[0], site, "`matches`");
+        if (arguments[1] is not ScriptLiteral { Value: string pattern })
+        {
+            Fail(FormulaMessages.NotAllowed(SpanOf(arguments[1]), "anything but a pattern in quotes"));
+            return null;
+        }
+
+        if (TextPattern.TryMake(pattern, out var made, out var fault))
+        {
+            return text is null ? null : new MatchesTerm(span, text, made);
+        }
+
+        Fail(FormulaMessages.Pattern(SpanOf(arguments[1]), fault));
+        return null;
+    }
+
     private string? WordOf(ScriptExpression argument, IReadOnlyList<string>? allowed)
     {
         if (argument is not ScriptLiteral { Value: string word })

@@ -82,6 +82,9 @@ internal static class FormulaMessages
     public static Problem Needs(SourceSpan span, string what, string wanted, FormulaType got) => Problem.Error(
         "wrong-type", $"{what} needs {wanted}, and this is {got}", span, null);
 
+    public static Problem Pattern(SourceSpan span, string fault) => Problem.Error(
+        "wrong-pattern", $"this pattern cannot be used: {fault}", span, "a pattern is a regular expression for the whole text, such as `[A-Z]{2}[0-9]+`");
+
     public static Problem Arguments(SourceSpan span, string function, string signature) => Problem.Error(
         "wrong-arguments", $"`{function}` is called as `{signature}`", span, null);
 

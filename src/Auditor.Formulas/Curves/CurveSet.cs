@@ -26,6 +26,14 @@ public sealed class CurveSet
         return rival;
     }
 
+    /// <summary>The curves that go before one of an earlier set for some device, with that one and the number of their set.</summary>
+    public IEnumerable<(Curve Later, Curve Earlier, int Set)> Hidden() =>
+        from later in _curves
+        from earlier in _curves
+        where earlier.Set < later.Set && (later.Curve.Type is null || earlier.Curve.Type is null || later.Curve.Type == earlier.Curve.Type)
+            && later.Curve.Standards.Intersect(earlier.Curve.Standards, StringComparer.Ordinal).Any()
+        select (later.Curve, earlier.Curve, later.Set);
+
     /// <summary>The curve for a device, or null.</summary>
     public Curve? Find(string standard, string type)
     {

@@ -7,6 +7,10 @@ public sealed class TableReader(IReadOnlyDictionary<string, Lookup> lookups, Pro
 {
     private readonly Dictionary<string, (string Path, int Set)> _tables = [];
     private readonly Dictionary<TableSource, int> _setOf = new(ReferenceEqualityComparer.Instance);
+    private readonly List<LaterCell> _later = [];
+
+    /// <summary>What any set but the first entered, in its order.</summary>
+    public IReadOnlyList<LaterCell> Later => _later;
 
     /// <summary>Enters one table.</summary>
     /// <param name="file">Root of the file.</param>
@@ -69,8 +73,14 @@ public sealed class TableReader(IReadOnlyDictionary<string, Lookup> lookups, Pro
             return;
         }
 
+        var set = _setOf[place.Table];
         var before = lookup.Enter(path, cell);
-        if (before is not null && _setOf[before.Table] == _setOf[place.Table])
+        if (set > 0)
+        {
+            _later.Add(new LaterCell(lookup, before, cell, set, scalar.Span));
+        }
+
+        if (before is not null && _setOf[before.Table] == set)
         {
             problems.Add(TableMessages.SecondCell(
                 scalar.Span, place.Column.Length == 0 ? place.Row : $"{place.Row} / {place.Column}", $"{before.Table.Path}:{before.Line}"));

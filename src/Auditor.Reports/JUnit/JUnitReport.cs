@@ -2,6 +2,7 @@ using System.Text;
 using System.Xml;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Installation;
+using Auditor.Reports.Model;
 using Auditor.Reports.Reading;
 
 namespace Auditor.Reports.JUnit;
@@ -90,6 +91,11 @@ public static class JUnitReport
         Property(xml, "rule-set", title.Id);
         Property(xml, "edition", title.Edition);
         Property(xml, "notice", title.Notice);
+        if (Loosened.Text(result.Rules) is { Length: > 0 } loosened)
+        {
+            Property(xml, "loosened", loosened);
+        }
+
         foreach (var file in places.Inputs)
         {
             Property(xml, $"sha-256 of {file.Path}", file.Sha256);

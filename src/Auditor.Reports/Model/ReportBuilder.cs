@@ -78,7 +78,7 @@ internal sealed class ReportBuilder
     private ReportRuleSet RuleSet()
     {
         var title = _result.Rules.Title;
-        return new ReportRuleSet(title.Id, title.Text, title.Edition, title.Notice, title.Chain, title.Sha256, _result.Rules.Rules.Count);
+        return new ReportRuleSet(title.Id, title.Text, title.Edition, title.Notice, title.Chain, title.Sha256, _result.Rules.Rules.Count, Loosened.Text(_result.Rules));
     }
 
     private VerdictCount Count(Verdict verdict)

@@ -8,4 +8,6 @@ namespace Auditor.Reports.Model;
 /// <param name="Chain">Names of the sets that it is made of, the base first.</param>
 /// <param name="Sha256">Hash over all its files.</param>
 /// <param name="Rules">How many rules it has.</param>
-public sealed record ReportRuleSet(string Id, string Title, string Edition, string Notice, IReadOnlyList<string> Chain, string Sha256, int Rules);
+/// <param name="Loosened">What house rules loosen, drop or replace; empty for nothing. Every report shows it.</param>
+public sealed record ReportRuleSet(
+    string Id, string Title, string Edition, string Notice, IReadOnlyList<string> Chain, string Sha256, int Rules, string Loosened);

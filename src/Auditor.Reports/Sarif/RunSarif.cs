@@ -42,12 +42,12 @@ internal sealed class RunSarif(JsonOutput output, AuditResult result, IReadOnlyD
 
     private void Invocation(RuleSetTitle title)
     {
-        string[] notices = [.. new[] { title.Notice, Caution.Text }.Where(notice => notice.Length > 0)];
+        (string Level, string Text)[] notices = [("warning", Loosened.Text(result.Rules)), ("note", title.Notice), ("note", Caution.Text)];
         output.Flag("executionSuccessful", true);
-        output.Array("toolConfigurationNotifications", notices, notice => output.Object(null, () =>
+        output.Array("toolConfigurationNotifications", notices.Where(notice => notice.Text.Length > 0), notice => output.Object(null, () =>
         {
-            output.Text("level", "note");
-            output.Message("message", notice);
+            output.Text("level", notice.Level);
+            output.Message("message", notice.Text);
         }));
     }
 

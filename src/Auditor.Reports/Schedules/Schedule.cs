@@ -29,6 +29,12 @@ public sealed record Schedule(IReadOnlyList<ScheduleColumn> Columns)
 
     private static Schedule? Read(TemplateFile file, RuleSet rules, Problems problems)
     {
+        if (new FileInfo(file.FullPath).LinkTarget is not null)
+        {
+            problems.Add(ScheduleMessages.Linked(file.DisplayPath));
+            return null;
+        }
+
         var own = new Problems();
         var root = SourceReader.Read(file.FullPath, file.DisplayPath, own) is { } source ? YamlReader.Read(source, own) : null;
         if (root is not null)

@@ -25,18 +25,21 @@ internal sealed class ReportContext : TemplateContext
     private readonly Ink _ink;
     private readonly TemplateFolder _folder;
     private readonly WrittenHtml? _html;
+    private readonly string _loosened;
     private readonly Stopwatch _watch = Stopwatch.StartNew();
     private long _evaluations;
 
     /// <summary>What was evaluated last: when a value is written, that which gave it.</summary>
     private ScriptNode? _evaluated;
 
-    public ReportContext(object model, Ink ink, TemplateFolder folder)
+    public ReportContext(object model, string loosened, Ink ink, TemplateFolder folder)
         : base(Functions(ink))
     {
         _ink = ink;
         _folder = folder;
         _html = ink.Watch();
+        _loosened = loosened;
+        HasShownLoosened = loosened.Length == 0;
         StrictVariables = true;
         EnableRelaxedMemberAccess = false;
         EnableRelaxedIndexerAccess = false;
@@ -64,6 +67,9 @@ internal sealed class ReportContext : TemplateContext
     /// <summary>Whether the caution has been inserted.</summary>
     public bool HasShownCaution { get; private set; }
 
+    /// <summary>Whether what house rules loosen has been inserted, or there is nothing of the kind.</summary>
+    public bool HasShownLoosened { get; private set; }
+
     /// <inheritdoc/>
     public override TemplateContext Write(SourceSpan span, object? textAsObject)
     {
@@ -78,6 +84,7 @@ internal sealed class ReportContext : TemplateContext
         }
 
         HasShownCaution |= ReferenceEquals(textAsObject, Caution.Text);
+        HasShownLoosened |= ReferenceEquals(textAsObject, _loosened);
         var inert = _ink.Inert(ObjectToString(textAsObject) ?? "", _html is null && StartsBlock());
         return Write(_html is null ? inert : _html.Fit(inert, Written) ?? throw new TemplateFault(_evaluated?.Span ?? span, TemplateMessages.NoTextHere));
     }

@@ -52,6 +52,10 @@ internal static class TemplateMessages
         "template-without-caution", "this template leaves out the caution", span,
         "every report shows it: write {{ report.caution }} where it is read");
 
+    public static Problem WithoutLoosened(SourceSpan span) => Problem.Error(
+        "template-without-loosened", "this template leaves out what house rules loosen", span,
+        "every report shows it where there is something: write {{ report.rule_set.loosened }} where it is read");
+
     private static Problem Limit(SourceSpan span, string message) => Problem.Error(
         "template-limit", message, span, "a template has bounds, so that none can hold up the program; show less, or loop over less");
 

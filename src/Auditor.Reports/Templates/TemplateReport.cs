@@ -1,6 +1,7 @@
 using System.Text;
 using Auditor.Documents;
 using Auditor.Reports.Files;
+using Auditor.Reports.Model;
 using Scriban.Syntax;
 
 namespace Auditor.Reports.Templates;
@@ -30,11 +31,16 @@ public static class TemplateReport
             return null;
         }
 
-        var context = new ReportContext(model, ink, folder);
+        var context = new ReportContext(model, (model as ReportModel)?.RuleSet.Loosened ?? "", ink, folder);
         try
         {
             var text = ink.Finish(parsed.Render(context).Replace("\r\n", "\n", StringComparison.Ordinal));
-            return context.HasShownCaution ? Encoding.UTF8.GetBytes(text) : folder.Refuse(TemplateMessages.WithoutCaution);
+            if (!context.HasShownCaution)
+            {
+                return folder.Refuse(TemplateMessages.WithoutCaution);
+            }
+
+            return context.HasShownLoosened ? Encoding.UTF8.GetBytes(text) : folder.Refuse(TemplateMessages.WithoutLoosened);
         }
         catch (ScriptRuntimeException fault)
         {

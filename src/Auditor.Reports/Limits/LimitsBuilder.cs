@@ -20,7 +20,8 @@ internal sealed class LimitsBuilder(LimitResult result)
         {
             Project = new ReportProject(said("title") ?? "", said("reference") ?? "", said("revision") ?? "", said("designer") ?? "", said("checker") ?? ""),
             Design = places.Design,
-            RuleSet = new ReportRuleSet(title.Id, title.Text, title.Edition, title.Notice, title.Chain, title.Sha256, design.Evaluator.Rules.Rules.Count),
+            RuleSet = new ReportRuleSet(
+                title.Id, title.Text, title.Edition, title.Notice, title.Chain, title.Sha256, design.Evaluator.Rules.Rules.Count, Loosened.Text(design.Evaluator.Rules)),
             Inputs = places.Inputs,
             TestTemperature = design.Installation.Shape.Input(TestTemperature) is { } slot ? LimitText.Value(design.Installation.Input(slot.Index), slot) : "",
             Groups = [.. rows.GroupBy(pair => pair.Input.Subject)

@@ -1,6 +1,7 @@
 using System.Text;
 using Auditor.Documents;
 using Auditor.Reports.Files;
+using Auditor.Reports.Limits;
 using Auditor.Reports.Model;
 using Scriban.Syntax;
 
@@ -31,7 +32,7 @@ public static class TemplateReport
             return null;
         }
 
-        var context = new ReportContext(model, (model as ReportModel)?.RuleSet.Loosened ?? "", ink, folder);
+        var context = new ReportContext(model, LoosenedOf(model), ink, folder);
         try
         {
             var text = ink.Finish(parsed.Render(context).Replace("\r\n", "\n", StringComparison.Ordinal));
@@ -47,4 +48,11 @@ public static class TemplateReport
             return folder.Refuse(fault);
         }
     }
+
+    private static string LoosenedOf(object model) => model switch
+    {
+        ReportModel report => report.RuleSet.Loosened,
+        LimitsModel limits => limits.RuleSet.Loosened,
+        _ => "",
+    };
 }

@@ -118,7 +118,7 @@ public class DepartureCommandTests
         Write(folder, "departures:", $"  - {{ {Drop} }}");
         foreach (var (asOf, word) in new[] { ("2026-11-30", "Nobody plugs in more than a lamp."), ("2026-12-01", "record-departure-in-date") })
         {
-            string[] reports = ["a.md", "a.txt", "a.json", "a.sarif", "a.xml"];
+            string[] reports = ["a.html", "a.md", "a.txt", "a.json", "a.sarif", "a.xml"];
             Tool.RunIn(folder.Path, ["audit", "a.design.yaml", "--quiet", "--as-of", asOf, .. reports.SelectMany(report => new[] { "--write", report }), "--write", "a.csv"]);
 
             Assert.All(reports, report => Assert.Contains(word, File.ReadAllText(folder.File(report)), StringComparison.Ordinal));

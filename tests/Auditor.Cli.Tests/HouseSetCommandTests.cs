@@ -9,7 +9,7 @@ public class HouseSetCommandTests
     private const string Quillmere = "examples/quillmere/house/quillmere.set.yaml";
     private const string Loosened = "House rules ask for less than united-kingdom";
 
-    private static readonly string[] Reports = ["a.md", "a.txt", "a.json", "a.sarif", "a.xml", "a.csv"];
+    private static readonly string[] Reports = ["a.html", "a.md", "a.txt", "a.json", "a.sarif", "a.xml", "a.csv"];
 
     [Fact]
     public void A_house_set_that_loosens_a_limit_is_told_on_in_every_format_and_on_the_terminal()

@@ -188,7 +188,7 @@ public class HouseSetTests
     [InlineData("templates: { md: ../outside.scriban-md }", "rules-outside-folder: `../outside.scriban-md` lies outside the folder of this set")]
     [InlineData("templates: { md: /etc/hostname }", "rules-outside-folder: `/etc/hostname` lies outside the folder of this set")]
     [InlineData("templates: { md: none.scriban-md }", "rules-not-found: there is no `none.scriban-md`")]
-    [InlineData("templates: { html: a.scriban-md }", "unknown-key: `html` is not a key of `templates`")]
+    [InlineData("templates: { pdf: a.scriban-md }", "unknown-key: `pdf` is not a key of `templates`")]
     public void A_house_set_that_is_wrong_is_told_at_its_place(string line, string told)
     {
         using var rules = Base($"parameters: {{ {Lower} }}\n").With("house.yaml", $"set: house\ntitle: House\nextends: base.yaml\n{line}\n");

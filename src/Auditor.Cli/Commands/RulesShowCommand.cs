@@ -42,7 +42,8 @@ internal static class RulesShowCommand
     {
         output.WriteLine($"{rule.Id}: {rule.Title}");
         output.WriteLine($"  {RulesListCommand.ProvisionWord(rule)} of every {rule.Shape.Name}; clause type: {rule.Clause.Type}");
-        output.WriteLine($"  {string.Join(", ", rule.Clause.References)}{(rule.Clause.Note.Length == 0 ? "" : "; " + rule.Clause.Note)}");
+        string[] authority = [string.Join(", ", rule.Clause.References), rule.Clause.Note];
+        output.WriteLine($"  {string.Join("; ", authority.Where(text => text.Length > 0))}");
         if (rule.When is { } when)
         {
             output.WriteLine($"  applies when  {OneLine(when.Text)}");

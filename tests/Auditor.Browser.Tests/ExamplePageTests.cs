@@ -15,6 +15,8 @@ public class ExamplePageTests(Chromium chromium)
     private const string ThinOut = """
         () => {
           const keep = (within, kind, most) => document.querySelectorAll(within).forEach(one => [...one.querySelectorAll(':scope > ' + kind)].slice(most).forEach(extra => extra.remove()));
+          const kinds = new Set();
+          document.querySelectorAll('figure').forEach(one => kinds.has(one.className) ? one.remove() : kinds.add(one.className));
           keep('#findings', '.rule', 6);
           keep('.rule', '.f', 2);
           keep('#workings', '.book:not(:last-child)', 2);

@@ -90,6 +90,10 @@ public class LimitsCommandTests
         using var json = JsonDocument.Parse(File.ReadAllText(folder.File("a.json")));
         var finding = json.RootElement.GetProperty("findings").EnumerateArray().Single(each => each.GetProperty("key").GetString() == "voltage-drop-other:GO/1");
 
+        File.WriteAllText(folder.File("b.design.yaml"), text.Replace("basis: { ", "basis: { decision: guarded, ", StringComparison.Ordinal));
+        var asked = Tool.RunIn(folder.Path, ["audit", "b.design.yaml"]);
+
+        Assert.Contains("met as stated, but not everywhere within the tolerances", asked.Output, StringComparison.Ordinal);
         Assert.DoesNotContain("within the tolerances", simple.Output, StringComparison.Ordinal);
         Assert.Contains("met as stated, but not everywhere within the tolerances", guarded.Output, StringComparison.Ordinal);
         Assert.Equal("guarded", json.RootElement.GetProperty("basis").GetProperty("decision").GetString());

@@ -71,8 +71,8 @@ public static class UnifiedDiff
         {
             var (sign, line) = (one, other) switch
             {
-                (>= 0, >= 0) => (' ', old[one]),
-                (>= 0, _) => ('-', old[one]),
+                ( >= 0, >= 0) => (' ', old[one]),
+                ( >= 0, _) => ('-', old[one]),
                 _ => ('+', young[other]),
             };
             text.Append(sign).Append(line);

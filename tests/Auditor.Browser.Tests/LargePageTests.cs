@@ -16,5 +16,7 @@ public class LargePageTests(Chromium chromium)
 
         Assert.True(page.Bytes < MostBytes, $"the page has {page.Bytes} bytes");
         Assert.Equal(page.Model.Rules.Sum(rule => rule.Findings.Count), await open.Get<int>("document.querySelectorAll('.f').length"));
+        Assert.InRange(await open.Get<int>("document.querySelectorAll('.f.line').length"), 1_000, int.MaxValue);
+        Assert.Equal(0, await open.Get<int>("[...document.querySelectorAll('.f.line')].filter(line => !line.textContent.includes(': conforms')).length"));
     }
 }

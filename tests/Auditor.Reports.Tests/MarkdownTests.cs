@@ -1,5 +1,4 @@
 using Auditor.Reports.Files;
-using Auditor.Reports.Templates;
 
 namespace Auditor.Reports.Tests;
 
@@ -78,16 +77,6 @@ public class MarkdownTests
         return Write(template, title, folder);
     }
 
-    /// <summary>Renders a template over a model with that title; the caution that every report has is cut off.</summary>
-    private static string Write(string template, string title, TemporaryFolder folder)
-    {
-        var garden = Sheds.Model("garden");
-        var model = garden with { Project = garden.Project with { Title = title } };
-        var path = folder.Write("t.scriban-md", template + "\n!cut!{{ report.caution }}");
-        var problems = new Documents.Problems();
-        var bytes = TemplateReport.Render(model, ReportFormat.Markdown, new TemplateFile(path, "t.scriban-md"), problems);
-        Assert.Empty(problems.All);
-        var text = System.Text.Encoding.UTF8.GetString(bytes!);
-        return text[..text.IndexOf("!cut!", StringComparison.Ordinal)];
-    }
+    private static string Write(string template, string title, TemporaryFolder folder) =>
+        Piece.Write(ReportFormat.Markdown, template, title, folder);
 }

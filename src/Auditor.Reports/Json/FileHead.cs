@@ -3,10 +3,24 @@ using Auditor.Reports.Reading;
 
 namespace Auditor.Reports.Json;
 
-/// <summary>Writes what files of limits and of remedies say first: by which tool, from which files, by which rule set.</summary>
+/// <summary>Writes what files for programs say first.</summary>
 internal static class FileHead
 {
+    /// <summary>By which tool, from which files, and by which rule set.</summary>
     public static void Write(JsonOutput output, Design design)
+    {
+        Source(output);
+        output.Object("ruleSet", () =>
+        {
+            var title = design.Evaluator.Rules.Title;
+            output.Text("name", title.Id);
+            output.TextOrNull("edition", title.Edition);
+            output.Text("sha256", title.Sha256);
+        });
+    }
+
+    /// <summary>By which tool, and from which files.</summary>
+    public static void Source(JsonOutput output)
     {
         output.Object("tool", () =>
         {
@@ -18,12 +32,5 @@ internal static class FileHead
             output.Text("path", file.Path);
             output.Text("sha256", file.Sha256);
         }));
-        output.Object("ruleSet", () =>
-        {
-            var title = design.Evaluator.Rules.Title;
-            output.Text("name", title.Id);
-            output.TextOrNull("edition", title.Edition);
-            output.Text("sha256", title.Sha256);
-        });
     }
 }

@@ -15,16 +15,7 @@ internal static class HeadJson
     public static void Write(JsonOutput output, AuditResult result)
     {
         output.Whole("format", Format);
-        output.Object("tool", () =>
-        {
-            output.Text("name", ThisTool.Name);
-            output.Text("version", ThisTool.Version);
-        });
-        output.Array("inputs", output.Places.Inputs, file => output.Object(null, () =>
-        {
-            output.Text("path", file.Path);
-            output.Text("sha256", file.Sha256);
-        }));
+        FileHead.Source(output);
         Project(output, result.Design);
         Basis(output, result);
         output.Object("ruleSet", () => RuleSet(output, result.Rules));

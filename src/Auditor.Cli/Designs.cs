@@ -14,6 +14,7 @@ namespace Auditor.Cli;
 internal sealed class Designs(string? ruleSet, Problems problems)
 {
     private readonly Dictionary<string, RuleSet?> _sets = [];
+    private RuleSetAhead? _ahead;
 
     /// <summary>Reads a design; null, with problems added, when that cannot be done.</summary>
     public Design? Read(string path) => Read(Path.GetFullPath(path), path, Environment.CurrentDirectory);
@@ -24,7 +25,7 @@ internal sealed class Designs(string? ruleSet, Problems problems)
     /// <param name="within">Full path of the folder that its rule set may lie in, besides its own folder.</param>
     public Design? Read(string fullPath, string path, string within)
     {
-        var file = DesignFile.Read(fullPath, path, problems);
+        var file = DesignFile.Read(fullPath, path, problems, onTop: text => _ahead ??= RuleSetAhead.Of(ruleSet, text));
         Log.Information("Read {Design}", path);
         if (file is null || RulesFor(file, Path.GetDirectoryName(fullPath)!, within) is not { } rules)
         {
@@ -83,7 +84,7 @@ internal sealed class Designs(string? ruleSet, Problems problems)
         var key = IsPath(name) ? Path.GetFullPath(Path.Combine(folder, name)) : name;
         if (!_sets.TryGetValue(key, out var rules))
         {
-            rules = RuleSetLoader.Load(Shipped.Rules, name, folder, asked, problems);
+            rules = _ahead?.Take(name) ?? RuleSetLoader.Load(Shipped.Rules, name, folder, asked, problems);
             _sets.Add(key, rules);
             Log.Information("Read rule set {RuleSet}", name);
         }
@@ -91,5 +92,6 @@ internal sealed class Designs(string? ruleSet, Problems problems)
         return rules;
     }
 
-    private static bool IsPath(string name) => name.Contains('/') || name.EndsWith(".yaml", StringComparison.Ordinal);
+    /// <summary>Whether a rule set is named by the path of its file, and not as one of those shipped.</summary>
+    public static bool IsPath(string name) => name.Contains('/') || name.EndsWith(".yaml", StringComparison.Ordinal);
 }

@@ -130,8 +130,8 @@ public class CompareFindingsTests
     }
 
     [Theory]
-    [InlineData("\"subject\": \"A/2\"", "\"subject\": \"A/9\"", "error findings-unknown-subject: this file does not list the subject `A/9`")]
-    [InlineData("\"key\": \"A/2\"", "\"key\": \"A/1\"", "error findings-listed-twice: this file lists the subject `A/1` a second time")]
+    [InlineData("\"subject\":\"A/2\"", "\"subject\":\"A/9\"", "error findings-not-listed: this file does not list the subject `A/9`")]
+    [InlineData("\"key\":\"A/2\"", "\"key\":\"A/1\"", "error findings-listed-twice: this file lists the subject `A/1` a second time")]
     public void A_findings_file_that_contradicts_itself_is_refused(string old, string replacement, string problem)
     {
         using var repository = WithFindings();

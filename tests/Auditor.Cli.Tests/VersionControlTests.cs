@@ -114,7 +114,7 @@ public sealed class VersionControlTests : IDisposable
         Audit();
 
         Assert.Matches(@"@@ name: Lighting\n", Git("diff", "--unified=0", "house.design.yaml"));
-        Assert.Matches(@"@@ voltage-drop-lighting:CU/1\n", Git("diff", "--unified=0", "house.findings.json"));
+        Assert.Matches(@"\n\+ *{""key"":""voltage-drop-lighting:CU/1"",""rule""", Git("diff", "--unified=0", "house.findings.json"));
     }
 
     public void Dispose() => _folder.Dispose();

@@ -30,7 +30,7 @@ public class FindingsJsonTests
     public void The_schema_would_find_a_slip()
     {
         var problems = new Problems();
-        var text = Write("garden", evidence: true).Replace("\"worstCase\": null", "\"worstCase\": \"none\"", StringComparison.Ordinal);
+        var text = Write("garden", evidence: true).Replace("\"worstCase\":null", "\"worstCase\":\"none\"", StringComparison.Ordinal);
 
         Findings.Validate(YamlReader.Read(new SourceText("findings.json", text), problems)!, problems);
 
@@ -46,7 +46,7 @@ public class FindingsJsonTests
         Assert.Equal((byte)'{', bytes[0]);
         Assert.EndsWith("}\n", text, StringComparison.Ordinal);
         Assert.DoesNotContain('\r', text);
-        Assert.Contains("\"unit\": \"mm²\"", text, StringComparison.Ordinal);
+        Assert.Contains("\"unit\":\"mm²\"", text, StringComparison.Ordinal);
         Assert.DoesNotContain("\\u", text, StringComparison.Ordinal);
     }
 

@@ -84,7 +84,7 @@ internal sealed class TreeBuilder(YamlEvents events, SourceText source, Problems
     {
         var start = OpenCollection();
         var entries = new List<MappingEntry>();
-        var places = new Dictionary<string, SourceSpan>(StringComparer.Ordinal);
+        var places = new KeyPlaces();
         var partial = false;
         while (events.Current is not MappingEnd)
         {
@@ -94,13 +94,13 @@ internal sealed class TreeBuilder(YamlEvents events, SourceText source, Problems
             {
                 partial = true;
             }
-            else if (places.TryAdd(name.Value, name.Span))
+            else if (places.Add(name) is { } before)
             {
-                entries.Add(new MappingEntry(name, value));
+                problems.Add(ReadingProblems.DuplicateKey(name, before));
             }
             else
             {
-                problems.Add(ReadingProblems.DuplicateKey(name, places[name.Value]));
+                entries.Add(new MappingEntry(name, value));
             }
         }
 

@@ -17,8 +17,14 @@ internal sealed class DepartureReader(RuleSet rules, DateOnly asOf, Problems pro
     /// <param name="findings">What the audit found; a finding that a departure accepts is replaced, by the first that accepts it.</param>
     public IReadOnlyList<Departure> Read(DesignFile file, List<Finding> findings)
     {
+        var stated = file.Root.Mappings("departures").ToArray();
+        if (stated.Length == 0)
+        {
+            return [];
+        }
+
         var byRule = findings.Index().ToLookup(entry => entry.Item.Rule.Id, entry => entry.Index, StringComparer.Ordinal);
-        return [.. file.Root.Mappings("departures").Select(node => Read(node, byRule, findings)).OfType<Departure>()];
+        return [.. stated.Select(node => Read(node, byRule, findings)).OfType<Departure>()];
     }
 
     private Departure? Read(MappingNode node, ILookup<string, int> byRule, List<Finding> findings)

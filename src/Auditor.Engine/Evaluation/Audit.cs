@@ -11,6 +11,9 @@ namespace Auditor.Engine.Evaluation;
 /// <summary>Evaluates every rule on every subject of a design, and on what is on record about the audit.</summary>
 public static class Audit
 {
+    /// <summary>So many subjects are judged by one thread at a stretch.</summary>
+    private const int PartSize = 512;
+
     /// <summary>Runs the audit.</summary>
     /// <param name="design">The design.</param>
     /// <param name="asOf">The day on which departures are judged to be in force.</param>
@@ -19,7 +22,7 @@ public static class Audit
     public static AuditResult Run(Design design, DateOnly asOf, Problems problems, Acceptance? acceptance = null)
     {
         var rules = design.Evaluator.Rules;
-        var findings = Judged(rules, design.Subjects).ToList();
+        var findings = Judged(rules, design.Subjects);
         var decision = acceptance?.Decision ?? GuardedFindings.AskedBy(design);
         findings = GuardedFindings.Complete(design, findings, decision, acceptance ?? new Acceptance());
         DesignSubject[] changes = [.. ChangeSubjects.Of(design)];
@@ -36,10 +39,23 @@ public static class Audit
         };
     }
 
-    private static IEnumerable<Finding> Judged(RuleSet rules, IEnumerable<DesignSubject> subjects) =>
-        from subject in subjects
-        from rule in rules.RulesOf(subject.Shape)
-        let judgement = Judge.Decide(rule, subject.Scope)
-        where judgement.Verdict is not null
-        select new Finding(rule, subject, judgement);
+    private static List<Finding> Judged(RuleSet rules, IReadOnlyList<DesignSubject> subjects) =>
+        [.. InParts.Make(subjects.Count, PartSize, range => JudgedIn(rules, subjects, range)).SelectMany(part => part)];
+
+    private static List<Finding> JudgedIn(RuleSet rules, IReadOnlyList<DesignSubject> subjects, Range range)
+    {
+        var findings = new List<Finding>();
+        for (var i = range.Start.Value; i < range.End.Value; i++)
+        {
+            foreach (var rule in rules.RulesOf(subjects[i].Shape))
+            {
+                if (Judge.Decide(rule, subjects[i].Scope) is { Verdict: not null } judgement)
+                {
+                    findings.Add(new Finding(rule, subjects[i], judgement));
+                }
+            }
+        }
+
+        return findings;
+    }
 }

@@ -26,7 +26,7 @@ public static class Judge
 
         var value = rule.Check.Value.Evaluate(scope);
         var limits = new Value[rule.Check.Limits.Count];
-        var missing = value.IsMissing ? value.Absences : null;
+        var missing = value;
         var marks = when.Marks | value.Marks;
         for (var i = 0; i < limits.Length; i++)
         {
@@ -34,13 +34,13 @@ public static class Judge
             marks |= limits[i].Marks;
             if (limits[i].IsMissing)
             {
-                missing = missing?.And(limits[i].Absences) ?? limits[i].Absences;
+                missing = Value.MissingFrom(missing, limits[i]);
             }
         }
 
-        if (missing is not null)
+        if (missing.IsMissing)
         {
-            return new Judgement(Verdict.Undetermined, value, limits, null, missing, marks);
+            return new Judgement(Verdict.Undetermined, value, limits, null, missing.Absences, marks);
         }
 
         var (keeps, margin) = Compare(rule.Check.How, value, limits);

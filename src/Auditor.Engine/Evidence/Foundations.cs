@@ -3,26 +3,36 @@ using Auditor.Engine.Guarded;
 using Auditor.Engine.Installation;
 using Auditor.Formulas;
 using Auditor.Formulas.Subjects;
-using Auditor.Formulas.Tables;
 using Auditor.Formulas.Values;
 
 namespace Auditor.Engine.Evidence;
 
 /// <summary>
-/// Finds the assumed inputs and the figures from memory that findings rest on. Each quantity is looked into once, whoever asks.
+/// Finds the assumed inputs and the figures from memory that findings rest on. Each quantity is looked into once, whoever asks, and the
+/// same things under many quantities are held once.
 /// </summary>
-/// <param name="result">The audit.</param>
-public sealed class Foundations(AuditResult result)
+public sealed class Foundations
 {
-    private readonly Dictionary<(ISubject, int), HashSet<Foundation>> _known = [];
+    private readonly AuditResult _result;
+    private readonly Func<DesignSubject, QuantitySlot, FoundationSet> _ofQuantity;
+    private readonly FoundationSets _sets = new();
+    private readonly Dictionary<DesignSubject, FoundationSet?[]> _known = [];
+
+    /// <summary>Begins with nothing known.</summary>
+    /// <param name="result">The audit.</param>
+    public Foundations(AuditResult result)
+    {
+        _result = result;
+        _ofQuantity = OfQuantity;
+    }
 
     /// <summary>What a finding rests on, in the order of kind and name.</summary>
     public IReadOnlyList<Foundation> Of(Finding finding)
     {
-        var found = new HashSet<Foundation>();
+        var found = FoundationSet.None;
         if (finding.Verdict == Verdict.Unproven)
         {
-            CollectUncertainties(finding.WorstCase!, found);
+            found = OfUncertainties(finding.WorstCase!);
         }
         else if (finding.Judgement.Marks == Marks.None)
         {
@@ -30,67 +40,46 @@ public sealed class Foundations(AuditResult result)
         }
 
         var check = finding.Rule.Check;
-        foreach (var formula in check.Limits.Prepend(check.Value).Concat(finding.Rule.When is { } when ? [when] : []))
+        found = Add(found, check.Value, finding.Subject);
+        foreach (var limit in check.Limits)
         {
-            Collect(formula, finding.Subject, found);
+            found = Add(found, limit, finding.Subject);
         }
 
-        return [.. found.OrderBy(item => item.Kind).ThenBy(item => item.Subject, StringComparer.Ordinal).ThenBy(item => item.Name, StringComparer.Ordinal)];
+        return (finding.Rule.When is { } when ? Add(found, when, finding.Subject) : found).Items;
     }
 
     /// <summary>What is not proven for the uncertainty of an instrument rests on what that uncertainty rests on.</summary>
-    private void CollectUncertainties(WorstCase worst, HashSet<Foundation> found)
+    private FoundationSet OfUncertainties(WorstCase worst)
     {
+        var found = FoundationSet.None;
         foreach (var (subject, slot) in worst.Corner.Where(value => value.Input.Kind == ToleranceKind.Instrument).Select(value => value.Input.Input))
         {
-            found.UnionWith(OfQuantity(subject, result.Rules.UncertaintyOf(subject.Shape, slot)!.Slot));
+            found = _sets.Union(found, OfQuantity(subject, _result.Rules.UncertaintyOf(subject.Shape, slot)!.Slot));
         }
+
+        return found;
     }
 
-    private void Collect(Formula formula, ISubject subject, HashSet<Foundation> found)
+    private FoundationSet Add(FoundationSet before, Formula formula, DesignSubject subject)
     {
-        var tracer = new Tracer();
-        formula.Evaluate(new Scope(subject, null, tracer));
-        foreach (var reading in tracer.Readings)
-        {
-            Collect(reading, found);
-        }
+        var trace = new FoundationTrace(_result.Rules, _sets, _ofQuantity);
+        formula.Evaluate(new Scope(subject, null, trace));
+        return _sets.Union(before, trace.Found);
     }
 
-    private void Collect(Tracer.Reading reading, HashSet<Foundation> found)
+    private FoundationSet OfQuantity(DesignSubject subject, QuantitySlot slot)
     {
-        if (reading is { Quantity: { } quantity, Subject: { } subject } && reading.Value.Marks != Marks.None)
+        if (!_known.TryGetValue(subject, out var known))
         {
-            found.UnionWith(OfQuantity(subject, quantity));
-        }
-        else if (reading is { Input: { } input, Subject: DesignSubject holder } && reading.Value.Marks.HasFlag(Marks.Assumed))
-        {
-            var source = holder.Source(input)!;
-            found.Add(new Foundation(FoundationKind.AssumedInput, holder.Key, input.Path, source.Text, source.Span));
-        }
-        else if (reading.Parameter is { } slot && reading.Value.Marks != Marks.None)
-        {
-            var parameter = result.Rules.Parameters[slot.Index];
-            found.Add(new Foundation(FoundationKind.FigureFromMemory, null, "param." + slot.Name, parameter.Text, parameter.Span));
-        }
-        else if (reading.Curve is { } curve && reading.Value.Marks != Marks.None)
-        {
-            found.Add(new Foundation(FoundationKind.FigureFromMemory, null, curve.Source.Title, "", null));
+            _known.Add(subject, known = new FoundationSet?[subject.Shape.Quantities.Count]);
         }
 
-        foreach (var cell in reading.Cells.Where(cell => cell.Trust.Mark() != Marks.None))
+        if (known[slot.Index] is not { } found)
         {
-            found.Add(new Foundation(FoundationKind.FigureFromMemory, null, cell.Table.Title, "", null));
-        }
-    }
-
-    private HashSet<Foundation> OfQuantity(ISubject subject, QuantitySlot slot)
-    {
-        if (!_known.TryGetValue((subject, slot.Index), out var found))
-        {
-            found = [];
-            _known.Add((subject, slot.Index), found);
-            Collect(result.Rules.Quantity(subject.Shape, slot.Index).Formula, subject, found);
+            // Until it is known, nothing stands for it: a quantity that needs itself adds nothing to what it rests on.
+            known[slot.Index] = FoundationSet.None;
+            known[slot.Index] = found = Add(FoundationSet.None, _result.Rules.Quantity(subject.Shape, slot.Index).Formula, subject);
         }
 
         return found;

@@ -11,8 +11,6 @@ namespace Auditor.Engine.Findings;
 /// <summary>What one rule says of one subject of a design.</summary>
 public sealed class Finding
 {
-    private string? _message;
-
     internal Finding(Rule rule, DesignSubject subject, Judgement judgement)
     {
         Rule = rule;
@@ -64,7 +62,7 @@ public sealed class Finding
     public string? MarginShown => Judgement.Margin is { } margin ? ValueText.ShowNumber(margin.Absolute, MarginUnit.Of(Rule.Check.Unit!)) : null;
 
     /// <summary>The sentence of the finding.</summary>
-    public string Message => _message ??= SentenceWriter.Write(this);
+    public string Message => SentenceWriter.Write(this);
 
     /// <summary>Whether it is kept as stated, but not in the worst case, and guarded acceptance asks for that.</summary>
     internal bool IsUnproven { get; init; }

@@ -1,4 +1,3 @@
-using System.Text;
 using Auditor.Engine.RuleSets;
 
 namespace Auditor.Engine.Findings;
@@ -8,13 +7,15 @@ internal static class SentenceWriter
 {
     public static string Write(Finding finding)
     {
-        var text = new StringBuilder();
-        foreach (var part in finding.Rule.Says.Parts)
+        var parts = finding.Rule.Says.Parts;
+        var texts = new string[parts.Count + 1];
+        for (var i = 0; i < parts.Count; i++)
         {
-            text.Append(Fill(part, finding));
+            texts[i] = Fill(parts[i], finding);
         }
 
-        return finding.IsUnproven ? text.Append(WithinTolerances(finding)).ToString() : text.ToString();
+        texts[^1] = finding.IsUnproven ? WithinTolerances(finding) : "";
+        return string.Concat(texts);
     }
 
     private static string WithinTolerances(Finding finding)

@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using Auditor.Documents;
 using Auditor.Engine.Evaluation;
 using Auditor.Formulas.Subjects;
@@ -12,6 +13,9 @@ public sealed class Design
 {
     private readonly DesignSchema _schema;
     private readonly MappingNode? _types;
+
+    /// <summary>What texts of quantities say: designs repeat them.</summary>
+    private readonly ConcurrentDictionary<string, StatedQuantity?> _quantities = new(StringComparer.Ordinal);
 
     internal Design(DesignFile file, Evaluator evaluator)
     {
@@ -37,84 +41,77 @@ public sealed class Design
     /// <summary>The subject of that key, or null.</summary>
     public DesignSubject? Find(string key) => Subjects.FirstOrDefault(subject => subject.Key == key);
 
-    /// <summary>The node that gives an input: the subject's own, its named type's, or for a leg its board's default; null for none.</summary>
-    internal Node? Find(DesignSubject subject, InputSlot slot)
+    /// <summary>What the design gives of a subject: in the subject's own mapping, in a named type, or for a leg in its board's defaults.</summary>
+    internal GivenInputs InputsOf(DesignSubject subject)
     {
-        if (_schema.PlaceOf(subject.Shape, slot.Index) is not { } place)
+        var tree = _schema.TreeOf(subject.Shape);
+        var given = new GivenInputs(subject.Shape.Inputs.Count);
+        tree.Own(subject.Node, given);
+        if (_types is not null)
         {
-            return null;
+            tree.Named(subject.Node, _types, given);
         }
 
-        return Walk(subject.Node, place.Keys, 0) ?? InType(subject, place) ?? InDefaults(subject, place);
+        if (subject.Shape == _schema.Shapes.Leg && subject.Parent?.Parent?.Node.Mapping("defaults") is { } defaults)
+        {
+            tree.Own(defaults, given);
+        }
+
+        given.Settle((slot, node) => ValueOf(subject, subject.Shape.Inputs[slot], node));
+        foreach (var slot in _schema.BuiltIn(subject.Shape))
+        {
+            if (BuiltIn(subject, subject.Shape.Inputs[slot]) is { } value)
+            {
+                given.Set(slot, value);
+            }
+        }
+
+        return given;
     }
 
     internal IEnumerable<(MappingNode Holder, string List)> NamedHolders(DesignSubject subject) =>
         _schema.NamedGroups(subject.Shape)
-            .Select(group => (Walk(subject.Node, group.Keys, 0) as MappingNode, group.List))
+            .Select(group => (Walk(subject.Node, group.Keys) as MappingNode, group.List))
             .Where(pair => pair.Item1 is not null)
             .Select(pair => (pair.Item1!, pair.List));
 
-    internal Value ReadInput(DesignSubject subject, InputSlot slot)
+    private Value ValueOf(DesignSubject subject, InputSlot slot, Node node) => (slot.Type.Kind, node) switch
     {
-        var node = Find(subject, slot);
-        return (slot.Type.Kind, node) switch
-        {
-            (_, null) => BuiltIn(subject, slot),
-            (FormulaKind.Group, MappingNode) => Value.Of(true),
-            (FormulaKind.Quantity, ScalarNode scalar) => Number(subject, slot, scalar),
-            (FormulaKind.Text, ScalarNode scalar) => Value.Of(scalar.Text),
-            (FormulaKind.Flag, ScalarNode { Kind: ScalarKind.Flag } scalar) => Value.Of(scalar.Flag),
-            (FormulaKind.Words, SequenceNode list) => Value.Of([.. list.Items.OfType<ScalarNode>().Select(item => item.Text)]),
-            _ => Absent(subject, slot),
-        };
-    }
+        (FormulaKind.Group, MappingNode) => Value.Of(true),
+        (FormulaKind.Quantity, ScalarNode scalar) => Number(subject, slot, scalar),
+        (FormulaKind.Text, ScalarNode scalar) => Value.Of(scalar.Text),
+        (FormulaKind.Flag, ScalarNode { Kind: ScalarKind.Flag } scalar) => Value.Of(scalar.Flag),
+        (FormulaKind.Words, SequenceNode list) => Value.Of([.. list.Items.OfType<ScalarNode>().Select(item => item.Text)]),
+        _ => Value.NotGiven(subject, slot.Index),
+    };
 
-    private static Value Number(DesignSubject subject, InputSlot slot, ScalarNode scalar)
+    private Value Number(DesignSubject subject, InputSlot slot, ScalarNode scalar)
     {
         if (scalar.Kind == ScalarKind.Number && slot.Type.Dimension.IsNone)
         {
             return Value.Of(scalar.Number);
         }
 
-        return QuantityText.TryParse(scalar.Text, out var stated, out _) && stated.Quantity.Dimension == slot.Type.Dimension
+        var stated = _quantities.GetOrAdd(scalar.Text, static text => QuantityText.TryParse(text, out var read, out _) ? read : null);
+        return stated is not null && stated.Quantity.Dimension == slot.Type.Dimension
             ? Value.Of(stated.Quantity.Value, stated.Standing == Standing.Assumed ? Marks.Assumed : Marks.None)
-            : Absent(subject, slot);
+            : Value.NotGiven(subject, slot.Index);
     }
 
-    private static Value BuiltIn(DesignSubject subject, InputSlot slot) => slot.Name switch
+    private static Value? BuiltIn(DesignSubject subject, InputSlot slot) => slot.Name switch
     {
         Shapes.Key => Value.Of(subject.Key),
         Shapes.FeedsBoard => Value.Of(subject.FedBoard is not null),
         Shapes.IsRoot => Value.Of(subject.Parent is { Parent: null }),
-        _ => subject.Told.TryGetValue(slot.Name, out var told) ? told : Absent(subject, slot),
+        _ => subject.Told.TryGetValue(slot.Name, out var told) ? told : null,
     };
 
-    private static Value Absent(DesignSubject subject, InputSlot slot) =>
-        Value.Missing(new Absence(AbsenceKind.Input, subject.Key, slot.Path, $"`{slot.Path}` is not given", ""));
-
-    private Node? InType(DesignSubject subject, InputPlace place)
-    {
-        if (place.Types is null)
-        {
-            return null;
-        }
-
-        var holder = Walk(subject.Node, place.Keys.Take(place.NamedAt).ToList(), 0) as MappingNode;
-        var entry = holder?.Text("type") is { } name ? _types?.Mapping(place.Types)?.Mapping(name) : null;
-        return entry is null ? null : Walk(entry, place.Keys, place.NamedAt);
-    }
-
-    private Node? InDefaults(DesignSubject subject, InputPlace place) =>
-        subject.Shape == _schema.Shapes.Leg && subject.Parent?.Parent?.Node.Mapping("defaults") is { } defaults
-            ? Walk(defaults, place.Keys, 0)
-            : null;
-
-    private static Node? Walk(MappingNode start, IReadOnlyList<string> keys, int from)
+    private static Node? Walk(MappingNode start, IReadOnlyList<string> keys)
     {
         Node? node = start;
-        for (var i = from; i < keys.Count; i++)
+        foreach (var key in keys)
         {
-            node = (node as MappingNode)?.Find(keys[i]);
+            node = (node as MappingNode)?.Find(key);
         }
 
         return node;

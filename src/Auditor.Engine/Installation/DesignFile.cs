@@ -13,9 +13,11 @@ public sealed record DesignFile(string Path, MappingNode Root, IReadOnlyList<Inp
     /// <param name="displayPath">Path to show in problems and reports.</param>
     /// <param name="problems">Receives what is wrong.</param>
     /// <param name="texts">Texts to take for what files hold, by display path; null for none.</param>
-    public static DesignFile? Read(string fullPath, string displayPath, Problems problems, IReadOnlyDictionary<string, string>? texts = null)
+    /// <param name="onTop">Is shown the text of the design before any of it is understood; null for nobody.</param>
+    public static DesignFile? Read(
+        string fullPath, string displayPath, Problems problems, IReadOnlyDictionary<string, string>? texts = null, Action<SourceText>? onTop = null)
     {
-        if (DocumentLoader.Load(fullPath, displayPath, problems, texts: texts) is not { } document)
+        if (DocumentLoader.Load(fullPath, displayPath, problems, texts: texts, onTop: onTop) is not { } document)
         {
             return null;
         }

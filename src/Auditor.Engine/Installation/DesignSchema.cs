@@ -12,6 +12,10 @@ public sealed class DesignSchema
 {
     private readonly Dictionary<SubjectShape, List<InputPlace?>> _places = [];
 
+    private readonly Dictionary<SubjectShape, InputTree> _trees = [];
+
+    private readonly Dictionary<SubjectShape, int[]> _builtIn = [];
+
     private readonly Dictionary<SubjectShape, List<(IReadOnlyList<string> Keys, string List)>> _named = [];
 
     private DesignSchema(Shapes shapes, Schema validation)
@@ -38,6 +42,8 @@ public sealed class DesignSchema
             var places = shape.Inputs.Select(_ => (InputPlace?)null).ToList();
             schema._places.Add(shape, places);
             new SchemaInputs(json.RootElement, shape, places).Read();
+            schema._trees.Add(shape, InputTree.Of(places));
+            schema._builtIn.Add(shape, [.. Enumerable.Range(0, places.Count).Where(slot => places[slot] is null)]);
             schema._named.Add(shape, Groups(places));
         }
 
@@ -49,6 +55,12 @@ public sealed class DesignSchema
 
     /// <summary>Where an input stands in the design file; null for those that the tree itself answers.</summary>
     internal InputPlace? PlaceOf(SubjectShape shape, int slot) => _places[shape][slot];
+
+    /// <summary>The inputs of a kind of subject as a tree of keys.</summary>
+    internal InputTree TreeOf(SubjectShape shape) => _trees[shape];
+
+    /// <summary>Slot numbers of the inputs that the tree of subjects itself answers.</summary>
+    internal IReadOnlyList<int> BuiltIn(SubjectShape shape) => _builtIn[shape];
 
     /// <summary>Between which values an input may lie.</summary>
     public InputBounds BoundsOf(SubjectShape shape, InputSlot slot) => PlaceOf(shape, slot.Index)?.Bounds ?? InputBounds.None;

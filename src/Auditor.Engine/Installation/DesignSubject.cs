@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using Auditor.Documents;
 using Auditor.Engine.Evaluation;
 using Auditor.Formulas.Subjects;
@@ -9,11 +10,10 @@ namespace Auditor.Engine.Installation;
 public sealed class DesignSubject : ISubject
 {
     private readonly Design _design;
+    /// <summary>By slot number; blank until computed.</summary>
     private readonly Value[] _quantities;
-    private readonly bool[] _known;
-    private readonly bool[] _open;
-    private readonly Value[] _inputs;
-    private readonly bool[] _read;
+
+    private GivenInputs? _inputs;
 
     internal DesignSubject(Design design, SubjectShape shape, string key, MappingNode node, Evaluator evaluator)
     {
@@ -24,10 +24,6 @@ public sealed class DesignSubject : ISubject
         Evaluator = evaluator;
         Scope = new Scope(this, null, null);
         _quantities = new Value[shape.Quantities.Count];
-        _known = new bool[shape.Quantities.Count];
-        _open = new bool[shape.Quantities.Count];
-        _inputs = new Value[shape.Inputs.Count];
-        _read = new bool[shape.Inputs.Count];
     }
 
     /// <inheritdoc/>
@@ -53,6 +49,9 @@ public sealed class DesignSubject : ISubject
 
     internal Evaluator Evaluator { get; }
 
+    /// <summary>What the design gives of it; read when it is first asked for, once the tree of subjects stands.</summary>
+    private GivenInputs Inputs => _inputs ??= _design.InputsOf(this);
+
     /// <summary>Place among all subjects of the design.</summary>
     internal int Index { get; init; }
 
@@ -64,55 +63,23 @@ public sealed class DesignSubject : ISubject
     internal List<IReadOnlyList<DesignSubject>> Collections { get; } = [];
 
     /// <summary>What the audit itself knows of a subject on record, by the name of the input; empty for a part of the installation.</summary>
-    internal IReadOnlyDictionary<string, Value> Told { get; init; } = new Dictionary<string, Value>();
+    internal IReadOnlyDictionary<string, Value> Told { get; init; } = ImmutableDictionary<string, Value>.Empty;
 
     /// <inheritdoc/>
-    public Value Input(int slot)
-    {
-        if (!_read[slot])
-        {
-            _inputs[slot] = _design.ReadInput(this, Shape.Inputs[slot]);
-            _read[slot] = true;
-        }
-
-        return _inputs[slot];
-    }
+    public Value Input(int slot) => Inputs.Has(slot) ? Inputs.Value(slot) : Value.NotGiven(this, slot);
 
     /// <inheritdoc/>
+    /// <remarks>Threads may ask for the same quantity at once: they compute the same value, and it does not matter whose is kept.</remarks>
     public Value Quantity(int slot)
     {
-        if (_known[slot])
+        var value = Value.Take(ref _quantities[slot]);
+        if (value.IsBlank)
         {
-            return _quantities[slot];
+            value = Evaluator.Compute(Shape, slot, Scope);
+            Value.Put(ref _quantities[slot], value);
         }
 
-        if (_open[slot])
-        {
-            return InCircle(Key, Shape.Quantities[slot]);
-        }
-
-        _open[slot] = true;
-        _quantities[slot] = Evaluator.Compute(Shape, slot, Scope);
-        _known[slot] = true;
-        return _quantities[slot];
-    }
-
-    /// <summary>What stands for a quantity that turns out to need itself.</summary>
-    internal static Value InCircle(string subject, QuantitySlot slot) =>
-        Value.Missing(new Absence(AbsenceKind.NotFinite, subject, slot.Symbol, "the calculation runs in a circle", ""));
-
-    /// <summary>Reads every input and computes every quantity, so that from then on any number of threads may read this subject.</summary>
-    internal void Settle()
-    {
-        for (var slot = 0; slot < _inputs.Length; slot++)
-        {
-            Input(slot);
-        }
-
-        for (var slot = 0; slot < _quantities.Length; slot++)
-        {
-            Quantity(slot);
-        }
+        return value;
     }
 
     /// <inheritdoc/>
@@ -132,12 +99,9 @@ public sealed class DesignSubject : ISubject
     /// <summary>The mappings of this subject whose <c>type</c> names an entry of <c>types</c>, with the list that it is in.</summary>
     internal IEnumerable<(MappingNode Holder, string List)> NamedHolders() => _design.NamedHolders(this);
 
-    /// <summary>The value in the design file that gives an input, wherever it stands; null when the design does not give it.</summary>
-    public Node? Statement(InputSlot slot) => _design.Find(this, slot);
+    /// <summary>The node that gives an input, wherever it stands: a scalar, a list or a group; null when the design does not give it.</summary>
+    public Node? Statement(InputSlot slot) => Inputs.Node(slot.Index);
 
     /// <summary>The scalar in the design file that gives an input, wherever it stands; null when the design does not give it.</summary>
     public ScalarNode? Source(InputSlot slot) => Statement(slot) as ScalarNode;
-
-    /// <summary>The node that gives an input, wherever it stands: a scalar, a list or a group; null when the design does not give it.</summary>
-    internal Node? Given(InputSlot slot) => _design.Find(this, slot);
 }

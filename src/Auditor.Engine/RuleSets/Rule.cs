@@ -1,10 +1,11 @@
+using System.Runtime.CompilerServices;
 using Auditor.Documents;
 using Auditor.Formulas;
 using Auditor.Formulas.Subjects;
 
 namespace Auditor.Engine.RuleSets;
 
-/// <summary>A rule: when it applies, what it compares, and what it says.</summary>
+/// <summary>A rule: when it applies, what it compares, and what it says. Two are equal only where they are the same.</summary>
 public sealed record Rule
 {
     /// <summary>Stable id; also its file name.</summary>
@@ -51,4 +52,10 @@ public sealed record Rule
 
     /// <summary>Display path of its file.</summary>
     public string Path => Node.Span.Source.Path;
+
+    /// <inheritdoc/>
+    public bool Equals(Rule? other) => ReferenceEquals(this, other);
+
+    /// <inheritdoc/>
+    public override int GetHashCode() => RuntimeHelpers.GetHashCode(this);
 }

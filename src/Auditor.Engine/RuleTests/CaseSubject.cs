@@ -34,7 +34,7 @@ internal sealed class CaseSubject(SubjectShape shape, string key, CaseWorld worl
         {
             Installation.Shapes.Key => Value.Of(Key),
             Installation.Shapes.FeedsBoard => Value.Of(_ways.ContainsKey("fed")),
-            _ => Value.Missing(new Absence(AbsenceKind.Input, Key, input.Path, $"`{input.Path}` is not given", "")),
+            _ => Value.NotGiven(this, slot),
         };
     }
 

@@ -5,8 +5,7 @@ using Auditor.Formulas.Types;
 namespace Auditor.Engine.Variation;
 
 /// <summary>
-/// What depends on what in a design. Making it computes everything of the design once; from then on any number of threads may make
-/// variants of it side by side.
+/// What depends on what in a design. Any number of threads may make variants of it side by side.
 /// </summary>
 public sealed class DependencyMap
 {
@@ -18,11 +17,6 @@ public sealed class DependencyMap
     public DependencyMap(Design design)
     {
         Design = design;
-        foreach (var subject in design.Subjects)
-        {
-            subject.Settle();
-        }
-
         _readers = new SlotReaders(design.Evaluator.Rules);
         _links = new BackLinks(design);
     }

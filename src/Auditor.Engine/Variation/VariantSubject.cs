@@ -58,21 +58,13 @@ internal sealed class VariantSubject : ISubject
             return _base.Quantity(slot);
         }
 
-        // A stamp is the generation in which the quantity was computed, or its negative while that is being done; 0 once it is forgotten.
-        var generation = _variant.Generation;
-        if (_stamps[slot] == generation)
+        // A stamp is the generation in which the quantity was computed; 0 once it is forgotten.
+        if (_stamps[slot] != _variant.Generation)
         {
-            return _quantities[slot];
+            _quantities[slot] = _base.Evaluator.Compute(Shape, slot, Scope);
+            _stamps[slot] = _variant.Generation;
         }
 
-        if (_stamps[slot] == -generation)
-        {
-            return DesignSubject.InCircle(Key, Shape.Quantities[slot]);
-        }
-
-        _stamps[slot] = -generation;
-        _quantities[slot] = _base.Evaluator.Compute(Shape, slot, Scope);
-        _stamps[slot] = generation;
         return _quantities[slot];
     }
 

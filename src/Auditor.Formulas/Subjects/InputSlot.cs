@@ -9,4 +9,8 @@ namespace Auditor.Formulas.Subjects;
 /// <param name="Index">Slot number among the inputs of the subject's shape.</param>
 /// <param name="Type">What it holds.</param>
 /// <param name="Unit">Unit in which people read it; null for anything but a quantity.</param>
-public sealed record InputSlot(string Name, string Path, int Index, FormulaType Type, Unit? Unit);
+public sealed record InputSlot(string Name, string Path, int Index, FormulaType Type, Unit? Unit)
+{
+    /// <summary>What is said where a subject does not give it.</summary>
+    public string WhenNotGiven { get; } = $"`{Path}` is not given";
+}

@@ -1,3 +1,5 @@
+using Auditor.Formulas.Subjects;
+
 namespace Auditor.Formulas.Values;
 
 /// <summary>One thing that is missing, and what to do about it.</summary>
@@ -8,6 +10,15 @@ namespace Auditor.Formulas.Values;
 /// <param name="Help">What to give instead; empty where the name says it all.</param>
 public sealed record Absence(AbsenceKind Kind, string Subject, string Name, string Why, string Help)
 {
+    /// <summary>An input that a subject does not give.</summary>
+    /// <param name="subject">The subject.</param>
+    /// <param name="slot">Slot number of the input.</param>
+    public static Absence OfInput(ISubject subject, int slot)
+    {
+        var input = subject.Shape.Inputs[slot];
+        return new Absence(AbsenceKind.Input, subject.Key, input.Path, input.WhenNotGiven, "");
+    }
+
     /// <summary>The absence as one readable line.</summary>
     public override string ToString()
     {

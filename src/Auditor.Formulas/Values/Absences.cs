@@ -6,33 +6,45 @@ public sealed class Absences
     /// <summary>Beyond this many, further absences of one value are not kept: the list is for a person to act on.</summary>
     public const int Most = 12;
 
-    private readonly Absence[] _items;
+    private readonly Gap[] _gaps;
 
-    private Absences(Absence[] items) => _items = items;
+    internal Absences(Gap gap) => _gaps = [gap];
+
+    private Absences(Gap[] gaps) => _gaps = gaps;
 
     /// <summary>The absences.</summary>
-    public IReadOnlyList<Absence> Items => _items;
+    public IReadOnlyList<Absence> Items => Array.ConvertAll(_gaps, gap => gap.Absence);
+
+    internal ReadOnlySpan<Gap> Gaps => _gaps;
 
     /// <summary>One absence.</summary>
-    public static Absences Of(Absence absence) => new([absence]);
+    public static Absences Of(Absence absence) => new(new Gap(absence, 0));
 
-    /// <summary>Both lists, each absence once.</summary>
-    public Absences And(Absences other)
+    /// <summary>Both lists, each absence once; null where the second adds nothing to the first.</summary>
+    internal static Absences? Joined(ReadOnlySpan<Gap> first, ReadOnlySpan<Gap> second)
     {
-        if (ReferenceEquals(this, other) || _items.Length >= Most)
+        Span<int> added = stackalloc int[Most];
+        var count = 0;
+        for (var i = 0; i < second.Length && first.Length + count < Most; i++)
         {
-            return this;
-        }
-
-        var joined = new List<Absence>(_items);
-        foreach (var absence in other._items)
-        {
-            if (joined.Count < Most && !joined.Contains(absence))
+            if (!first.Contains(second[i]))
             {
-                joined.Add(absence);
+                added[count++] = i;
             }
         }
 
-        return joined.Count == _items.Length ? this : new Absences([.. joined]);
+        if (count == 0)
+        {
+            return null;
+        }
+
+        var gaps = new Gap[first.Length + count];
+        first.CopyTo(gaps);
+        for (var i = 0; i < count; i++)
+        {
+            gaps[first.Length + i] = second[added[i]];
+        }
+
+        return new Absences(gaps);
     }
 }

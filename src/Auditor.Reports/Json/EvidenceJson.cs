@@ -34,7 +34,7 @@ internal static class EvidenceJson
     {
         foreach (var input in StatedInput.Of(subject))
         {
-            output.Object(input.Slot.Path, () =>
+            output.Record(input.Slot.Path, () =>
             {
                 output.Text("text", input.Text);
                 output.Text("standing", StandingWord(input.Standing));
@@ -59,7 +59,7 @@ internal static class EvidenceJson
             var definition = rules.Quantity(subject.Shape, slot.Index);
             var value = subject.Quantity(slot.Index);
             var derivation = evidence.Of(subject, slot);
-            output.Object(slot.Symbol, () =>
+            output.Record(slot.Symbol, () =>
             {
                 output.Text("name", definition.Name);
                 output.Value("value", value, slot.Unit);

@@ -12,13 +12,19 @@ internal static class FindingsCheck
         EachOnce(root.Mapping("ruleSet")!.Mappings("parameters"), "name", "parameter", problems);
         EachOnce(root.Mappings("findings"), "key", "finding", problems);
         var subjects = EachOnce(root.Mappings("subjects"), "key", "subject", problems);
+        var rules = EachOnce(root.Mappings("rules"), "id", "rule", problems);
         foreach (var finding in root.Mappings("findings"))
         {
-            var subject = finding.Scalar("subject")!;
-            if (!subjects.Contains(subject.Text))
-            {
-                problems.Add(FindingsMessages.UnknownSubject(subject.Span, subject.Text));
-            }
+            Listed(finding.Scalar("subject")!, subjects, "subject", problems);
+            Listed(finding.Scalar("rule")!, rules, "rule", problems);
+        }
+    }
+
+    private static void Listed(ScalarNode name, HashSet<string> known, string what, Problems problems)
+    {
+        if (!known.Contains(name.Text))
+        {
+            problems.Add(FindingsMessages.NotListed(name.Span, what, name.Text));
         }
     }
 

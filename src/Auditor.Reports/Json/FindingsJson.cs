@@ -19,12 +19,12 @@ public static class FindingsJson
     {
         using (var output = new JsonOutput(stream, new Places(result.Design.File)))
         {
-            var supports = new Supports(result);
             output.Object(null, () =>
             {
                 HeadJson.Write(output, result);
-                FindingJson.Write(output, result, supports);
-                TailJson.Write(output, result, register, supports);
+                FindingJson.Rules(output, result);
+                FindingJson.Write(output, result);
+                TailJson.Write(output, result, register);
                 if (options.AllEvidence)
                 {
                     EvidenceJson.Write(output, result);

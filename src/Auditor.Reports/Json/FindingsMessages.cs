@@ -10,6 +10,6 @@ internal static class FindingsMessages
     public static Problem ListedTwice(SourceSpan span, string what, string name) => Problem.Error(
         "findings-listed-twice", $"this file lists the {what} {ProblemText.Quote(name)} a second time", span, Help);
 
-    public static Problem UnknownSubject(SourceSpan span, string subject) => Problem.Error(
-        "findings-unknown-subject", $"this file does not list the subject {ProblemText.Quote(subject)}", span, Help);
+    public static Problem NotListed(SourceSpan span, string what, string name) => Problem.Error(
+        "findings-not-listed", $"this file does not list the {what} {ProblemText.Quote(name)}", span, Help);
 }

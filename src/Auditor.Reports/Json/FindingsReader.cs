@@ -12,6 +12,7 @@ namespace Auditor.Reports.Json;
 internal sealed class FindingsReader(string name, MappingNode root)
 {
     private readonly MappingNode? _stated = root.Mapping("stated");
+    private readonly Dictionary<string, MappingNode> _rules = root.Mappings("rules").ToDictionary(rule => rule.Text("id")!, StringComparer.Ordinal);
 
     public Revision Read() => new()
     {
@@ -27,7 +28,7 @@ internal sealed class FindingsReader(string name, MappingNode root)
     private RevisionRules Rules(MappingNode set)
     {
         var parameters = set.Mappings("parameters").Select(node => new RevisionParameter(node.Text("name")!, "", Figure(node)!));
-        var applied = root.Mappings("findings").Select(finding => (Id: finding.Text("rule")!, Title: finding.Text("title")!));
+        var applied = _rules.Select(rule => (Id: rule.Key, Title: rule.Value.Text("title")!));
         var rules = applied.Concat(root.Texts("neverApplied").Select(id => (Id: id, Title: "")))
             .DistinctBy(rule => rule.Id).OrderBy(rule => rule.Id, StringComparer.Ordinal)
             .Select(rule => new RevisionRule(rule.Id, rule.Title, []));
@@ -46,25 +47,27 @@ internal sealed class FindingsReader(string name, MappingNode root)
         return new RevisionInput(entry.Key.Value, node.Text("text")!, node.Text("from")!, null, PlaceOf(node));
     }
 
-    private static RevisionFinding Finding(MappingNode node)
+    private RevisionFinding Finding(MappingNode node)
     {
         var limit = node.Mapping("limit");
-        var margin = node.Mapping("margin")!;
+        var margin = node.Mapping("margin");
+        var rule = _rules[node.Text("rule")!];
         var limits = limit is null ? [] : Limits(limit);
+        double? distance = margin is not null && Number(margin, "absolute") is { } number ? UnitOf(margin).ToCoherent(number) : null;
         return new RevisionFinding
         {
             Rule = node.Text("rule")!,
-            Title = node.Text("title")!,
+            Title = rule.Text("title")!,
             Subject = node.Text("subject")!,
             Verdict = VerdictWords.Find(node.Text("verdict")!)!.Value,
             OnAssumption = node.Scalar("onAssumption")!.Flag,
-            IsRequirement = node.Text("provision") == "requirement",
+            IsRequirement = rule.Text("provision") == "requirement",
             Value = node.Mapping("value") is { } value ? Figure(value) : null,
             Limits = limits,
             LimitShown = limit is null ? "" : LimitText.Show(Relation(limit.Text("relation")!), [.. limits.Select(figure => figure.Text)]),
-            RelativeMargin = Number(margin, "relative"),
-            AbsoluteMargin = Number(margin, "absolute") is { } distance ? UnitOf(margin).ToCoherent(distance) : null,
-            MarginShown = Number(margin, "absolute") is { } shown ? ValueText.ShowNumber(UnitOf(margin).ToCoherent(shown), UnitOf(margin)) : "",
+            RelativeMargin = margin is null ? null : Number(margin, "relative"),
+            AbsoluteMargin = distance,
+            MarginShown = distance is { } shown ? ValueText.ShowNumber(shown, UnitOf(margin!)) : "",
             Message = node.Text("message")!,
             Missing = [.. node.Mappings("missing").Select(gap => gap.Text("name")!).Distinct(StringComparer.Ordinal)],
             Place = PlaceOf(node),

@@ -10,7 +10,7 @@ namespace Auditor.Reports.Json;
 internal static class HeadJson
 {
     /// <summary>Version of the findings format.</summary>
-    private const int Format = 1;
+    private const int Format = 2;
 
     public static void Write(JsonOutput output, AuditResult result)
     {
@@ -20,7 +20,7 @@ internal static class HeadJson
         Basis(output, result);
         output.Object("ruleSet", () => RuleSet(output, result.Rules));
         Counts(output, result);
-        output.Array("subjects", result.Subjects, subject => output.Object(null, () => Subject(output, subject)));
+        output.Records("subjects", result.Subjects, subject => Subject(output, subject));
     }
 
     private static void Project(JsonOutput output, Design design) => output.Object("project", () =>
@@ -45,7 +45,7 @@ internal static class HeadJson
         output.TextOrNull("edition", rules.Title.Edition);
         output.TextOrNull("notice", rules.Title.Notice);
         output.Text("sha256", rules.Title.Sha256);
-        output.Array("parameters", rules.Parameters, parameter => output.Object(null, () =>
+        output.Records("parameters", rules.Parameters, parameter =>
         {
             output.Text("name", parameter.Id);
             output.Value("value", parameter.Value, parameter.Slot.Unit);
@@ -54,7 +54,7 @@ internal static class HeadJson
             output.TextOrNull("source", parameter.Source);
             output.Text("trust", parameter.Trust?.Word());
             output.Text("file", parameter.Span.Source.Path);
-        }));
+        });
     }
 
     private static void Counts(JsonOutput output, AuditResult result) => output.Object("counts", () =>

@@ -8,25 +8,25 @@ namespace Auditor.Reports.Json;
 /// <summary>Writes what a findings file says after its findings: what they rest on, what was accepted, what was not looked at.</summary>
 internal static class TailJson
 {
-    public static void Write(JsonOutput output, AuditResult result, Register register, Supports supports)
+    public static void Write(JsonOutput output, AuditResult result, Register register)
     {
-        output.Array("assumptions", supports.Assumed, assumed => output.Object(null, () =>
+        output.Records("assumptions", new Supports(result).Assumed, assumed =>
         {
             output.Text("subject", assumed.Input.Subject.Key);
             output.Text("input", assumed.Input.Slot.Path);
             output.Text("text", assumed.Input.Text);
             output.Texts("findings", assumed.Findings);
             output.Location(assumed.Input.Span);
-        }));
-        output.Array("departures", result.Departures, departure => output.Object(null, () => Departure(output, departure)));
+        });
+        output.Records("departures", result.Departures, departure => Departure(output, departure));
         output.Texts("neverApplied", result.NotApplied.Select(rule => rule.Id));
-        output.Array("notCovered", register.NotCovered(result.Rules), row => output.Object(null, () =>
+        output.Records("notCovered", register.NotCovered(result.Rules), row =>
         {
             output.Text("id", row.Id);
             output.Text("part", row.Part);
             output.Text("requirement", row.Requirement);
             output.Text("decidable", row.Decidable);
-        }));
+        });
     }
 
     private static void Departure(JsonOutput output, Departure departure)

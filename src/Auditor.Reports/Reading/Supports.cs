@@ -9,30 +9,48 @@ namespace Auditor.Reports.Reading;
 /// <summary>What the findings of an audit rest on that a reader should know to be less than certain.</summary>
 internal sealed class Supports
 {
-    private readonly Dictionary<Finding, IReadOnlyList<Foundation>> _ofFinding;
+    private readonly Foundations _foundations;
+    private readonly Lazy<IReadOnlyList<AssumedInput>> _assumed;
+    private readonly Lazy<IReadOnlyList<(string Name, string Text, IReadOnlyList<string> Findings)>> _memory;
 
     public Supports(AuditResult result)
     {
-        var foundations = new Foundations(result);
-        _ofFinding = result.Findings.ToDictionary(finding => finding, foundations.Of);
-        var users = result.Findings
-            .SelectMany(finding => _ofFinding[finding].Select(foundation => (foundation, finding.Key)))
-            .ToLookup(pair => (pair.foundation.Kind, pair.foundation.Subject, pair.foundation.Name, pair.foundation.Text), pair => pair.Key);
-        Assumed = [.. result.Design.Subjects.SelectMany(StatedInput.Of).Where(IsAssumed)
-            .Select(input => new AssumedInput(input, [.. users[(FoundationKind.AssumedInput, input.Subject.Key, input.Slot.Path, input.Text)]]))];
-        Memory = [.. users.Where(group => group.Key.Kind == FoundationKind.FigureFromMemory)
-            .OrderBy(group => group.Key.Name, StringComparer.Ordinal).ThenBy(group => group.Key.Text, StringComparer.Ordinal)
-            .Select(group => (group.Key.Name, group.Key.Text, (IReadOnlyList<string>)[.. group]))];
+        _foundations = new Foundations(result);
+        _assumed = new(() => AssumedIn(result));
+        _memory = new(() =>
+        [
+            .. Users(result, FoundationKind.FigureFromMemory)
+                .OrderBy(group => group.Key.Name, StringComparer.Ordinal).ThenBy(group => group.Key.Text, StringComparer.Ordinal)
+                .Select(group => (group.Key.Name, group.Key.Text, (IReadOnlyList<string>)[.. group])),
+        ]);
     }
 
     /// <summary>Inputs marked as assumed, in the order of the design, with the keys of the findings that hang on each.</summary>
-    public IReadOnlyList<AssumedInput> Assumed { get; }
+    public IReadOnlyList<AssumedInput> Assumed => _assumed.Value;
 
     /// <summary>Figures from memory, by name, with the keys of the findings that rest on each.</summary>
-    public IReadOnlyList<(string Name, string Text, IReadOnlyList<string> Findings)> Memory { get; }
+    public IReadOnlyList<(string Name, string Text, IReadOnlyList<string> Findings)> Memory => _memory.Value;
 
     /// <summary>What one finding rests on.</summary>
-    public IReadOnlyList<Foundation> Of(Finding finding) => _ofFinding[finding];
+    public IReadOnlyList<Foundation> Of(Finding finding) => _foundations.Of(finding);
+
+    private IReadOnlyList<AssumedInput> AssumedIn(AuditResult result)
+    {
+        var inputs = result.Design.Subjects.SelectMany(StatedInput.Of).Where(IsAssumed).ToArray();
+        if (inputs.Length == 0)
+        {
+            return [];
+        }
+
+        var users = Users(result, FoundationKind.AssumedInput);
+        return [.. inputs.Select(input => new AssumedInput(input, [.. users[(input.Subject.Key, input.Slot.Path, input.Text)]]))];
+    }
+
+    /// <summary>The keys of the findings that rest on each foundation of a kind.</summary>
+    private ILookup<(string? Subject, string Name, string Text), string> Users(AuditResult result, FoundationKind kind) =>
+        result.Findings
+            .SelectMany(finding => Of(finding).Where(foundation => foundation.Kind == kind).Select(foundation => (foundation, finding.Key)))
+            .ToLookup(pair => (pair.foundation.Subject, pair.foundation.Name, pair.foundation.Text), pair => pair.Key);
 
     private static bool IsAssumed(StatedInput input) =>
         input.Slot.Type.Kind == FormulaKind.Quantity && input.Subject.Input(input.Slot.Index).Marks.HasFlag(Marks.Assumed);

@@ -9,11 +9,13 @@ namespace Auditor.Engine.Installation;
 public sealed class DesignSubject : ISubject
 {
     private readonly Design _design;
-    private readonly Value[] _quantities;
-    private readonly bool[] _known;
-    private readonly bool[] _open;
-    private readonly Value[] _inputs;
-    private readonly bool[] _read;
+
+    // Made when the first value is asked for: a design with faults, or one that is only imported, is never evaluated.
+    private Value[] _quantities = [];
+    private bool[] _known = [];
+    private bool[] _open = [];
+    private Value[] _inputs = [];
+    private bool[] _read = [];
 
     internal DesignSubject(Design design, SubjectShape shape, string key, MappingNode node, Evaluator evaluator)
     {
@@ -23,11 +25,6 @@ public sealed class DesignSubject : ISubject
         Node = node;
         Evaluator = evaluator;
         Scope = new Scope(this, null, null);
-        _quantities = new Value[shape.Quantities.Count];
-        _known = new bool[shape.Quantities.Count];
-        _open = new bool[shape.Quantities.Count];
-        _inputs = new Value[shape.Inputs.Count];
-        _read = new bool[shape.Inputs.Count];
     }
 
     /// <inheritdoc/>
@@ -69,6 +66,12 @@ public sealed class DesignSubject : ISubject
     /// <inheritdoc/>
     public Value Input(int slot)
     {
+        if (slot >= _read.Length)
+        {
+            _inputs = new Value[Shape.Inputs.Count];
+            _read = new bool[Shape.Inputs.Count];
+        }
+
         if (!_read[slot])
         {
             _inputs[slot] = _design.ReadInput(this, Shape.Inputs[slot]);
@@ -81,6 +84,13 @@ public sealed class DesignSubject : ISubject
     /// <inheritdoc/>
     public Value Quantity(int slot)
     {
+        if (slot >= _known.Length)
+        {
+            _quantities = new Value[Shape.Quantities.Count];
+            _known = new bool[Shape.Quantities.Count];
+            _open = new bool[Shape.Quantities.Count];
+        }
+
         if (_known[slot])
         {
             return _quantities[slot];
@@ -104,12 +114,12 @@ public sealed class DesignSubject : ISubject
     /// <summary>Reads every input and computes every quantity, so that from then on any number of threads may read this subject.</summary>
     internal void Settle()
     {
-        for (var slot = 0; slot < _inputs.Length; slot++)
+        for (var slot = 0; slot < Shape.Inputs.Count; slot++)
         {
             Input(slot);
         }
 
-        for (var slot = 0; slot < _quantities.Length; slot++)
+        for (var slot = 0; slot < Shape.Quantities.Count; slot++)
         {
             Quantity(slot);
         }

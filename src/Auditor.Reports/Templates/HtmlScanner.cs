@@ -13,6 +13,9 @@ internal sealed class HtmlScanner
         ["href", "xlink:href", "src", "srcset", "action", "formaction", "data", "poster", "cite", "background", "ping", "manifest", "longdesc", "usemap"],
         StringComparer.OrdinalIgnoreCase);
 
+    /// <summary>Longer than every name that matters: what follows in a longer one tells nothing.</summary>
+    private const int LongestName = 32;
+
     private string _element = "";
     private string _attribute = "";
     private string _word = "";
@@ -98,7 +101,7 @@ internal sealed class HtmlScanner
             return EndTag();
         }
 
-        _element += c;
+        _element = Grown(_element, c);
         return HtmlPlace.TagName;
     }
 
@@ -125,7 +128,7 @@ internal sealed class HtmlScanner
             return InTag(c);
         }
 
-        _attribute += char.IsWhiteSpace(c) ? "" : c;
+        _attribute = char.IsWhiteSpace(c) ? _attribute : Grown(_attribute, c);
         return HtmlPlace.AttributeName;
     }
 
@@ -162,7 +165,7 @@ internal sealed class HtmlScanner
 
     private HtmlPlace Declaration(char c)
     {
-        _word += c;
+        _word = Grown(_word, c);
         if (_word == "--")
         {
             _word = "";
@@ -190,6 +193,8 @@ internal sealed class HtmlScanner
 
         return _word.Equals(end, StringComparison.OrdinalIgnoreCase) ? HtmlPlace.Text : here;
     }
+
+    private static string Grown(string name, char c) => name.Length < LongestName ? name + c : name;
 
     /// <summary>
     /// Whether the value of this attribute may hold a text: none that a browser runs or takes for style, none that sets a policy, and

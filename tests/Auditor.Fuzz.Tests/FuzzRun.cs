@@ -17,6 +17,9 @@ internal sealed class FuzzRun(string name, FuzzKind kind, int count, int seed)
     /// <summary>No input may take more by the clock: one that waits takes no time of the processor.</summary>
     private static readonly TimeSpan LongestWait = TimeSpan.FromMinutes(5);
 
+    /// <summary>An input that takes more is kept in a file, for somebody to look at.</summary>
+    private static readonly TimeSpan Slow = TimeSpan.FromSeconds(1);
+
     private static readonly TimeSpan BetweenLooks = TimeSpan.FromMilliseconds(200);
 
     private readonly string _keep = Path.Combine(Path.GetTempPath(), $"auditor-fuzz-{name.Replace(' ', '-')}-{seed}");
@@ -80,6 +83,11 @@ internal sealed class FuzzRun(string name, FuzzKind kind, int count, int seed)
             }
 
             var time = Environment.CpuUsage.TotalTime - _began.Processor;
+            if (time > Slow)
+            {
+                File.WriteAllBytes($"{_keep}-{i}-slow.bin", input);
+            }
+
             _slowest = time > _slowest.Time ? (time, i) : _slowest;
         }
     }

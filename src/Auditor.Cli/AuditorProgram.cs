@@ -1,5 +1,6 @@
 using System.CommandLine;
 using Auditor.Cli.Commands;
+using Auditor.Documents;
 
 namespace Auditor.Cli;
 
@@ -35,6 +36,21 @@ internal static class AuditorProgram
             verbose,
         };
         HelpWithExamples.AddTo(root);
+        try
+        {
+            return Run(root, args, output, error);
+        }
+        catch (LostOutputException lost)
+        {
+            var problems = new Problems();
+            problems.Add(CommandMessages.OutputLost(lost.Message));
+            terminal.Tell(problems);
+            return ExitCode.Problems;
+        }
+    }
+
+    private static int Run(RootCommand root, string[] args, TextWriter output, TextWriter error)
+    {
         var parsed = root.Parse(args);
         if (parsed.Errors.Count > 0 && parsed.Action is not HelpWithExamples)
         {

@@ -25,6 +25,29 @@ public sealed class SourceReaderTests : IDisposable
     }
 
     [Fact]
+    public void A_file_behind_links_is_read_whole()
+    {
+        _folder.Write("there/a.yaml", "far more than the few letters of the links");
+        _folder.Link("b", "there/a.yaml");
+        _folder.Link("c", "b");
+
+        Assert.Equal("far more than the few letters of the links", SourceReader.Read(Path.Combine(_folder.Path, "c"), "c", _problems)!.Text);
+        Assert.Empty(_problems.All);
+    }
+
+    [Fact]
+    public void Links_that_go_round_or_lead_nowhere_are_a_problem()
+    {
+        _folder.Link("a", "b");
+        _folder.Link("b", "a");
+        _folder.Link("c", "nowhere");
+
+        Assert.Null(SourceReader.Read(Path.Combine(_folder.Path, "a"), "a", _problems));
+        Assert.Null(SourceReader.Read(Path.Combine(_folder.Path, "c"), "c", _problems));
+        Assert.Equal(["file-unreadable", "file-missing"], _problems.Codes());
+    }
+
+    [Fact]
     public void A_folder_is_a_problem()
     {
         Assert.Null(SourceReader.Read(_folder.Path, "plans", _problems));

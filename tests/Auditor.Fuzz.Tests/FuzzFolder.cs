@@ -23,5 +23,13 @@ internal sealed class FuzzFolder : IDisposable
 
     public string File(string name) => System.IO.Path.GetFullPath(System.IO.Path.Combine(Path, name));
 
+    /// <summary>Writes a file, over what is there.</summary>
+    /// <returns>Its full path.</returns>
+    public string Write(string name, byte[] content)
+    {
+        System.IO.File.WriteAllBytes(File(name), content);
+        return File(name);
+    }
+
     public void Dispose() => Directory.Delete(Path, recursive: true);
 }

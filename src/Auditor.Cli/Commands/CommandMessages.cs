@@ -5,6 +5,10 @@ namespace Auditor.Cli.Commands;
 /// <summary>All wordings about arguments of the command line.</summary>
 internal static class CommandMessages
 {
+    public static Problem OutputLost(string reason) => Problem.Error(
+        "output-lost", $"standard output cannot be written: {reason.TrimEnd('.').ToLowerInvariant()}", null,
+        "nothing that was printed counts as whole; make room where it goes, or send it elsewhere");
+
     public static Problem NoDesigns(string folder) => Problem.Error(
         "no-designs", $"there is no design file below `{folder}`", null, "design files are called `*.design.yaml`");
 

@@ -80,7 +80,8 @@ internal static class ImportCommand
         return terminal.Tell(problems) ? ExitCode.Problems : ExitCode.Clean;
     }
 
-    private static string? Text(SourceText source, RuleSet rules, IReadOnlyList<MappingEntry> supply, Problems problems)
+    /// <summary>The text of the design file that a circuit list makes; null, with problems added, when it makes none.</summary>
+    internal static string? Text(SourceText source, RuleSet rules, IReadOnlyList<MappingEntry> supply, Problems problems)
     {
         if (CircuitList.Read(source, CircuitColumns.Of(rules.Schema.Shapes), problems) is not { } list || supply.Count == 0)
         {

@@ -54,10 +54,17 @@ internal sealed record CircuitList(CsvTable Table, IReadOnlyList<CircuitColumn?>
     private void CheckHeader(IReadOnlyList<CircuitColumn> known, Problems problems)
     {
         var first = new Dictionary<string, CsvCell>();
+        var unknown = 0;
         foreach (var cell in Table.Header)
         {
             if (Columns[cell.Column] is null)
             {
+                // Looking for what was meant takes time, and of more than so many nothing is shown.
+                if (++unknown > Problems.PerFile + 1)
+                {
+                    continue;
+                }
+
                 var nearest = NearestWord.Find(cell.Text, known.Select(column => column.Name));
                 problems.Add(ImportMessages.UnknownColumn(cell, nearest, isAlone: Table.Header.Count == 1));
             }

@@ -23,9 +23,9 @@ internal sealed class GitRevision(Git git, string commit)
             return null;
         }
 
-        return git.Read("rev-parse", "--verify", "--quiet", "--end-of-options", revision + "^{commit}") is { } id
-            ? new GitRevision(git, id.TrimEnd('\n'))
-            : null;
+        // What excludes a revision is answered as such, with a sign before the id.
+        var id = git.Read("rev-parse", "--verify", "--quiet", "--end-of-options", revision + "^{commit}")?.TrimEnd('\n');
+        return id?.All(char.IsAsciiHexDigit) == true ? new GitRevision(git, id) : null;
     }
 
     /// <summary>

@@ -1,4 +1,5 @@
 using Auditor.Documents;
+using Auditor.Reports.Files;
 
 namespace Auditor.Cli.Revisions;
 
@@ -11,7 +12,11 @@ internal sealed class RevisionTree : IDisposable
     /// <summary>More bytes than that are no design and its rules.</summary>
     private const long MostBytes = 256L * 1024 * 1024;
 
-    private RevisionTree(string folder) => Folder = folder;
+    private RevisionTree(string folder)
+    {
+        Folder = folder;
+        Leftovers.Expect(folder);
+    }
 
     /// <summary>Full path of the folder.</summary>
     public string Folder { get; }
@@ -50,11 +55,7 @@ internal sealed class RevisionTree : IDisposable
 
     public void Dispose()
     {
-        try
-        {
-            Directory.Delete(Folder, recursive: true);
-        }
-        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
+        if (!Leftovers.Remove(Folder))
         {
             Serilog.Log.Warning("The temporary folder of a revision could not be removed");
         }

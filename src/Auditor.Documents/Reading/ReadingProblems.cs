@@ -4,7 +4,7 @@ namespace Auditor.Documents;
 internal static class ReadingProblems
 {
     public static Problem Empty(SourceText source)
-        => Problem.Error("empty-file", "the file says nothing", new SourceSpan(source, 0, 0), "a document with at least one `key: value` line is expected");
+        => Problem.Error("empty-file", "the file says nothing", new SourceSpan(source, 0, 0), "a document with at least one `key: value` line is expected; pipes and devices are not read");
 
     public static Problem ForbiddenCharacter(SourceSpan span)
         => Problem.Error("forbidden-character", $"the character U+{(int)span.Source.Text[span.Start]:X4} has no place in a text file", span,

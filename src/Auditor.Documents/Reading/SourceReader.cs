@@ -40,7 +40,7 @@ public static class SourceReader
                 return null;
             }
 
-            var bytes = ReadBytes(new FileInfo(fullPath), budget);
+            var bytes = ReadBytes(FileAt(fullPath), budget);
             if (bytes is null)
             {
                 problems.Add(FileProblems.TooLarge(nowhere, budget.Limits.Bytes));
@@ -61,6 +61,13 @@ public static class SourceReader
         }
 
         return null;
+    }
+
+    /// <summary>The file itself, at the end of all links: the length of a link is that of the path in it.</summary>
+    private static FileInfo FileAt(string fullPath)
+    {
+        var file = new FileInfo(fullPath);
+        return file.ResolveLinkTarget(returnFinalTarget: true) as FileInfo ?? file;
     }
 
     /// <summary>Reads all bytes, or returns null when there are more than allowed.</summary>

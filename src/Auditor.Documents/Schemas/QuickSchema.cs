@@ -161,7 +161,8 @@ internal sealed class QuickSchema
         return result;
     }
 
-    private Acceptance Look(MappingEntry entry)
+    /// <summary>Looks at an entry of a mapping.</summary>
+    public Acceptance Look(MappingEntry entry)
     {
         if (Properties.TryGetValue(entry.Key.Value, out var property))
         {

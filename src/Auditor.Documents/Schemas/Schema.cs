@@ -50,7 +50,7 @@ public sealed class Schema
     {
         if (Look(root) != Acceptance.Yes)
         {
-            Explain(root, problems);
+            Explain(RefusedParts.Of(root, _quick), problems);
         }
     }
 

@@ -10,9 +10,8 @@ namespace Auditor.Engine.Installation;
 public sealed class DesignSubject : ISubject
 {
     private readonly Design _design;
-    /// <summary>By slot number; blank until computed.</summary>
-    private readonly Value[] _quantities;
-
+    /// <summary>By slot number, blank until computed; null until one is asked for: a design with faults, or one that is only imported, is never evaluated.</summary>
+    private Value[]? _quantities;
     private GivenInputs? _inputs;
 
     internal DesignSubject(Design design, SubjectShape shape, string key, MappingNode node, Evaluator evaluator)
@@ -23,7 +22,6 @@ public sealed class DesignSubject : ISubject
         Node = node;
         Evaluator = evaluator;
         Scope = new Scope(this, null, null);
-        _quantities = new Value[shape.Quantities.Count];
     }
 
     /// <inheritdoc/>
@@ -72,11 +70,12 @@ public sealed class DesignSubject : ISubject
     /// <remarks>Threads may ask for the same quantity at once: they compute the same value, and it does not matter whose is kept.</remarks>
     public Value Quantity(int slot)
     {
-        var value = Value.Take(ref _quantities[slot]);
+        var values = _quantities ?? Interlocked.CompareExchange(ref _quantities, new Value[Shape.Quantities.Count], null) ?? _quantities;
+        var value = Value.Take(ref values[slot]);
         if (value.IsBlank)
         {
             value = Evaluator.Compute(Shape, slot, Scope);
-            Value.Put(ref _quantities[slot], value);
+            Value.Put(ref values[slot], value);
         }
 
         return value;

@@ -13,7 +13,7 @@ public sealed record Register(IReadOnlyList<RegisterRow> Rows)
     public static Register Load(RuleHome home, Problems problems)
     {
         var folder = Path.Combine(home.Folder, "register");
-        var schema = Schema.Parse(new SourceText(home.Display + "/schema/register.schema.json", File.ReadAllText(home.SchemaPath("register"))));
+        var schema = home.Schema("register");
         var rows = new List<RegisterRow>();
         foreach (var file in Directory.EnumerateFiles(folder, "*.yaml").Order(StringComparer.Ordinal))
         {

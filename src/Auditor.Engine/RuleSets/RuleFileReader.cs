@@ -1,4 +1,3 @@
-using System.Collections.Concurrent;
 using System.Security.Cryptography;
 using System.Text;
 using Auditor.Documents;
@@ -22,8 +21,6 @@ internal sealed class RuleFileReader(RuleHome home, Problems problems, PreparedR
         ["picture"] = "picture",
         ["set"] = "set",
     };
-
-    private readonly ConcurrentDictionary<string, Lazy<Schema>> _schemas = [];
 
     /// <summary>Reads many files, side by side; the result keeps their order. Files with problems are left out.</summary>
     public IReadOnlyList<RuleFile> Read(IReadOnlyList<(string Full, string Display)> paths)
@@ -75,15 +72,7 @@ internal sealed class RuleFileReader(RuleHome home, Problems problems, PreparedR
             return null;
         }
 
-        SchemaFor(schema).Validate(root, own);
+        home.Schema(schema).Validate(root, own);
         return new RuleFile(first.Key.Value, root, sha256);
-    }
-
-    private Schema SchemaFor(string name) => _schemas.GetOrAdd(name, key => new Lazy<Schema>(() => Load(key))).Value;
-
-    private Schema Load(string name)
-    {
-        var path = home.SchemaPath(name);
-        return Schema.Parse(new SourceText($"{home.Display}/schema/{name}.schema.json", File.ReadAllText(path)));
     }
 }

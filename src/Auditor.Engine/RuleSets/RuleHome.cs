@@ -1,3 +1,6 @@
+using System.Collections.Concurrent;
+using Auditor.Documents;
+
 namespace Auditor.Engine.RuleSets;
 
 /// <summary>Where the shipped rule data stand.</summary>
@@ -5,6 +8,12 @@ namespace Auditor.Engine.RuleSets;
 /// <param name="Display">How its files are shown, such as <c>rules</c>.</param>
 public sealed record RuleHome(string Folder, string Display)
 {
+    private static readonly ConcurrentDictionary<string, Lazy<Schema>> Schemas = new(StringComparer.Ordinal);
+
+    /// <summary>A schema of files of rule data or of findings, read once for all files that are held against it.</summary>
+    /// <exception cref="InvalidDataException">It is no schema; the message says where.</exception>
+    public Schema Schema(string name) => Schemas.GetOrAdd(SchemaPath(name), path => new(() => ReadSchema(name, path))).Value;
+
     /// <summary>Full path of a schema.</summary>
     public string SchemaPath(string name) => Path.Combine(Folder, "schema", name + ".schema.json");
 
@@ -24,4 +33,6 @@ public sealed record RuleHome(string Folder, string Display)
         Directory.Exists(Path.Combine(Folder, "sets"))
             ? [.. Directory.EnumerateFiles(Path.Combine(Folder, "sets"), "*.yaml").Select(path => Path.GetFileNameWithoutExtension(path)!).Order(StringComparer.Ordinal)]
             : [];
+
+    private Schema ReadSchema(string name, string path) => Documents.Schema.Parse(new SourceText($"{Display}/schema/{name}.schema.json", File.ReadAllText(path)));
 }

@@ -28,20 +28,21 @@ public static class ReportFile
         }
 
         var beside = Path.Combine(folder, "." + Path.GetRandomFileName());
+        Leftovers.Expect(beside);
         try
         {
             WriteWhole(beside, content);
             File.Move(beside, full, overwrite: true);
             return true;
         }
-        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
+        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException || IsTooLarge(fault))
         {
             problems.Add(Directory.Exists(full) ? FileMessages.IsFolder(path) : FileMessages.Failed(path, Reason(fault)));
             return false;
         }
         finally
         {
-            Remove(beside);
+            Leftovers.Remove(beside);
         }
     }
 
@@ -52,21 +53,12 @@ public static class ReportFile
         stream.Flush(flushToDisk: true);
     }
 
+    /// <summary>Whether the system takes no file of that length, which the library tells as if it were the fault of an argument.</summary>
+    private static bool IsTooLarge(Exception fault) => fault is ArgumentOutOfRangeException { ParamName: "value", Source: "System.Private.CoreLib" };
+
     /// <summary>The reason without the paths of the machine that the system's message ends with.</summary>
     private static string Reason(Exception fault) =>
-        fault is UnauthorizedAccessException
-            ? "permission is denied"
+        fault is UnauthorizedAccessException ? "permission is denied"
+            : IsTooLarge(fault) ? "it would be larger than files may be there"
             : fault.Message.Split([" : '", " '"], 2, StringSplitOptions.None)[0].ToLowerInvariant();
-
-    private static void Remove(string path)
-    {
-        try
-        {
-            File.Delete(path);
-        }
-        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
-        {
-            // The file that could not be written cannot be removed either; the problem of the writing tells the reason.
-        }
-    }
 }

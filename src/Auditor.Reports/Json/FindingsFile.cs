@@ -21,8 +21,7 @@ public static class FindingsFile
         var root = SourceReader.Read(fullPath, displayPath, own) is { } source ? YamlReader.Read(source, own) : null;
         if (root is not null)
         {
-            var schema = File.ReadAllText(home.SchemaPath(SchemaName));
-            Schema.Parse(new SourceText($"{home.Display}/schema/{SchemaName}.schema.json", schema)).Validate(root, own);
+            home.Schema(SchemaName).Validate(root, own);
         }
 
         if (root is MappingNode checkable && !own.HasErrors)

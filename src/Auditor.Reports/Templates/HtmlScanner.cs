@@ -13,10 +13,14 @@ internal sealed class HtmlScanner
         ["href", "xlink:href", "src", "srcset", "action", "formaction", "data", "poster", "cite", "background", "ping", "manifest", "longdesc", "usemap"],
         StringComparer.OrdinalIgnoreCase);
 
+    /// <summary>Longer than every name that matters: what follows in a longer one tells nothing.</summary>
+    private const int LongestName = 32;
+
     private string _element = "";
     private string _attribute = "";
     private string _word = "";
     private bool _isEndTag;
+    private bool _hasNameEnded;
     private bool _isOwnPage;
 
     /// <summary>Where the next character stands.</summary>
@@ -60,7 +64,7 @@ internal sealed class HtmlScanner
             HtmlPlace.BeforeValue => BeforeValue(c),
             HtmlPlace.DoubleQuoted => Quoted(c, '"'),
             HtmlPlace.SingleQuoted => Quoted(c, '\''),
-            HtmlPlace.Unquoted => char.IsWhiteSpace(c) ? HtmlPlace.Tag : c == '>' ? EndTag() : HtmlPlace.Unquoted,
+            HtmlPlace.Unquoted => IsSpace(c) ? HtmlPlace.Tag : c == '>' ? EndTag() : HtmlPlace.Unquoted,
             HtmlPlace.Declaration => Declaration(c),
             HtmlPlace.Comment => Until(c, "-->", HtmlPlace.Comment),
             _ => Raw(c),
@@ -88,7 +92,7 @@ internal sealed class HtmlScanner
 
     private HtmlPlace TagName(char c)
     {
-        if (char.IsWhiteSpace(c) || c == '/')
+        if (IsSpace(c) || c == '/')
         {
             return HtmlPlace.Tag;
         }
@@ -98,7 +102,7 @@ internal sealed class HtmlScanner
             return EndTag();
         }
 
-        _element += c;
+        _element = Grown(_element, c);
         return HtmlPlace.TagName;
     }
 
@@ -110,7 +114,8 @@ internal sealed class HtmlScanner
         }
 
         _attribute = c.ToString();
-        return char.IsWhiteSpace(c) || c == '/' ? HtmlPlace.Tag : HtmlPlace.AttributeName;
+        _hasNameEnded = false;
+        return IsSpace(c) || c == '/' ? HtmlPlace.Tag : HtmlPlace.AttributeName;
     }
 
     private HtmlPlace AttributeName(char c)
@@ -125,7 +130,13 @@ internal sealed class HtmlScanner
             return InTag(c);
         }
 
-        _attribute += char.IsWhiteSpace(c) ? "" : c;
+        // A name that a space has ended waits for its `=`; where none comes it has no value, and another name begins.
+        if (!IsSpace(c))
+        {
+            _attribute = _hasNameEnded ? c.ToString() : Grown(_attribute, c);
+        }
+
+        _hasNameEnded = IsSpace(c);
         return HtmlPlace.AttributeName;
     }
 
@@ -138,7 +149,7 @@ internal sealed class HtmlScanner
             '"' => HtmlPlace.DoubleQuoted,
             '\'' => HtmlPlace.SingleQuoted,
             '>' => EndTag(),
-            _ => char.IsWhiteSpace(c) ? HtmlPlace.BeforeValue : HtmlPlace.Unquoted,
+            _ => IsSpace(c) ? HtmlPlace.BeforeValue : HtmlPlace.Unquoted,
         };
     }
 
@@ -162,7 +173,7 @@ internal sealed class HtmlScanner
 
     private HtmlPlace Declaration(char c)
     {
-        _word += c;
+        _word = Grown(_word, c);
         if (_word == "--")
         {
             _word = "";
@@ -190,6 +201,11 @@ internal sealed class HtmlScanner
 
         return _word.Equals(end, StringComparison.OrdinalIgnoreCase) ? HtmlPlace.Text : here;
     }
+
+    /// <summary>Whether HTML takes a character for a space.</summary>
+    private static bool IsSpace(char c) => c is ' ' or '\t' or '\n' or '\r' or '\f';
+
+    private static string Grown(string name, char c) => name.Length < LongestName ? name + c : name;
 
     /// <summary>
     /// Whether the value of this attribute may hold a text: none that a browser runs or takes for style, none that sets a policy, and

@@ -9,14 +9,16 @@ namespace Auditor.Rules.Tests.Network;
 /// <summary>A design read from its text by the shipped rule set for the United Kingdom, as the program reads it.</summary>
 internal sealed class AuditedDesign
 {
-    private readonly Design _design;
     private readonly Dictionary<string, DesignSubject> _subjects;
 
     private AuditedDesign(Design design)
     {
-        _design = design;
+        Design = design;
         _subjects = design.Subjects.ToDictionary(subject => subject.Key);
     }
+
+    /// <summary>The design.</summary>
+    public Design Design { get; }
 
     /// <summary>Reads a design; it must have no problem of any kind.</summary>
     public static AuditedDesign Read(string text)
@@ -57,7 +59,7 @@ internal sealed class AuditedDesign
     public AuditResult Audit()
     {
         var problems = new Problems();
-        var result = Engine.Evaluation.Audit.Run(_design, new DateOnly(2026, 12, 1), problems);
+        var result = Engine.Evaluation.Audit.Run(Design, new DateOnly(2026, 12, 1), problems);
         Assert.Equal("", ProblemText.Render(problems.All));
         return result;
     }

@@ -8,11 +8,14 @@ public class PaperTests(Chromium chromium)
 {
     private static readonly WrittenPage Circuit = Reports.OfExample("one-circuit/one-circuit.design.yaml");
 
-    [Fact]
-    public async Task The_print_out_has_every_finding_with_its_derivation_though_all_are_folded_and_some_filtered_away()
+    [Theory]
+    [InlineData(false)]
+    [InlineData(true)]
+    public async Task The_print_out_has_every_finding_with_its_derivation_though_all_are_folded_and_some_filtered_away(bool isEarly)
     {
-        await using var open = await chromium.Open(Circuit.Path, fragment: "?verdict=undetermined");
-        var file = Reports.NewFile("one-circuit.pdf");
+        const string Filtered = "?verdict=undetermined";
+        await using var open = isEarly ? await chromium.OpenBusy(Circuit.Path, Filtered) : await chromium.Open(Circuit.Path, fragment: Filtered);
+        var file = Reports.NewFile($"one-circuit-{isEarly}.pdf");
 
         await open.Page.PdfAsync(new PagePdfOptions { Path = file, PreferCSSPageSize = true });
 

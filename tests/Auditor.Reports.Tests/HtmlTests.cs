@@ -11,8 +11,9 @@ public class HtmlTests
     [InlineData("R & D &amp; &#60;", "R &amp; D &amp;amp; &amp;#60;")]
     [InlineData("a 'b' \"c\"", "a 'b' \"c\"")]
     [InlineData("one\n\n two", "one two")]
-    [InlineData("turned\u202Earound", "turned\uFFFDaround")]
-    [InlineData("Zs 1.37 Ω, 2.5 mm²", "Zs 1.37 Ω, 2.5 mm²")]
+    [InlineData("turned\u202Earound", "turned&#65533;around")]
+    [InlineData("Zs 1.37 Ω, 2.5 mm²", "Zs 1.37 &#937;, 2.5 mm&#178;")]
+    [InlineData("𝄞", "&#119070;")]
     public void Text_between_tags_is_inert(string said, string written) =>
         Assert.Equal($"<p>{written}</p>\n", Write("<p>{{ report.project.title }}</p>", said));
 

@@ -40,6 +40,17 @@ public class LargePageTests(Chromium chromium)
     }
 
     [Fact]
+    public async Task Findings_as_plain_lines_are_accessible()
+    {
+        await using var open = await chromium.Open(SixHundred.Value.Path);
+        await open.Page.EvaluateAsync(Accessibility.ThinOut);
+
+        Assert.NotEqual(0, await open.Get<int>("document.querySelectorAll('.f.line').length"));
+        Assert.NotEqual(0, await open.Get<int>("document.querySelectorAll('.f.flat').length"));
+        Assert.Equal(("", ""), await Accessibility.FaultsOf(open.Page));
+    }
+
+    [Fact]
     public async Task Without_scripts_six_hundred_circuits_have_every_finding()
     {
         var page = SixHundred.Value;

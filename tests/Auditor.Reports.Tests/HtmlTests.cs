@@ -37,6 +37,7 @@ public class HtmlTests
     [InlineData("<p title=\"a > b\">{{ report.project.title }}</p>", "<p title=\"a > b\">&lt;</p>\n")]
     [InlineData("<p hidden title = 'a'>{{ report.project.title }}</p>", "<p hidden title = 'a'>&lt;</p>\n")]
     [InlineData("<br/>1 < 2 {{ report.project.title }}", "<br/>1 < 2 &lt;\n")]
+    [InlineData("<noscript><i title=\"{{ report.project.title }}\">{{ report.project.title }}</i></noscript>", "<noscript><i title=\"&lt;\">&lt;</i></noscript>\n")]
     [InlineData("<script>if (1 < 2) '</p>'</script >{{ report.project.title }}", "<script>if (1 < 2) '</p>'</script >&lt;\n")]
     public void Text_may_follow_whatever_a_template_writes_itself(string template, string page) => Assert.Equal(page, Write(template, "<"));
 

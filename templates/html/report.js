@@ -1,12 +1,60 @@
-// Filters the findings. Without this script the page is complete: all findings are there, and nothing else depends on it.
+// Puts in what is far down, and filters the findings. Where no scripts run the page is complete without it.
 (() => {
   'use strict';
+  // Text within <noscript> costs the browser next to nothing, where the elements would keep it busy for half a second before anybody
+  // can scroll. It is put in piece by piece while there is nothing else to do, and at once where it is asked for.
+  const late = [...document.querySelectorAll('main noscript')];
+  const awaited = new Set();
+
+  function putIn(piece) {
+    const notice = piece.previousElementSibling;
+    if (notice?.matches('.late')) notice.remove();
+    piece.insertAdjacentHTML('beforebegin', piece.textContent);
+    piece.remove();
+  }
+
+  function putInSome(deadline) {
+    while (late.length) {
+      putIn(late.shift());
+      if (deadline.timeRemaining() < 5) break;
+    }
+
+    goOn();
+  }
+
+  function goOn() {
+    if (late.length) {
+      (window.requestIdleCallback ?? (next => setTimeout(next, 0, { timeRemaining: () => 0 })))(putInSome, { timeout: 500 });
+      return;
+    }
+
+    awaited.forEach(act => act());
+    awaited.clear();
+  }
+
+  function whenWhole(act) {
+    if (late.length) awaited.add(act);
+    else act();
+  }
+
+  function putInAll() {
+    late.splice(0).forEach(putIn);
+    goOn();
+  }
+
+  // The element with an id, put in if it is not there yet.
+  function reach(id) {
+    const at = late.findIndex(piece => piece.textContent.includes(`id="${id}"`));
+    if (at >= 0) putIn(late.splice(at, 1)[0]);
+    return document.getElementById(id);
+  }
+
   const form = document.querySelector('.filter');
-  const total = document.querySelectorAll('.f').length;
   const verdicts = [...form.elements.verdict];
   const status = form.querySelector('[role=status]');
   const none = document.querySelector('.none');
   const MOST_UNFOLDED = 400;
+  let total;
   const boards = [...form.elements.board.options].map(option => option.value).slice(2).sort((a, b) => b.length - a.length);
   let known;
 
@@ -44,6 +92,11 @@
     return ask.verdicts.has(entry.verdict)
       && (ask.board === '*' || entry.board === ask.board)
       && (!ask.text || rule.hit || words(entry).includes(ask.text));
+  }
+
+  function count() {
+    total = document.querySelectorAll('.f').length;
+    status.textContent = `${total} findings`;
   }
 
   function apply() {
@@ -99,11 +152,11 @@
   function follow() {
     if (location.hash.startsWith('#?')) {
       recall();
-      apply();
+      whenWhole(apply);
       return;
     }
 
-    const target = document.getElementById(decodeURIComponent(location.hash.slice(1)));
+    const target = reach(decodeURIComponent(location.hash.slice(1)));
     if (!target) return;
     if (target.closest('.off')) {
       form.reset();
@@ -120,12 +173,18 @@
   let pause;
   form.addEventListener('input', event => {
     clearTimeout(pause);
-    pause = setTimeout(apply, event.target.type === 'search' ? 150 : 0);
+    pause = setTimeout(whenWhole, event.target.type === 'search' ? 150 : 0, apply);
   });
-  form.addEventListener('reset', () => setTimeout(apply));
+  form.addEventListener('reset', () => setTimeout(whenWhole, 0, apply));
   form.addEventListener('submit', event => event.preventDefault());
   addEventListener('hashchange', follow);
+  addEventListener('click', event => {
+    const link = event.target.closest('a[href^="#"]');
+    if (link) reach(link.getAttribute('href').slice(1));
+  });
+  addEventListener('beforeprint', putInAll);
+  addEventListener('load', goOn);
   form.hidden = false;
-  status.textContent = `${total} findings`;
+  whenWhole(count);
   if (location.hash) follow();
 })();

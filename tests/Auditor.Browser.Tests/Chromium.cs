@@ -31,16 +31,37 @@ public sealed class Chromium : IAsyncLifetime
         _playwright?.Dispose();
     }
 
-    /// <summary>Opens a file in a window of its own.</summary>
+    /// <summary>Opens a file in a window of its own, and waits until all of it has been put in.</summary>
     /// <param name="path">Full path of the file.</param>
     /// <param name="options">How the window is; null for a desktop one.</param>
     /// <param name="fragment">What follows <c>#</c> in the address.</param>
     public async Task<OpenPage> Open(string path, BrowserNewContextOptions? options = null, string fragment = "")
     {
-        var context = await Browser.NewContextAsync(options ?? new BrowserNewContextOptions { ViewportSize = new ViewportSize { Width = 1280, Height = 900 } });
-        var page = new OpenPage(context, await context.NewPageAsync());
-        await page.Go(new Uri(path).AbsoluteUri + (fragment.Length == 0 ? "" : "#" + fragment));
+        var page = await NewPage(options);
+        await page.Go(path, fragment);
+        if (options?.JavaScriptEnabled != false)
+        {
+            await page.Until("document.querySelector('main noscript') === null");
+        }
+
         return page;
+    }
+
+    /// <summary>Opens a file in a browser that has no time for what can wait, until the script <c>haveTime()</c> gives it some.</summary>
+    /// <param name="path">Full path of the file.</param>
+    /// <param name="fragment">What follows <c>#</c> in the address.</param>
+    public async Task<OpenPage> OpenBusy(string path, string fragment = "")
+    {
+        var page = await NewPage(null);
+        await page.Page.AddInitScriptAsync("requestIdleCallback = act => { window.haveTime = () => act({ timeRemaining: () => 50 }); };");
+        await page.Go(path, fragment);
+        return page;
+    }
+
+    private async Task<OpenPage> NewPage(BrowserNewContextOptions? options)
+    {
+        var context = await Browser.NewContextAsync(options ?? new BrowserNewContextOptions { ViewportSize = new ViewportSize { Width = 1280, Height = 900 } });
+        return new OpenPage(context, await context.NewPageAsync());
     }
 
     private static string Find() =>

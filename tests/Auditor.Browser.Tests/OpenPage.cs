@@ -54,5 +54,6 @@ public sealed class OpenPage : IAsyncDisposable
     /// <inheritdoc/>
     public async ValueTask DisposeAsync() => await _context.DisposeAsync();
 
-    internal Task Go(string address) => Page.GotoAsync(address, new PageGotoOptions { WaitUntil = WaitUntilState.Load, Timeout = 120_000 });
+    internal Task Go(string path, string fragment) => Page.GotoAsync(
+        new Uri(path).AbsoluteUri + (fragment.Length == 0 ? "" : "#" + fragment), new PageGotoOptions { WaitUntil = WaitUntilState.Load, Timeout = 120_000 });
 }

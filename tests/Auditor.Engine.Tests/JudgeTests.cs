@@ -41,6 +41,13 @@ public class JudgeTests
         Assert.Equal(verdict, Judged("compare: { value: load.current, at-most: device.rating }", $"device: {{ rating: 32 A }}, load: {{ current: {current} }}")!.VerdictText);
 
     [Theory]
+    [InlineData("at-most: device.rating", "32.00000003 A", 0.0)]
+    [InlineData("at-least: device.rating", "31.99999997 A", 0.0)]
+    [InlineData("at-most: device.rating", "32.00000004 A", -1.25e-9)]
+    public void A_value_at_its_limit_within_the_slack_has_no_margin(string compare, string current, double relative) => Assert.Equal(
+        relative, Judged($"compare: {{ value: load.current, {compare} }}", $"device: {{ rating: 32 A }}, load: {{ current: {current} }}")!.Judgement.Margin!.Relative!.Value, 1e-15);
+
+    [Theory]
     [InlineData("compare: { value: arrangement, equals: \"'ring'\" }", "arrangement: ring", "conforms")]
     [InlineData("compare: { value: arrangement, equals: \"'ring'\" }", "arrangement: radial", "nonconforming")]
     [InlineData("compare: { value: arrangement, equals: \"'ring'\" }", "name: x", "undetermined")]

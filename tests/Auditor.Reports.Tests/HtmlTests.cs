@@ -11,8 +11,9 @@ public class HtmlTests
     [InlineData("R & D &amp; &#60;", "R &amp; D &amp;amp; &amp;#60;")]
     [InlineData("a 'b' \"c\"", "a 'b' \"c\"")]
     [InlineData("one\n\n two", "one two")]
-    [InlineData("turned\u202Earound", "turned\uFFFDaround")]
-    [InlineData("Zs 1.37 Ω, 2.5 mm²", "Zs 1.37 Ω, 2.5 mm²")]
+    [InlineData("turned\u202Earound", "turned&#65533;around")]
+    [InlineData("Zs 1.37 Ω, 2.5 mm²", "Zs 1.37 &#937;, 2.5 mm&#178;")]
+    [InlineData("𝄞", "&#119070;")]
     public void Text_between_tags_is_inert(string said, string written) =>
         Assert.Equal($"<p>{written}</p>\n", Write("<p>{{ report.project.title }}</p>", said));
 
@@ -36,6 +37,7 @@ public class HtmlTests
     [InlineData("<p title=\"a > b\">{{ report.project.title }}</p>", "<p title=\"a > b\">&lt;</p>\n")]
     [InlineData("<p hidden title = 'a'>{{ report.project.title }}</p>", "<p hidden title = 'a'>&lt;</p>\n")]
     [InlineData("<br/>1 < 2 {{ report.project.title }}", "<br/>1 < 2 &lt;\n")]
+    [InlineData("<noscript><i title=\"{{ report.project.title }}\">{{ report.project.title }}</i></noscript>", "<noscript><i title=\"&lt;\">&lt;</i></noscript>\n")]
     [InlineData("<script>if (1 < 2) '</p>'</script >{{ report.project.title }}", "<script>if (1 < 2) '</p>'</script >&lt;\n")]
     public void Text_may_follow_whatever_a_template_writes_itself(string template, string page) => Assert.Equal(page, Write(template, "<"));
 

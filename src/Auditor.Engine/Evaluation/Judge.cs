@@ -52,13 +52,13 @@ public static class Judge
         switch (how)
         {
             case CheckKind.AtMost:
-                return (Comparison.AtMost(value.Number, limits[0].Number), MarginOf(limits[0].Number - value.Number, limits[0].Number));
+                return (Comparison.AtMost(value.Number, limits[0].Number), MarginOf(value.Number, limits[0].Number, -1));
             case CheckKind.AtLeast:
-                return (Comparison.AtLeast(value.Number, limits[0].Number), MarginOf(value.Number - limits[0].Number, limits[0].Number));
+                return (Comparison.AtLeast(value.Number, limits[0].Number), MarginOf(value.Number, limits[0].Number, 1));
             case CheckKind.Within:
                 var (low, high) = (limits[0].Number, limits[1].Number);
-                var below = MarginOf(value.Number - low, low);
-                var above = MarginOf(high - value.Number, high);
+                var below = MarginOf(value.Number, low, 1);
+                var above = MarginOf(value.Number, high, -1);
                 return (Comparison.AtLeast(value.Number, low) && Comparison.AtMost(value.Number, high), below.Absolute <= above.Absolute ? below : above);
             case CheckKind.Equal:
                 return (Same(value, limits[0]), null);
@@ -72,5 +72,10 @@ public static class Judge
 
     private static bool Same(in Value a, in Value b) => a.Kind == ValueKind.Text ? a.Text == b.Text : Comparison.Same(a.Number, b.Number);
 
-    private static Margin MarginOf(double distance, double limit) => new(distance, limit == 0 ? null : distance / Math.Abs(limit));
+    /// <summary>A value that is at its limit within the slack has no distance to it, so that a margin is never on another side than its verdict.</summary>
+    private static Margin MarginOf(double value, double limit, int right)
+    {
+        var distance = Comparison.Same(value, limit) ? 0 : (value - limit) * right;
+        return new Margin(distance, limit == 0 ? null : distance / Math.Abs(limit));
+    }
 }

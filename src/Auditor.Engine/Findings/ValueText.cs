@@ -22,9 +22,22 @@ public static class ValueText
         _ => value.Text,
     };
 
-    /// <summary>A relative margin, as a percentage with its sign.</summary>
-    public static string ShowMargin(double relative) =>
-        string.Create(CultureInfo.InvariantCulture, $"{(relative > 0 ? "+" : "")}{Math.Round(relative * 100, 1, MidpointRounding.AwayFromZero):0.0} %");
+    /// <summary>
+    /// A relative margin, as a percentage with its sign and one decimal; so many more for one so small that it would show as zero. Zero,
+    /// within the slack of comparisons, has no sign.
+    /// </summary>
+    public static string ShowMargin(double relative)
+    {
+        if (Math.Abs(relative) < Comparison.Slack)
+        {
+            return "0.0 %";
+        }
+
+        var percent = relative * 100;
+        var decimals = Math.Abs(percent) < 0.05 ? -(int)Math.Floor(Math.Log10(Math.Abs(percent))) : 1;
+        var shown = Math.Round(percent, decimals, MidpointRounding.AwayFromZero).ToString("0.0#########", CultureInfo.InvariantCulture);
+        return $"{(relative > 0 ? "+" : "")}{shown} %";
+    }
 
     /// <summary>A bound with its unit, rounded to four digits so that it stays on its safe side: an upper bound downward, a lower one upward.</summary>
     public static string ShowBound(double number, Unit unit, bool isMost)

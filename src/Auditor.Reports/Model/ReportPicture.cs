@@ -13,5 +13,5 @@ namespace Auditor.Reports.Model;
 public sealed record ReportPicture(string Id, string Kind, string Title, string Description, Markup Svg, PictureTable Table)
 {
     internal static ReportPicture Of(Picture picture) =>
-        new(picture.Id, picture.Kind, picture.Title, picture.Description, new Markup(picture.Svg), picture.Table);
+        new(picture.Id, picture.Kind, picture.Title, picture.Description, new Markup(HtmlInk.Narrow(picture.Svg)), picture.Table);
 }

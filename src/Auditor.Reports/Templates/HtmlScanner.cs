@@ -6,8 +6,12 @@ namespace Auditor.Reports.Templates;
 /// </summary>
 internal sealed class HtmlScanner
 {
+    /// <summary>
+    /// Elements whose content is not text. <c>noscript</c> is not among them: where scripts run, only <c>&lt;/noscript</c> ends it, and an inserted
+    /// text holds no <c>&lt;</c>, so that what a script puts in from there is what a browser without scripts reads.
+    /// </summary>
     private static readonly HashSet<string> RawElements =
-        new(["script", "style", "xmp", "iframe", "noembed", "noframes", "noscript", "plaintext"], StringComparer.OrdinalIgnoreCase);
+        new(["script", "style", "xmp", "iframe", "noembed", "noframes", "plaintext"], StringComparer.OrdinalIgnoreCase);
 
     private static readonly HashSet<string> LinkAttributes = new(
         ["href", "xlink:href", "src", "srcset", "action", "formaction", "data", "poster", "cite", "background", "ping", "manifest", "longdesc", "usemap"],

@@ -12,6 +12,9 @@ internal static class CommandMessages
     public static Problem NoDesigns(string folder) => Problem.Error(
         "no-designs", $"there is no design file below `{folder}`", null, "design files are called `*.design.yaml`");
 
+    public static Problem UnreadableFolder(string folder) => Problem.Error(
+        "folder-unreadable", $"a folder in `{folder}` cannot be looked into, so that a design in it would be passed over", null, "check its permissions, or name the designs one by one");
+
     public static Problem NotDate(string text) => Problem.Error(
         "not-a-date", $"`{text}` is not a day of the calendar", null, "write `--as-of` as year, month and day, for example 2026-09-14");
 

@@ -21,8 +21,12 @@ internal static class DesignPaths
                 continue;
             }
 
-            var options = new EnumerationOptions { RecurseSubdirectories = true, AttributesToSkip = FileAttributes.ReparsePoint };
-            var below = Directory.EnumerateFiles(path, "*" + Ending, options).Select(Tidy).Order(StringComparer.Ordinal).ToArray();
+            if (Below(path) is not { } below)
+            {
+                problems.Add(CommandMessages.UnreadableFolder(argument));
+                continue;
+            }
+
             if (below.Length == 0)
             {
                 problems.Add(CommandMessages.NoDesigns(argument));
@@ -32,6 +36,20 @@ internal static class DesignPaths
         }
 
         return [.. found.Distinct(StringComparer.Ordinal)];
+    }
+
+    /// <summary>Every design file below a folder, in order; null when a folder there cannot be looked into, and a design in it would be passed over.</summary>
+    private static string[]? Below(string folder)
+    {
+        var options = new EnumerationOptions { RecurseSubdirectories = true, AttributesToSkip = FileAttributes.ReparsePoint, IgnoreInaccessible = false };
+        try
+        {
+            return [.. Directory.EnumerateFiles(folder, "*" + Ending, options).Select(Tidy).Order(StringComparer.Ordinal)];
+        }
+        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
+        {
+            return null;
+        }
     }
 
     /// <summary>The design's path without its ending, which names the reports beside it.</summary>

@@ -18,6 +18,9 @@ internal static class RuleMessages
     public static Problem OutsideRoot(SourceSpan span, string path) => Problem.Error(
         "rules-outside-folder", $"`{path}` lies outside the folder of this set", span, "a set uses only files of its own folder; build on others with `extends`");
 
+    public static Problem UnreadableFolder(SourceSpan span, string path) => Problem.Error(
+        "folder-unreadable", $"a folder in `{path}` cannot be looked into, so that a file in it would be passed over", span, "check its permissions");
+
     public static Problem NoSuchPath(SourceSpan span, string path) => Problem.Error("rules-not-found", $"there is no `{path}`", span, "paths are relative to the folder of the set's rule data");
 
     public static Problem ExtendsOutside(SourceSpan span, string path) => Problem.Error(

@@ -66,8 +66,17 @@ internal sealed record SetFile(RuleFile File, string Folder, string Display, boo
             return [];
         }
 
-        var options = new EnumerationOptions { RecurseSubdirectories = true, AttributesToSkip = FileAttributes.ReparsePoint };
-        return [.. Directory.EnumerateFiles(full, "*.yaml", options).Order(StringComparer.Ordinal).Select(file => (file, Show(file)))];
+        // What cannot be looked into is told: a rule that is passed over could be the one that is broken.
+        var options = new EnumerationOptions { RecurseSubdirectories = true, AttributesToSkip = FileAttributes.ReparsePoint, IgnoreInaccessible = false };
+        try
+        {
+            return [.. Directory.EnumerateFiles(full, "*.yaml", options).Order(StringComparer.Ordinal).Select(file => (file, Show(file)))];
+        }
+        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
+        {
+            problems.Add(RuleMessages.UnreadableFolder(path.Span, path.Text));
+            return [];
+        }
     }
 
     /// <summary>Whether a path lies in the folder, and no symbolic link along it leads elsewhere.</summary>

@@ -7,12 +7,13 @@ using BenchmarkDotNet.Jobs;
 using BenchmarkDotNet.Loggers;
 using BenchmarkDotNet.Running;
 using BenchmarkDotNet.Toolchains.InProcess.Emit;
+using Perfolizer.Horology;
 
 // In this process, since the project that the library would write for another one knows nothing of central package versions.
 var config = ManualConfig.CreateEmpty()
-    .AddJob(Job.Default.WithToolchain(new InProcessEmitToolchain(TimeSpan.FromHours(1), logOutput: true)).WithWarmupCount(3).WithIterationCount(10))
+    .AddJob(Job.Default.WithToolchain(new InProcessEmitToolchain(TimeSpan.FromHours(1), logOutput: true)).WithWarmupCount(3).WithIterationCount(15).WithIterationTime(TimeInterval.FromMilliseconds(100)))
     .AddColumnProvider(DefaultColumnProviders.Instance)
-    .AddColumn(new JudgementsColumn())
+    .AddColumn(StatisticColumn.Min, new JudgementsColumn())
     .AddDiagnoser(MemoryDiagnoser.Default)
     .AddExporter(MarkdownExporter.GitHub)
     .AddLogger(ConsoleLogger.Default)

@@ -84,7 +84,13 @@ internal sealed class Designs(string? ruleSet, Problems problems)
         var key = IsPath(name) ? Path.GetFullPath(Path.Combine(folder, name)) : name;
         if (!_sets.TryGetValue(key, out var rules))
         {
-            rules = _ahead?.Take(name) ?? RuleSetLoader.Load(Shipped.Rules, name, folder, asked, problems);
+            var own = new Problems();
+            rules = _ahead?.Take(name) ?? RuleSetLoader.Load(Shipped.Rules, name, folder, asked, own);
+            foreach (var problem in own.All)
+            {
+                problems.Add(problem);
+            }
+
             _sets.Add(key, rules);
             Log.Information("Read rule set {RuleSet}", name);
         }

@@ -1,4 +1,3 @@
-using System.Text;
 using Auditor.Reports.Model;
 using Microsoft.Playwright;
 using UglyToad.PdfPig;
@@ -52,12 +51,11 @@ public class PaperTests(Chromium chromium)
         var pages = await Print(open, "one-circuit-heads.pdf");
 
         var (project, total) = (Circuit.Model.Project, pages.Count);
-        Assert.NotEqual("", project.Reference);
+        Assert.Equal("GO-1", project.Reference);
         Assert.All(pages.Index(), page =>
         {
-            var apart = page.Item.Normalize(NormalizationForm.FormKC);
-            Assert.Contains(Squeezed($"{project.Title}, {project.Reference}, revision {project.Revision}"), apart, StringComparison.Ordinal);
-            Assert.Contains($"page{page.Index + 1}of{total}", apart, StringComparison.Ordinal);
+            Assert.Contains(Squeezed($"{project.Reference}, revision {project.Revision}"), page.Item, StringComparison.Ordinal);
+            Assert.Contains($"page{page.Index + 1}of{total}", page.Item, StringComparison.Ordinal);
         });
     }
 

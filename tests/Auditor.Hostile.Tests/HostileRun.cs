@@ -9,7 +9,7 @@ internal static partial class HostileRun
     private const int MostShown = 2;
 
     /// <summary>Many times what the slowest case takes; who waits for ever is found.</summary>
-    private static readonly TimeSpan Longest = TimeSpan.FromMinutes(2);
+    private static readonly TimeSpan Longest = TimeSpan.FromMinutes(10);
 
     /// <summary>The exit code, and the first problems with line and column.</summary>
     public static string Outcome(HostileCase hostile)

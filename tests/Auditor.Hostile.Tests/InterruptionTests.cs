@@ -44,7 +44,7 @@ public sealed class InterruptionTests : IDisposable
     {
         _folder.Write(Findings, Old);
         using var child = ChildProgram.Start(_folder.Path, $"exec $AUDITOR audit site.design.yaml --quiet --evidence --write {Findings}");
-        var begun = SpinWait.SpinUntil(() => child.Process.HasExited || Directory.GetFiles(_folder.Path, ".*").Any(file => new FileInfo(file).Length > 0), TimeSpan.FromMinutes(2));
+        var begun = SpinWait.SpinUntil(() => child.Process.HasExited || Directory.GetFiles(_folder.Path, ".*").Any(file => new FileInfo(file).Length > 0), TimeSpan.FromMinutes(10));
         Assert.True(begun && !child.Process.HasExited, "the program wrote nothing that could be interrupted");
         using var kill = Process.Start("kill", [$"-{signal}", $"{child.Process.Id}"]);
         kill.WaitForExit();

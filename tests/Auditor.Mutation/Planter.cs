@@ -36,7 +36,12 @@ internal sealed class Planter(string file, int next, IReadOnlySet<int> dropped) 
 
     private static readonly Dictionary<string, string> Opposites = new(StringComparer.Ordinal)
     {
-        ["Min"] = "Max", ["Max"] = "Min", ["Any"] = "All", ["All"] = "Any", ["AtMost"] = "AtLeast", ["AtLeast"] = "AtMost",
+        ["Min"] = "Max",
+        ["Max"] = "Min",
+        ["Any"] = "All",
+        ["All"] = "Any",
+        ["AtMost"] = "AtLeast",
+        ["AtLeast"] = "AtMost",
     };
 
     /// <summary>The mutants planted.</summary>

@@ -82,7 +82,7 @@ internal sealed class JsonOutput : IDisposable
         }
     }
 
-    /// <summary>Begins an object.</summary>
+    /// <summary>Begins an object: what every finding has is written without an action for each part of it.</summary>
     public void Start(string? name)
     {
         Name(name);

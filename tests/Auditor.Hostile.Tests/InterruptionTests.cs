@@ -43,7 +43,8 @@ public sealed class InterruptionTests : IDisposable
     private int StopWhileWriting(string signal)
     {
         _folder.Write(Findings, Old);
-        using var child = ChildProgram.Start(_folder.Path, $"exec $AUDITOR audit site.design.yaml --quiet --evidence --write {Findings}");
+        // Who starts the tests in the background of a shell has them ignore interrupts, and the program would as well.
+        using var child = ChildProgram.Start(_folder.Path, $"exec env --default-signal=INT,TERM $AUDITOR audit site.design.yaml --quiet --evidence --write {Findings}");
         var begun = SpinWait.SpinUntil(() => child.Process.HasExited || Directory.GetFiles(_folder.Path, ".*").Any(file => new FileInfo(file).Length > 0), TimeSpan.FromMinutes(10));
         Assert.True(begun && !child.Process.HasExited, "the program wrote nothing that could be interrupted");
         using var kill = Process.Start("kill", [$"-{signal}", $"{child.Process.Id}"]);

@@ -34,6 +34,7 @@ public sealed class OutputTests : IDisposable
     [Fact]
     public void A_file_that_may_grow_no_further_leaves_the_earlier_one_as_it_was()
     {
+        _folder.Write("site.design.yaml", Site.Head + "boards:\n  - id: A\n    circuits:\n" + Site.Lines(300, number => $"      - {{ id: {number} }}"));
         _folder.Write("site.html", Old);
 
         // Enough for what counts the lines executed, where that is measured, and too little for the page.

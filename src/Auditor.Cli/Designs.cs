@@ -85,7 +85,7 @@ internal sealed class Designs(string? ruleSet, Problems problems)
         if (!_sets.TryGetValue(key, out var rules))
         {
             var own = new Problems();
-            rules = _ahead?.Take(name) ?? RuleSetLoader.Load(Shipped.Rules, name, folder, asked, own);
+            rules = _ahead?.Take(name, own) ?? RuleSetLoader.Load(Shipped.Rules, name, folder, asked, own);
             foreach (var problem in own.All)
             {
                 problems.Add(problem);

@@ -12,12 +12,13 @@ internal sealed class RuleSetAhead
     private const string Key = "rule-set:";
 
     private readonly string _name;
+    private readonly Problems _problems = new();
     private readonly Task<RuleSet?> _rules;
 
     private RuleSetAhead(string name)
     {
         _name = name;
-        _rules = Task.Run(() => RuleSetLoader.Load(Shipped.Rules, name, Environment.CurrentDirectory, null, new Problems()));
+        _rules = Task.Run(() => RuleSetLoader.Load(Shipped.Rules, name, Environment.CurrentDirectory, null, _problems));
     }
 
     /// <summary>Begins to read a rule set; null where the design names a file of its own, which has to be checked first.</summary>
@@ -29,8 +30,23 @@ internal sealed class RuleSetAhead
         return named is null && Designs.IsPath(name) ? null : new(name);
     }
 
-    /// <summary>The rule set, if it is the one of that name and without problems; null otherwise.</summary>
-    public RuleSet? Take(string name) => name == _name ? _rules.GetAwaiter().GetResult() : null;
+    /// <summary>The rule set, if it is the one of that name and without faults; null otherwise.</summary>
+    /// <param name="name">Name of the set that is wanted.</param>
+    /// <param name="problems">Receives what it warns of.</param>
+    public RuleSet? Take(string name, Problems problems)
+    {
+        if (name != _name || _rules.GetAwaiter().GetResult() is not { } rules)
+        {
+            return null;
+        }
+
+        foreach (var problem in _problems.All)
+        {
+            problems.Add(problem);
+        }
+
+        return rules;
+    }
 
     /// <summary>What a design seems to ask for.</summary>
     private static string Guess(string design)

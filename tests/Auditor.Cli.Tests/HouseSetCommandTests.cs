@@ -55,6 +55,17 @@ public class HouseSetCommandTests
         Assert.DoesNotContain("change/", Text(folder, "a.csv"), StringComparison.Ordinal);
     }
 
+    [Fact]
+    public void What_a_set_that_the_caller_names_warns_of_is_told()
+    {
+        using var folder = Folder("changes:\n  - { rule: spare-ways, provision: recommendation, reason: The firm. }\n");
+
+        var result = Tool.RunIn(folder.Path, ["audit", "a.design.yaml", "--rules", "house/firm.yaml", "--quiet", "--fail-on", "nonconforming"]);
+
+        Assert.Equal(0, result.Code);
+        Assert.Contains("warning change-of-nothing", result.Error, StringComparison.Ordinal);
+    }
+
     [Theory]
     [InlineData("  - { rule: voltage-drop-other, provision: recommendation, reason: None. }", "change/provision voltage-drop-other")]
     [InlineData("  - { rule: voltage-drop-other, dropped: true, reason: None. }", "change/rule voltage-drop-other")]

@@ -10,6 +10,7 @@ namespace Auditor.Engine.Installation;
 public sealed class DesignSubject : ISubject
 {
     private readonly Design _design;
+
     /// <summary>By slot number, blank until computed; null until one is asked for: a design with faults, or one that is only imported, is never evaluated.</summary>
     private Value[]? _quantities;
     private GivenInputs? _inputs;

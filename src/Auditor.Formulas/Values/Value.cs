@@ -45,8 +45,8 @@ public readonly struct Value
     /// <summary>What it rests on.</summary>
     public Marks Marks => _held is ValueTag tag ? tag.Marks : (Marks)(byte)_bits;
 
-    /// <summary>The number of a quantity, in coherent units (a temperature in °C).</summary>
-    public double Number => BitConverter.Int64BitsToDouble(_bits);
+    /// <summary>The number of a quantity, in coherent units (a temperature in °C); 1 or 0 of a flag, 0 of anything else.</summary>
+    public double Number => _held is ValueTag ? BitConverter.Int64BitsToDouble(_bits) : 0;
 
     /// <summary>Whether nothing is held.</summary>
     public bool IsMissing => _held is not (ValueTag or string or WordList);
@@ -57,8 +57,8 @@ public readonly struct Value
     /// <summary>The text of a text value.</summary>
     public string Text => (string)_held!;
 
-    /// <summary>The flag of a flag value.</summary>
-    public bool Flag => _bits != 0;
+    /// <summary>The flag of a flag value; false of anything else, lest something that is missing pass for true.</summary>
+    public bool Flag => IsTrue;
 
     /// <summary>The words of a list value.</summary>
     public IReadOnlyList<string> Words => ((WordList)_held!).Items;

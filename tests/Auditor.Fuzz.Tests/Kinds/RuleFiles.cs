@@ -1,5 +1,4 @@
 using Auditor.Documents;
-using Auditor.Testing;
 
 namespace Auditor.Fuzz.Tests.Kinds;
 
@@ -19,7 +18,7 @@ internal sealed class RuleFiles : FuzzKind
         ["register"] = "register",
     };
 
-    private readonly Dictionary<string, Schema> _schemas = SchemaOfKind.ToDictionary(kind => kind.Key, kind => Read(kind.Value));
+    private readonly Dictionary<string, Schema> _schemas = SchemaOfKind.ToDictionary(kind => kind.Key, kind => Corpus.Home.Schema(kind.Value));
 
     public override IReadOnlyList<byte[]> Seeds { get; } =
         [.. Corpus.Files("rules", "*.yaml", every: 5).Where(file => SchemaOfKind.ContainsKey(FirstKey(Corpus.Read(file))))];
@@ -37,10 +36,4 @@ internal sealed class RuleFiles : FuzzKind
     }
 
     private static string FirstKey(Node root) => root is MappingNode { Entries: [var first, ..] } ? first.Key.Value : "";
-
-    private static Schema Read(string name)
-    {
-        var path = $"rules/schema/{name}.schema.json";
-        return Schema.Parse(new SourceText(path, File.ReadAllText(Repository.PathOf(path))));
-    }
 }

@@ -11,8 +11,6 @@ internal static partial class DesignText
 {
     private const int Widest = 120;
 
-    private static readonly JsonSerializerOptions Quoting = new() { Encoder = JavaScriptEncoder.UnsafeRelaxedJsonEscaping };
-
     /// <summary>Writes a mapping on lines of its own, which end with LF.</summary>
     public static string Write(MappingNode root)
     {
@@ -24,7 +22,7 @@ internal static partial class DesignText
     /// <summary>A scalar as YAML: plain where that cannot be taken for anything else, else in double quotes.</summary>
     public static string Scalar(ScalarNode scalar) => scalar.Kind != ScalarKind.Text || IsPlain(scalar.Text)
         ? scalar.Text
-        : JsonSerializer.Serialize(scalar.Text, Quoting);
+        : $"\"{JsonEncodedText.Encode(scalar.Text, JavaScriptEncoder.UnsafeRelaxedJsonEscaping)}\"";
 
     private static void Block(StringBuilder text, MappingNode mapping, int indent)
     {

@@ -139,7 +139,7 @@ internal sealed class ReportContext : TemplateContext
     {
         string[] known = target is IEnumerable
             ? ["size"]
-            : [.. target.GetType().GetProperties().Select(property => StandardMemberRenamer.Rename(property.Name)).Order(StringComparer.Ordinal)];
+            : [.. context.GetMemberAccessor(target).GetMembers(context, span, target).Order(StringComparer.Ordinal)];
         throw new TemplateFault(span, at => TemplateMessages.UnknownMember(at, member, NearestWord.Find(member, known), known));
     }
 

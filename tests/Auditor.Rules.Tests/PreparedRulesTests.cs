@@ -45,22 +45,21 @@ public sealed class PreparedRulesTests : IDisposable
     [Fact]
     public void A_damaged_prepared_form_and_one_for_other_schemas_are_passed_over()
     {
-        var source = new SourceText("a.yaml", File.ReadAllText(_home.SetPath("iec-base")));
-        var sha256 = Load().Files.Single(file => file.Path == "rules/sets/iec-base.yaml").Sha256;
+        var source = SourceReader.ReadWithHash(_home.SetPath("iec-base"), "a.yaml", new Problems())!;
         PreparedRules.Write(_home);
-        Assert.NotNull(PreparedRules.Open(_home).Find(source, sha256));
+        Assert.NotNull(PreparedRules.Open(_home).Find(source));
 
         var bytes = File.ReadAllBytes(PreparedRules.PathOf(_home));
         bytes[bytes.Length / 2] ^= 1;
         File.WriteAllBytes(PreparedRules.PathOf(_home), bytes);
-        Assert.Null(PreparedRules.Open(_home).Find(source, sha256));
+        Assert.Null(PreparedRules.Open(_home).Find(source));
 
         PreparedRules.Write(_home);
         File.AppendAllText(_home.SchemaPath("set"), "\n");
-        Assert.Null(PreparedRules.Open(_home).Find(source, sha256));
+        Assert.Null(PreparedRules.Open(_home).Find(source));
 
         File.WriteAllBytes(PreparedRules.PathOf(_home), []);
-        Assert.Null(PreparedRules.Open(_home).Find(source, sha256));
+        Assert.Null(PreparedRules.Open(_home).Find(source));
     }
 
     public void Dispose() => Directory.Delete(_folder, recursive: true);

@@ -4,6 +4,7 @@ namespace Auditor.Documents;
 public sealed class ScalarNode : Node
 {
     private readonly double _number;
+    private string? _text;
 
     /// <summary>Makes a scalar.</summary>
     /// <param name="span">Where it stands.</param>
@@ -13,13 +14,17 @@ public sealed class ScalarNode : Node
     public ScalarNode(SourceSpan span, string text, ScalarKind kind, double number = 0)
         : base(span)
     {
-        Text = text;
+        _text = text;
         Kind = kind;
         _number = number;
     }
 
+    /// <summary>Makes a text that is just what stands in the source; it is cut out when somebody asks for it.</summary>
+    internal ScalarNode(SourceSpan span)
+        : base(span) => Kind = ScalarKind.Text;
+
     /// <summary>The text as written, without quotes and with escapes resolved, whatever the kind.</summary>
-    public string Text { get; }
+    public string Text => _text ??= Span.Text;
 
     /// <summary>What the text is to be taken for.</summary>
     public ScalarKind Kind { get; }

@@ -39,7 +39,7 @@ public sealed class NodeReader(SourceText source, ReadOnlyMemory<byte> bytes)
 
                 return new SequenceNode(span, items);
             case NodeForm.PlainText:
-                return new ScalarNode(span, span.Text, ScalarKind.Text);
+                return new ScalarNode(span);
             case NodeForm.OtherText:
                 return new ScalarNode(span, Text(), ScalarKind.Text);
             case NodeForm.Number:

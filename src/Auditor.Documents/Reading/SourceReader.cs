@@ -17,6 +17,10 @@ public static class SourceReader
     public static SourceText? Read(string fullPath, string displayPath, Problems problems, ReadingLimits? limits = null)
         => Read(fullPath, displayPath, problems, new ReadingBudget(limits ?? ReadingLimits.Default))?.Text;
 
+    /// <summary>Reads a file as <see cref="Read(string, string, Problems, ReadingLimits?)"/> does, with the SHA-256 of its bytes.</summary>
+    public static SourceFile? ReadWithHash(string fullPath, string displayPath, Problems problems)
+        => ReadFile(fullPath, displayPath, problems, new ReadingBudget(ReadingLimits.Default));
+
     internal static SourceFile? Read(
         string fullPath, string displayPath, Problems problems, ReadingBudget budget, IReadOnlyDictionary<string, string>? texts = null)
     {
@@ -34,13 +38,14 @@ public static class SourceReader
         var nowhere = new SourceText(displayPath, "").WholeSpan();
         try
         {
-            if (Directory.Exists(fullPath))
+            var file = FileAt(fullPath);
+            if (!file.Exists && Directory.Exists(file.FullName))
             {
                 problems.Add(FileProblems.IsFolder(nowhere));
                 return null;
             }
 
-            var bytes = ReadBytes(FileAt(fullPath), budget);
+            var bytes = ReadBytes(file, budget);
             if (bytes is null)
             {
                 problems.Add(FileProblems.TooLarge(nowhere, budget.Limits.Bytes));
@@ -67,7 +72,7 @@ public static class SourceReader
     private static FileInfo FileAt(string fullPath)
     {
         var file = new FileInfo(fullPath);
-        return file.ResolveLinkTarget(returnFinalTarget: true) as FileInfo ?? file;
+        return file.Attributes.HasFlag(FileAttributes.ReparsePoint) && file.ResolveLinkTarget(returnFinalTarget: true) is { } end ? new FileInfo(end.FullName) : file;
     }
 
     /// <summary>Reads all bytes, or returns null when there are more than allowed.</summary>
@@ -84,9 +89,14 @@ public static class SourceReader
             return null;
         }
 
-        using var stream = file.OpenRead();
+        using var handle = File.OpenHandle(file.FullName, FileMode.Open, FileAccess.Read, FileShare.ReadWrite | FileShare.Delete);
         var bytes = new byte[file.Length];
-        var read = stream.ReadAtLeast(bytes, bytes.Length, throwOnEndOfStream: false);
+        var read = 0;
+        while (read < bytes.Length && RandomAccess.Read(handle, bytes.AsSpan(read), read) is var more and > 0)
+        {
+            read += more;
+        }
+
         return read == bytes.Length ? bytes : bytes[..read];
     }
 
@@ -99,8 +109,10 @@ public static class SourceReader
         }
 
         var content = bytes.StartsWith<byte>([0xEF, 0xBB, 0xBF]) ? bytes[3..] : bytes;
-        var buffer = new char[content.Length];
+        var buffer = ArrayPool<char>.Shared.Rent(content.Length);
         var status = Utf8.ToUtf16(content, buffer, out var read, out var written, replaceInvalidSequences: false);
+        var text = new string(buffer, 0, written);
+        ArrayPool<char>.Shared.Return(buffer);
         if (status != OperationStatus.Done)
         {
             var shown = new SourceText(displayPath, Encoding.UTF8.GetString(content));
@@ -108,7 +120,7 @@ public static class SourceReader
             return null;
         }
 
-        var source = new SourceText(displayPath, new string(buffer, 0, written));
+        var source = new SourceText(displayPath, text);
         return ForbiddenCharacters.Report(source, problems) ? null : source;
     }
 }

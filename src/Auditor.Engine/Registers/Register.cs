@@ -12,21 +12,10 @@ public sealed record Register(IReadOnlyList<RegisterRow> Rows)
     /// <param name="problems">Receives what is wrong with its files.</param>
     public static Register Load(RuleHome home, Problems problems)
     {
-        var folder = Path.Combine(home.Folder, "register");
-        var schema = home.Schema("register");
-        var rows = new List<RegisterRow>();
-        foreach (var file in Directory.EnumerateFiles(folder, "*.yaml").Order(StringComparer.Ordinal))
-        {
-            var display = $"{home.Display}/register/{Path.GetFileName(file)}";
-            if (SourceReader.Read(file, display, problems) is { } source && YamlReader.Read(source, problems) is MappingNode root && root.Find("register") is not null)
-            {
-                schema.Validate(root, problems);
-                rows.AddRange(root.Mappings("rows").Select(row =>
-                    new RegisterRow(row.Text("id") ?? "", root.Text("register")!, row.Text("requirement") ?? "", row.Text("decidable") ?? "judgement")));
-            }
-        }
-
-        return new Register(rows);
+        var reader = new RuleFileReader(home, problems, PreparedRules.Open(home), RuleFileReader.OfRegister);
+        var paths = Directory.EnumerateFiles(Path.Combine(home.Folder, "register"), "*.yaml").Order(StringComparer.Ordinal)
+            .Select(path => (path, $"{home.Display}/register/{Path.GetFileName(path)}")).ToList();
+        return new Register([.. reader.Read(paths).Where(file => file.Kind == "register").SelectMany(file => RowsOf(file.Root))]);
     }
 
     /// <summary>The rows that no rule of the set decides.</summary>
@@ -38,4 +27,7 @@ public sealed record Register(IReadOnlyList<RegisterRow> Rows)
 
     /// <summary>Ids of the rows that rules of the set say they decide.</summary>
     public static IReadOnlySet<string> Covered(RuleSet rules) => rules.Rules.SelectMany(rule => rule.Covers).ToHashSet(StringComparer.Ordinal);
+
+    private static IEnumerable<RegisterRow> RowsOf(MappingNode root) => root.Mappings("rows").Select(row =>
+        new RegisterRow(row.Text("id") ?? "", root.Text("register")!, row.Text("requirement") ?? "", row.Text("decidable") ?? "judgement"));
 }

@@ -6,7 +6,7 @@ namespace Auditor.Engine.RuleSets;
 
 /// <summary>
 /// The trees of rule files as bytes in one file beside the shipped rule data, so that nothing has to be read as YAML and held against
-/// schemas again. A tree is found by the SHA-256 of its text: a file that was edited is not found and is read in full. The whole is
+/// schemas again. A tree is found by the SHA-256 of its file: a file that was edited is not found and is read in full. The whole is
 /// passed over when it is not whole, or was made by another build or with other schemas.
 /// </summary>
 public sealed class PreparedRules
@@ -42,7 +42,8 @@ public sealed class PreparedRules
     /// <returns>How many files were prepared.</returns>
     public static int Write(RuleHome home)
     {
-        var reader = new RuleFileReader(home, new Problems(), new PreparedRules([], []));
+        var kinds = RuleFileReader.OfSets.Concat(RuleFileReader.OfRegister).ToDictionary();
+        var reader = new RuleFileReader(home, new Problems(), new PreparedRules([], []), kinds);
         var paths = Directory.EnumerateFiles(home.Folder, "*.yaml", SearchOption.AllDirectories).Order(StringComparer.Ordinal)
             .Select(path => (path, Path.GetRelativePath(home.Folder, path))).ToList();
         var files = reader.Read(paths).DistinctBy(file => file.Sha256, StringComparer.Ordinal).OrderBy(file => file.Sha256, StringComparer.Ordinal).ToList();
@@ -53,9 +54,9 @@ public sealed class PreparedRules
         return files.Count;
     }
 
-    /// <summary>Makes the tree of a text, without problems and held against its schema; null for a text that was not prepared.</summary>
-    public Node? Find(SourceText source, string sha256) => _places.TryGetValue(sha256, out var place)
-        ? new NodeReader(source, _bytes.AsMemory(place.Start, place.Length)).Read()
+    /// <summary>Makes the tree of a file, without problems and held against its schema; null for a file that was not prepared.</summary>
+    public Node? Find(SourceFile source) => _places.TryGetValue(source.Sha256, out var place)
+        ? new NodeReader(source.Text, _bytes.AsMemory(place.Start, place.Length)).Read()
         : null;
 
     private static byte[] Whole(List<RuleFile> files, byte[] maker)

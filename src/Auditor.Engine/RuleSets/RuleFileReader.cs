@@ -1,5 +1,3 @@
-using System.Security.Cryptography;
-using System.Text;
 using Auditor.Documents;
 
 namespace Auditor.Engine.RuleSets;
@@ -8,9 +6,11 @@ namespace Auditor.Engine.RuleSets;
 /// <param name="home">Where the schemas stand.</param>
 /// <param name="problems">Receives what is wrong.</param>
 /// <param name="prepared">Trees that need neither.</param>
-internal sealed class RuleFileReader(RuleHome home, Problems problems, PreparedRules prepared)
+/// <param name="kinds">Which kinds of files are wanted, each with the name of its schema.</param>
+internal sealed class RuleFileReader(RuleHome home, Problems problems, PreparedRules prepared, IReadOnlyDictionary<string, string> kinds)
 {
-    private static readonly Dictionary<string, string> SchemaOfKind = new()
+    /// <summary>What sets are put together from.</summary>
+    public static readonly IReadOnlyDictionary<string, string> OfSets = new Dictionary<string, string>
     {
         ["lookup"] = "lookup",
         ["table"] = "table",
@@ -20,6 +20,13 @@ internal sealed class RuleFileReader(RuleHome home, Problems problems, PreparedR
         ["adjustment"] = "adjustment",
         ["picture"] = "picture",
         ["set"] = "set",
+    };
+
+    /// <summary>What the register of requirements consists of.</summary>
+    public static readonly IReadOnlyDictionary<string, string> OfRegister = new Dictionary<string, string>
+    {
+        ["register"] = "register",
+        ["sources"] = "sources",
     };
 
     /// <summary>Reads many files, side by side; the result keeps their order. Files with problems are left out.</summary>
@@ -33,19 +40,18 @@ internal sealed class RuleFileReader(RuleHome home, Problems problems, PreparedR
     /// <summary>Reads one file; null, with problems added, when it is not valid.</summary>
     public RuleFile? Read(string fullPath, string displayPath)
     {
-        if (SourceReader.Read(fullPath, displayPath, problems) is not { } source)
+        if (SourceReader.ReadWithHash(fullPath, displayPath, problems) is not { } source)
         {
             return null;
         }
 
-        var sha256 = Convert.ToHexStringLower(SHA256.HashData(Encoding.UTF8.GetBytes(source.Text)));
-        if (prepared.Find(source, sha256) is MappingNode known)
+        if (prepared.Find(source) is MappingNode known && kinds.ContainsKey(known.Entries[0].Key.Value))
         {
-            return new RuleFile(known.Entries[0].Key.Value, known, sha256);
+            return new RuleFile(known.Entries[0].Key.Value, known, source.Sha256);
         }
 
         var own = new Problems();
-        var file = Check(YamlReader.Read(source, own), sha256, own);
+        var file = Check(YamlReader.Read(source.Text, own), source.Sha256, own);
         foreach (var problem in own.All)
         {
             problems.Add(problem);
@@ -66,9 +72,9 @@ internal sealed class RuleFileReader(RuleHome home, Problems problems, PreparedR
             return null;
         }
 
-        if (!SchemaOfKind.TryGetValue(first.Key.Value, out var schema))
+        if (!kinds.TryGetValue(first.Key.Value, out var schema))
         {
-            own.Add(RuleMessages.UnknownKind(first.Key.Span, first.Key.Value, SchemaOfKind.Keys));
+            own.Add(RuleMessages.UnknownKind(first.Key.Span, first.Key.Value, kinds.Keys));
             return null;
         }
 

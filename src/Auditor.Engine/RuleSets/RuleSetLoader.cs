@@ -20,7 +20,7 @@ public sealed class RuleSetLoader
     {
         _home = home;
         _problems = problems;
-        _reader = new RuleFileReader(home, problems, PreparedRules.Open(home));
+        _reader = new RuleFileReader(home, problems, PreparedRules.Open(home), RuleFileReader.OfSets);
     }
 
     /// <summary>Loads a rule set.</summary>

@@ -66,7 +66,7 @@ internal sealed class TableLayout
             path[number] = value;
         }
 
-        return Array.Exists(path, part => part is null) ? null : path.Cast<object>().ToArray();
+        return Array.Exists(path, part => part is null) ? null : (object[])path!;
     }
 
     private static List<Column> ColumnsOf(MappingNode file, Lookup lookup, List<int> across, Problems problems)

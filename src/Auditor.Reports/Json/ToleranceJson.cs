@@ -12,23 +12,26 @@ internal static class ToleranceJson
         if (finding.WorstCase is not { } worst)
         {
             output.Null("withinTolerances");
-            return;
         }
-
-        output.Object("withinTolerances", () =>
+        else
         {
-            output.Text("verdict", worst.Judgement.Verdict?.Word());
-            output.Flag("searched", worst.WasSearched);
-            output.Array("corner", worst.Corner, value => output.Object(null, () =>
-            {
-                Input(output, value.Input.Input);
-                output.Number("value", value.Input.Input.Slot.Unit!.FromCoherent(value.Number));
-                output.Text("unit", value.Input.Input.Slot.Unit.Symbol);
-            }));
-            output.Array("effects", worst.Effects, effect => output.Object(null, () => Effect(output, effect)));
-            Samples(output, finding.Share);
-        });
+            Write(output, worst, finding.Share);
+        }
     }
+
+    private static void Write(JsonOutput output, WorstCase worst, SampleShare? share) => output.Object("withinTolerances", () =>
+    {
+        output.Text("verdict", worst.Judgement.Verdict?.Word());
+        output.Flag("searched", worst.WasSearched);
+        output.Array("corner", worst.Corner, value => output.Object(null, () =>
+        {
+            Input(output, value.Input.Input);
+            output.Number("value", value.Input.Input.Slot.Unit!.FromCoherent(value.Number));
+            output.Text("unit", value.Input.Input.Slot.Unit.Symbol);
+        }));
+        output.Array("effects", worst.Effects, effect => output.Object(null, () => Effect(output, effect)));
+        Samples(output, share);
+    });
 
     private static void Input(JsonOutput output, SubjectInput input)
     {

@@ -3,21 +3,16 @@ using Auditor.Testing;
 
 namespace Auditor.Cli.Tests;
 
-/// <summary>
-/// Runs the program as a user does, in a folder of the checkout or elsewhere: the published one that the environment variable
-/// <c>AUDITOR_PROGRAM</c> names by its full path, else the one just built.
-/// </summary>
+/// <summary>Runs the program as a user does, in a folder of the checkout or elsewhere.</summary>
 internal static class Tool
 {
-    private static readonly string Program = Environment.GetEnvironmentVariable("AUDITOR_PROGRAM") is { Length: > 0 } published ? published : Path.Combine(AppContext.BaseDirectory, "auditor");
-
     /// <summary>Runs a command line from the root of the checkout.</summary>
     public static ToolResult Run(params string[] arguments) => RunIn(Repository.PathOf("."), arguments);
 
     /// <summary>Runs a command line in a folder, with further environment variables as <c>NAME=value</c> before the arguments.</summary>
     public static ToolResult RunIn(string folder, IReadOnlyList<string> arguments, params (string Name, string Value)[] environment)
     {
-        var start = new ProcessStartInfo(Program) { UseShellExecute = false, WorkingDirectory = folder, RedirectStandardOutput = true, RedirectStandardError = true, RedirectStandardInput = true };
+        var start = new ProcessStartInfo(ProgramUnderTest.Path) { UseShellExecute = false, WorkingDirectory = folder, RedirectStandardOutput = true, RedirectStandardError = true, RedirectStandardInput = true };
         foreach (var argument in arguments)
         {
             start.ArgumentList.Add(argument);

@@ -31,6 +31,27 @@ public class YamlReaderProperties
         },
         iter: 20_000);
 
+    /// <summary>The tokens of a long text are found by another thread: that changes neither the tree nor what is told, faults among them.</summary>
+    [Fact]
+    public void A_long_text_is_read_as_a_short_one() => Gen.OneOf(Texts, Documents).Sample(
+        text =>
+        {
+            var comment = "#" + new string('x', YamlEvents.LongText) + "\n";
+            Assert.Equal(Told("#\n" + text, 2), Told(comment + text, comment.Length));
+        },
+        iter: 500);
+
+    private static string Told(string text, int from)
+    {
+        var node = Yaml.Read(text, out var problems);
+        return string.Join('\n', [
+            .. (node?.AndAllBelow() ?? []).Select(each => $"{each.GetType().Name} {Past(each.Span.Start)} {Past(each.Span.End)} {(each as ScalarNode)?.Text}"),
+            .. problems.All.Select(problem => $"{problem.Code} {problem.Message} {Past(problem.Span?.Start)} {Past(problem.Span?.End)} {problem.Help}"),
+        ]);
+
+        int Past(int? place) => Math.Max((place ?? 0) - from, 0);
+    }
+
     [Fact]
     public void No_bytes_make_the_reader_throw()
     {

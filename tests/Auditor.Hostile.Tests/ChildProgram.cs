@@ -1,5 +1,6 @@
 using System.Diagnostics;
 using System.Text;
+using Auditor.Testing;
 
 namespace Auditor.Hostile.Tests;
 
@@ -28,7 +29,7 @@ internal sealed class ChildProgram : IDisposable
     {
         var start = new ProcessStartInfo("bash") { UseShellExecute = false, WorkingDirectory = folder, RedirectStandardOutput = true, RedirectStandardError = true };
         start.ArgumentList.Add("-c");
-        start.ArgumentList.Add(line.Replace("$AUDITOR", $"dotnet '{Path.Combine(AppContext.BaseDirectory, "auditor.dll")}'", StringComparison.Ordinal));
+        start.ArgumentList.Add(line.Replace("$AUDITOR", $"'{ProgramUnderTest.Path}'", StringComparison.Ordinal));
         return new ChildProgram(System.Diagnostics.Process.Start(start)!);
     }
 

@@ -6,6 +6,9 @@ public sealed class ScalarNode : Node
     private readonly double _number;
     private string? _text;
 
+    /// <summary>What <see cref="ScalarPlaces"/> finds, once somebody asked; empty where the text is just what stands in the source.</summary>
+    private int[]? _offsets;
+
     /// <summary>Makes a scalar.</summary>
     /// <param name="span">Where it stands.</param>
     /// <param name="text">Its text, without quotes and with escapes resolved.</param>
@@ -49,7 +52,8 @@ public sealed class ScalarNode : Node
     {
         ArgumentOutOfRangeException.ThrowIfNegative(indexInText);
         ArgumentOutOfRangeException.ThrowIfGreaterThan(indexInText, Text.Length);
-        return ScalarPlaces.OffsetOf(this, indexInText);
+        var offsets = _offsets ??= ScalarPlaces.Of(this) ?? [];
+        return offsets.Length == 0 ? Span.Start + indexInText : offsets[indexInText];
     }
 
     /// <summary>Returns the stretch of the source that holds a part of <see cref="Text"/>.</summary>

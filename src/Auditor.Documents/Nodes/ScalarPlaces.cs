@@ -3,24 +3,29 @@ namespace Auditor.Documents;
 /// <summary>Walks a scalar as written alongside its text, to find where each character of the text stands.</summary>
 internal static class ScalarPlaces
 {
-    public static int OffsetOf(ScalarNode scalar, int index)
+    /// <summary>The offset in the source of each character of the text, and of the place after the last; null where they follow the start one by one.</summary>
+    public static int[]? Of(ScalarNode scalar)
     {
         var written = scalar.Span.Source.Text.AsSpan(scalar.Span.Start, scalar.Span.Length);
-        if (written.SequenceEqual(scalar.Text))
+        var text = scalar.Text;
+        if (written.SequenceEqual(text))
         {
-            return scalar.Span.Start + index;
+            return null;
         }
 
+        var offsets = new int[text.Length + 1];
         var properties = ScalarTags.PropertiesLength(written);
         var quote = properties < written.Length ? written[properties] : '\0';
         var at = properties + StartOfContent(written[properties..]);
-        for (var i = 0; i < index; i++)
+        for (var i = 0; i < text.Length; i++)
         {
-            at = At(written, scalar.Text, i, at);
-            at = IsFirstOfEscapedPair(written, scalar.Text, i, at) ? at : After(written, at, quote);
+            at = At(written, text, i, at);
+            offsets[i] = scalar.Span.Start + at;
+            at = IsFirstOfEscapedPair(written, text, i, at) ? at : After(written, at, quote);
         }
 
-        return scalar.Span.Start + (index < scalar.Text.Length ? At(written, scalar.Text, index, at) : at);
+        offsets[^1] = scalar.Span.Start + at;
+        return offsets;
     }
 
     private static int StartOfContent(ReadOnlySpan<char> written)

@@ -4,10 +4,22 @@ using YamlDotNet.Core.Events;
 namespace Auditor.Documents;
 
 /// <summary>The event stream of a text, with offsets as spans.</summary>
-/// <param name="source">The text to parse.</param>
-internal sealed class YamlEvents(SourceText source)
+internal sealed class YamlEvents : IDisposable
 {
-    private readonly Parser _parser = new(new Scanner(new StringReader(source.Text), skipComments: true));
+    /// <summary>In a text with so many characters tokens are looked for by another thread while events are made of them.</summary>
+    public const int LongText = 1 << 17;
+
+    private readonly SourceText _source;
+    private readonly TokensAhead? _ahead;
+    private readonly Parser _parser;
+
+    /// <summary>Begins with a text.</summary>
+    public YamlEvents(SourceText source)
+    {
+        _source = source;
+        _ahead = source.Text.Length < LongText ? null : new TokensAhead(source.Text);
+        _parser = new Parser(_ahead ?? (IScanner)new Scanner(new StringReader(source.Text), skipComments: true));
+    }
 
     /// <summary>How far the events before the current one reach into the text.</summary>
     public int Position { get; private set; }
@@ -33,8 +45,11 @@ internal sealed class YamlEvents(SourceText source)
     {
         var (start, end) = (Offset(item.Start), Offset(item.End));
         start = start == end && item is Scalar ? Math.Max(start, Position) : start;
-        return new SourceSpan(source, start, Math.Max(start, end));
+        return new SourceSpan(_source, start, Math.Max(start, end));
     }
 
-    private int Offset(Mark mark) => (int)Math.Clamp(mark.Index, 0, source.Text.Length);
+    /// <summary>Needs no more events.</summary>
+    public void Dispose() => _ahead?.Dispose();
+
+    private int Offset(Mark mark) => (int)Math.Clamp(mark.Index, 0, _source.Text.Length);
 }

@@ -24,7 +24,7 @@ public static class YamlReader
             return null;
         }
 
-        var events = new YamlEvents(source);
+        using var events = new YamlEvents(source);
         var builder = new TreeBuilder(events, source, problems, budget);
         try
         {

@@ -15,7 +15,8 @@ namespace Auditor.Engine.Evidence;
 /// Tells how a value came about, by evaluating its formula once more with somebody listening. Costs nothing where nobody asks.
 /// </summary>
 /// <param name="rules">The rule set.</param>
-public sealed class EvidenceBuilder(RuleSet rules)
+/// <param name="unfolds">Whether the quantities that a formula rests on are derived as well, and theirs in turn, or only named.</param>
+public sealed class EvidenceBuilder(RuleSet rules, bool unfolds = true)
 {
     private readonly HashSet<(ISubject Subject, string Symbol)> _told = [];
 
@@ -90,7 +91,7 @@ public sealed class EvidenceBuilder(RuleSet rules)
         }
         else if (reading is { Quantity: { } quantity, Subject: { } subject } && seen.Add((subject, quantity.Symbol)))
         {
-            var derivation = _told.Contains((subject, quantity.Symbol)) || !RuntimeHelpers.TryEnsureSufficientExecutionStack() ? null : Of(subject, quantity);
+            var derivation = !unfolds || _told.Contains((subject, quantity.Symbol)) || !RuntimeHelpers.TryEnsureSufficientExecutionStack() ? null : Of(subject, quantity);
             yield return new EvidenceSource(
                 EvidenceKind.Quantity, $"{subject.Key} {quantity.Symbol}", ValueText.Show(reading.Value, quantity.Unit), "", derivation is null ? "told elsewhere" : "", derivation);
         }

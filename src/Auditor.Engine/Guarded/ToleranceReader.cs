@@ -1,4 +1,5 @@
 using Auditor.Engine.Adjustments;
+using Auditor.Engine.Evaluation;
 using Auditor.Engine.Installation;
 using Auditor.Engine.Variation;
 using Auditor.Formulas.Subjects;
@@ -14,12 +15,19 @@ namespace Auditor.Engine.Guarded;
 /// </summary>
 public static class ToleranceReader
 {
+    /// <summary>So many subjects are looked at by one thread at a stretch.</summary>
+    private const int PartSize = 512;
+
     /// <summary>The toleranced inputs, in the order of subjects and inputs.</summary>
-    public static IReadOnlyList<TolerancedInput> Read(Design design)
+    public static IReadOnlyList<TolerancedInput> Read(Design design) =>
+        [.. InParts.Make(design.Subjects.Count, PartSize, range => Read(design, range)).SelectMany(part => part)];
+
+    private static List<TolerancedInput> Read(Design design, Range range)
     {
         var found = new List<TolerancedInput>();
-        foreach (var subject in design.Subjects)
+        for (var i = range.Start.Value; i < range.End.Value; i++)
         {
+            var subject = design.Subjects[i];
             foreach (var slot in subject.Shape.Inputs)
             {
                 if (slot.Type.Kind == FormulaKind.Quantity && Read(design, subject, slot) is { } input)
@@ -66,7 +74,7 @@ public static class ToleranceReader
 
     private static TolerancedInput? Read(Design design, DesignSubject subject, InputSlot slot)
     {
-        if (subject.Input(slot.Index).IsMissing || subject.Source(slot) is not { } scalar || !QuantityText.TryParse(scalar.Text, out var stated, out _))
+        if (subject.Input(slot.Index).IsMissing || subject.Source(slot) is not { } scalar || design.Stated(scalar.Text) is not { } stated)
         {
             return null;
         }

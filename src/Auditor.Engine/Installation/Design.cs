@@ -11,6 +11,10 @@ namespace Auditor.Engine.Installation;
 /// <summary>An installation as its design file describes it: the tree of subjects, ready to be evaluated.</summary>
 public sealed class Design
 {
+    /// <summary>Where a thread gathers the inputs of one subject after the other; null while it does.</summary>
+    [ThreadStatic]
+    private static InputGathering? _gathering;
+
     private readonly DesignSchema _schema;
     private readonly MappingNode? _types;
 
@@ -45,7 +49,9 @@ public sealed class Design
     internal GivenInputs InputsOf(DesignSubject subject)
     {
         var tree = _schema.TreeOf(subject.Shape);
-        var given = new GivenInputs(subject.Shape.Inputs.Count);
+        var given = _gathering ?? new InputGathering();
+        _gathering = null;
+        given.Begin(subject.Shape.Inputs.Count);
         tree.Own(subject.Node, given);
         if (_types is not null)
         {
@@ -66,8 +72,12 @@ public sealed class Design
             }
         }
 
-        return given;
+        _gathering = given;
+        return given.Packed();
     }
+
+    /// <summary>What the text of a quantity says; null where it is none.</summary>
+    internal StatedQuantity? Stated(string text) => _quantities.GetOrAdd(text, static text => QuantityText.TryParse(text, out var read, out _) ? read : null);
 
     internal IEnumerable<(MappingNode Holder, string List)> NamedHolders(DesignSubject subject) =>
         _schema.NamedGroups(subject.Shape)
@@ -92,7 +102,7 @@ public sealed class Design
             return Value.Of(scalar.Number);
         }
 
-        var stated = _quantities.GetOrAdd(scalar.Text, static text => QuantityText.TryParse(text, out var read, out _) ? read : null);
+        var stated = Stated(scalar.Text);
         return stated is not null && stated.Quantity.Dimension == slot.Type.Dimension
             ? Value.Of(stated.Quantity.Value, stated.Standing == Standing.Assumed ? Marks.Assumed : Marks.None)
             : Value.NotGiven(subject, slot.Index);

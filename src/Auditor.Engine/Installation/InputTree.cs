@@ -33,7 +33,7 @@ internal sealed class InputTree
     }
 
     /// <summary>Takes what a mapping itself says.</summary>
-    public void Own(MappingNode mapping, GivenInputs inputs)
+    public void Own(MappingNode mapping, InputGathering inputs)
     {
         foreach (var entry in mapping.Entries)
         {
@@ -45,7 +45,7 @@ internal sealed class InputTree
     /// <param name="mapping">The mapping.</param>
     /// <param name="types">The <c>types</c> of the design.</param>
     /// <param name="inputs">Receives it.</param>
-    public void Named(MappingNode mapping, MappingNode types, GivenInputs inputs)
+    public void Named(MappingNode mapping, MappingNode types, InputGathering inputs)
     {
         if (_types is not null && mapping.Text("type") is { } name && types.Mapping(_types)?.Mapping(name) is { } type)
         {
@@ -65,7 +65,7 @@ internal sealed class InputTree
     }
 
     /// <summary>Takes an entry and what is within it. A named type says nothing of a mapping that has named types of its own.</summary>
-    private void Take(MappingEntry entry, GivenInputs inputs, bool isNamed)
+    private void Take(MappingEntry entry, InputGathering inputs, bool isNamed)
     {
         if (!_below.TryGetValue(entry.Key.Value, out var tree))
         {

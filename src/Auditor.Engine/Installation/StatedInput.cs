@@ -18,7 +18,8 @@ public sealed record StatedInput(DesignSubject Subject, InputSlot Slot, string T
     public static IEnumerable<StatedInput> Of(DesignSubject subject) =>
         subject.Shape.Inputs.Where(slot => slot.Type.Kind != FormulaKind.Group).Select(slot => Of(subject, slot)).OfType<StatedInput>();
 
-    private static StatedInput? Of(DesignSubject subject, InputSlot slot) => subject.Statement(slot) switch
+    /// <summary>One input as the design states it; null where it does not.</summary>
+    public static StatedInput? Of(DesignSubject subject, InputSlot slot) => subject.Statement(slot) switch
     {
         ScalarNode scalar => new StatedInput(subject, slot, scalar.Text, StandingOf(slot, scalar), FromOf(subject, slot, scalar), scalar.Span),
         SequenceNode list => new StatedInput(subject, slot, Words(list), Standing.Designed, FromOf(subject, slot, list), list.Span),

@@ -10,8 +10,7 @@ namespace Auditor.Reports.Model;
 /// </summary>
 internal sealed class FormulaLines(RuleSet rules)
 {
-    /// <summary>Shared by all findings, so that each quantity is unfolded once only: of the unfolding, the lines need none.</summary>
-    private readonly EvidenceBuilder _evidence = new(rules);
+    private readonly EvidenceBuilder _evidence = new(rules, unfolds: false);
 
     public IReadOnlyList<FormulaLine> Of(Finding finding) =>
         [.. _evidence.Of(finding)

@@ -1,6 +1,7 @@
 using Auditor.Engine.Evidence;
 using Auditor.Engine.Findings;
 using Auditor.Engine.Installation;
+using Auditor.Formulas.Subjects;
 using Auditor.Formulas.Types;
 using Auditor.Formulas.Values;
 
@@ -36,7 +37,8 @@ internal sealed class Supports
 
     private IReadOnlyList<AssumedInput> AssumedIn(AuditResult result)
     {
-        var inputs = result.Design.Subjects.SelectMany(StatedInput.Of).Where(IsAssumed).ToArray();
+        var inputs = result.Design.Subjects
+            .SelectMany(subject => subject.Shape.Inputs.Where(slot => IsAssumed(subject, slot)).Select(slot => StatedInput.Of(subject, slot))).OfType<StatedInput>().ToArray();
         if (inputs.Length == 0)
         {
             return [];
@@ -52,8 +54,8 @@ internal sealed class Supports
             .SelectMany(finding => Of(finding).Where(foundation => foundation.Kind == kind).Select(foundation => (foundation, finding.Key)))
             .ToLookup(pair => (pair.foundation.Subject, pair.foundation.Name, pair.foundation.Text), pair => pair.Key);
 
-    private static bool IsAssumed(StatedInput input) =>
-        input.Slot.Type.Kind == FormulaKind.Quantity && input.Subject.Input(input.Slot.Index).Marks.HasFlag(Marks.Assumed);
+    private static bool IsAssumed(DesignSubject subject, InputSlot slot) =>
+        slot.Type.Kind == FormulaKind.Quantity && subject.Input(slot.Index).Marks.HasFlag(Marks.Assumed);
 
     /// <summary>An assumed input and the findings that hang on it.</summary>
     internal sealed record AssumedInput(StatedInput Input, IReadOnlyList<string> Findings);

@@ -15,7 +15,7 @@ trap 'rm -rf "$work"' EXIT
 # What is committed is measured, out of the checkout, whose lock files publishing for one system would change.
 mkdir "$work/checkout"
 git -C "$root" archive HEAD | tar -x -C "$work/checkout"
-dotnet publish "$work/checkout/src/Auditor.Cli" -c Release -r linux-x64 --self-contained false -p:PublishReadyToRun=true -o "$work/auditor" -v quiet >&2
+dotnet publish "$work/checkout/src/Auditor.Cli" -c Release -r linux-x64 -p:PublishAot=true -o "$work/auditor" -v quiet >&2
 mkdir "$work/empty"
 cat > "$work/empty/empty.csproj" <<'X'
 <Project Sdk="Microsoft.NET.Sdk">

@@ -2,6 +2,7 @@
 # Measures the whole program beside an empty .NET program and a Node.js script that only parses and validates the same design.
 # Usage: compare.sh [ROUNDS] [CIRCUITS...]; without arguments 5 rounds of 40, 1,000, 10,000 and 100,000 circuits.
 # Prints medians in seconds, ratios, peak memory, and the exponent of growth between the two largest sizes.
+# A design may state two million values, some 38,000 circuits: larger sizes are several designs of at most 25,000 circuits in one run.
 # The runs of a round alternate, so that a machine that is busy for a while is so for all of them.
 set -euo pipefail
 cd "$(dirname "$0")"
@@ -39,11 +40,14 @@ median() { sort -n -k "$2" "$1" | awk -v column="$2" '{ values[NR] = $column } E
 
 printf '%9s %9s %9s %9s %9s %9s %11s %11s\n' circuits empty node auditor /empty /node 'node MB' 'auditor MB'
 for size in "${sizes[@]}"; do
-  node generate.mjs "$size" > "$work/$size.design.yaml"
+  mkdir "$work/$size"
+  for ((left = size; left > 0; left -= 25000)); do
+    node generate.mjs $((left < 25000 ? left : 25000)) > "$work/$size/$left.design.yaml"
+  done
   for _ in $(seq "$rounds"); do
     measure "$work/empty.$size" "$work/empty/out/empty"
-    measure "$work/node.$size" node "$work/parse.mjs" "$root/rules/schema/design.schema.json" "$work/$size.design.yaml"
-    measure "$work/auditor.$size" "$work/auditor/auditor" audit "$work/$size.design.yaml" --quiet --write "$work/out.json"
+    measure "$work/node.$size" node "$work/parse.mjs" "$root/rules/schema/design.schema.json" "$work/$size"/*.design.yaml
+    measure "$work/auditor.$size" "$work/auditor/auditor" audit "$work/$size"/*.design.yaml --quiet --write '{name}.findings.json'
   done
   a=$(median "$work/empty.$size" 1) b=$(median "$work/node.$size" 1) c=$(median "$work/auditor.$size" 1)
   awk -v n="$size" -v a="$a" -v b="$b" -v c="$c" -v mb="$(median "$work/node.$size" 2)" -v mc="$(median "$work/auditor.$size" 2)" \

@@ -2,7 +2,7 @@
 # Writes the committed reports of every example, or with --check tells which of them are stale.
 set -euo pipefail
 cd "$(dirname "$0")/.."
-auditor=src/Auditor.Cli/bin/Release/net10.0/auditor
+auditor=${AUDITOR_PROGRAM:-$PWD/src/Auditor.Cli/bin/Release/net10.0/auditor}
 out=examples
 if [ "${1:-}" = "--check" ]; then
   out=$(mktemp -d)
@@ -13,7 +13,7 @@ fi
 root=$PWD
 cd "$out/.."
 folder=$(basename "$out")
-"$root/$auditor" audit "$folder" --as-of 2026-12-01 --quiet \
+"$auditor" audit "$folder" --as-of 2026-12-01 --quiet \
   --write '{name}.findings.json' --write '{name}.report.md' --write '{name}.report.txt' || [ $? -eq 1 ]
 
 if [ "${1:-}" = "--check" ]; then

@@ -10,8 +10,31 @@ public class QuickSchemaTests
     public static TheoryData<string, string> Shipped =>
     [
         ("design", "examples"), ("table", "rules/tables"), ("lookup", "rules/tables"), ("curve", "rules/curves"), ("sheet", "rules/sheets"),
-        ("provision", "rules/provisions"), ("set", "rules/sets"),
+        ("provision", "rules/provisions"), ("set", "rules/sets"), ("adjustment", "rules/adjustments"), ("picture", "rules/pictures"), ("register", "rules/register"),
     ];
+
+    [Fact]
+    public void The_shipped_schedule_needs_no_validator()
+    {
+        var schema = Schema.Parse(new SourceText("schedule", File.ReadAllText(Repository.PathOf("templates/schedule.schema.json"))));
+        Assert.Equal(Acceptance.Yes, schema.Look(Yaml.Read(File.ReadAllText(Repository.PathOf("templates/schedule.yaml")))));
+    }
+
+    [Theory]
+    [InlineData("""{ "minLength": 0 }""", "''", true)]
+    [InlineData("""{ "minLength": 1 }""", "''", false)]
+    [InlineData("""{ "minLength": 1 }""", "a", true)]
+    [InlineData("""{ "minLength": 1 }""", "7", true)]
+    [InlineData("""{ "minLength": 1, "type": "string" }""", "7", false)]
+    public void A_text_that_has_to_say_something_is_judged_as_by_the_validator(string json, string value, bool isTaken)
+    {
+        var schema = Schema.Parse(new SourceText("text", json));
+        var problems = new Problems();
+        schema.Explain(Yaml.Read(value), problems);
+
+        Assert.Equal(isTaken, !problems.HasErrors);
+        Assert.Equal(isTaken ? Acceptance.Yes : Acceptance.No, schema.Look(Yaml.Read(value)));
+    }
 
     [Theory]
     [MemberData(nameof(Shipped))]

@@ -26,6 +26,9 @@ internal sealed class QuickSchema
 
     public bool IsDate { get; set; }
 
+    /// <summary>Whether a text has at least one character. Only the validator counts further than that.</summary>
+    public bool IsNotEmpty { get; set; }
+
     /// <summary>Limits of numbers.</summary>
     public QuickLimits Limits { get; set; } = QuickLimits.None;
 
@@ -115,7 +118,7 @@ internal sealed class QuickSchema
     });
 
     private bool IsTaken(string text) =>
-        (Pattern is null || (!text.EndsWith('\n') && Pattern.IsMatch(text))) && (!IsDate || DateOnly.TryParseExact(text, "yyyy-MM-dd", out _));
+        (!IsNotEmpty || text.Length > 0) && (Pattern is null || (!text.EndsWith('\n') && Pattern.IsMatch(text))) && (!IsDate || DateOnly.TryParseExact(text, "yyyy-MM-dd", out _));
 
     private Acceptance Look(SequenceNode sequence)
     {

@@ -131,6 +131,9 @@ internal sealed class QuickSchemaReader(JsonElement root)
             case "maxItems" or "maxProperties":
                 schema.Count = schema.Count with { Most = value.GetDouble() };
                 break;
+            case "minLength" when value.GetDouble() <= 1:
+                schema.IsNotEmpty = value.GetDouble() > 0;
+                break;
             default:
                 schema.IsUnsure |= keyword is "anyOf" or "allOf" or "not" or "multipleOf" or "minLength" or "maxLength";
                 break;

@@ -94,6 +94,22 @@ public class CauseTests
     }
 
     [Fact]
+    public void An_input_whose_name_begins_like_that_of_another_is_no_cause_of_what_reads_the_other()
+    {
+        const string Supply = "supply: { earthing: TN-S, phases: 1, voltage: 230 V }";
+        var rules = Revisions.Rules(
+            ("provisions/rating.yaml", "of: circuit\ncompare: { value: device.rating, at-least: Ib }", "of: installation\ncompare: { value: supply.fault_current, at-most: 6 kA }"),
+            ("provisions/rating.yaml", "given: { device.rating: 16 A, Ib: 10 A }", "given: { supply.fault_current: 6 kA }"));
+        var before = Yard.Design.With(Supply, Supply.With("230 V", "230 V, fault-current: 1 kA, fault-current-by: enquiry"));
+        var after = Yard.Design.With(Supply, Supply.With("230 V", "230 V, fault-current: 2 kA, fault-current-by: measurement"));
+
+        var comparison = RevisionComparison.Of(Revisions.Of(before, rules), Revisions.Of(after, rules));
+
+        Assert.Equal(["supply.fault-current", "supply.fault-current-by"], comparison.Inputs.Select(input => input.Path));
+        Assert.Equal("supply.fault-current", Assert.IsType<InputChange>(Assert.Single(Of(comparison, "rating:-").Causes)).Path);
+    }
+
+    [Fact]
     public void A_departure_that_no_rule_allows_is_found_by_the_departure()
     {
         var departed = Yard.Design + "departures: [{ rule: rcd, subject: A/2, reason: None., agreed-by: T. Example, date: 2026-10-01 }]\n";

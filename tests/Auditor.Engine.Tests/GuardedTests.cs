@@ -65,6 +65,44 @@ public class GuardedTests
         Assert.Null(Audit("guarded", "zs: 0.5 ohm", "9 A ± 10 %").Find("heavy:A/1"));
     }
 
+    [Theory]
+    [InlineData("19.9 ohm", 19.9)]
+    [InlineData("19.99 ohm", 19.99)]
+    [InlineData("19.9999 ohm", 19.9999)]
+    public void A_rule_that_two_tolerances_break_only_shortly_before_it_ceases_to_apply_is_unproven(string limit, double ohms)
+    {
+        // The rule applies up to 20 ohm. Each reading alone takes the sum to 19.8 ohm, both together to 21.6 ohm.
+        using var rules = new TemporaryRules().With("set.yaml", "set: set\ntitle: Set\nuses: { provisions: [strip.yaml] }\n")
+            .With("strip.yaml", Rule("strip", $"when: readings.r1 + readings.r2 <= 20 ohm\ncompare: {{ value: readings.r1 + readings.r2, at-most: {limit} }}\nsays: Made.\n"));
+        var text = Text("guarded", "r1: 9 ohm ± 20 %, r2: 9 ohm ± 20 %", "9 A");
+        var finding = Evaluation.Audit.Run(Small.Build(text, rules.LoadSound("set.yaml")), Small.Today, new Problems()).Find("strip:A/1")!;
+
+        Assert.Equal(Verdict.Unproven, finding.Verdict);
+        Assert.InRange(finding.WorstCase!.Judgement.Value.Number, ohms, 20.00000002);
+        Assert.True(finding.WorstCase.WasSearched);
+    }
+
+    [Theory]
+    [InlineData(10, 4, 0.4, 0.13674)]
+    [InlineData(8, 8, 1.0, 0.09045)]
+    public void A_share_has_the_standard_error_of_the_count_that_it_comes_from(int samples, int kept, double share, double error)
+    {
+        var told = new SampleShare(samples, kept);
+
+        Assert.Equal((share, error), (told.Share, Math.Round(told.StandardError, 5)));
+    }
+
+    [Fact]
+    public void Samples_of_a_reading_spread_by_half_the_uncertainty_of_its_instrument()
+    {
+        // 0.27 ohm are two standard deviations: 1 ohm lies 0.741 of one above 0.9 ohm, which 77.1 % of a normal distribution do not exceed.
+        var audit = Run(Text("simple", "zs: 0.9 ohm", "9 A"), new Acceptance(Decision.Simple, Samples: 20_500, Seed: 3));
+        var (reading, sure) = (audit.Find("reading:A/1")!.Share!, audit.Find("sure:A/1")!.Share!);
+
+        Assert.InRange(reading.Share, 0.756, 0.786);
+        Assert.Equal((20_500, 20_500), (sure.Samples, sure.Kept));
+    }
+
     [Fact]
     public void An_uncertainty_of_what_is_measured_says_nothing_of_what_is_not()
     {
@@ -96,6 +134,7 @@ public class GuardedTests
             .With("sheet.yaml", "sheet: made\nabout: Made for a test.\nquantities:\n"
                 + Uncertainty("u_zs", "param.share * readings.zs", "readings.zs") + Uncertainty("u_r", "0.3 * readings.r1r2", "readings.r1r2\n    only-when: measured"))
             .With("rules/reading.yaml", Rule("reading", "compare: { value: readings.zs, at-most: 1 ohm }\nsays: \"Read {{ value }}.\"\n"))
+            .With("rules/sure.yaml", Rule("sure", "compare: { value: readings.zs, at-most: 100 ohm }\nsays: Made.\n"))
             .With("rules/continuity.yaml", Rule("continuity", "compare: { value: readings.r1r2, at-most: 1 ohm }\nsays: \"Read {{ value }}.\"\n"))
             .With("rules/heavy.yaml", Rule("heavy", "when: load.current >= (10 A)\ncompare: { value: load.current, at-most: 2 * (5 A) }\nsays: \"Draws {{ load.current }}.\"\n"));
         return rules.LoadSound("set.yaml");

@@ -94,7 +94,8 @@ public class LimitTests
     public void A_rule_that_an_input_cannot_help_bounds_nothing()
     {
         var limit = Of(
-            "12 m", ("never", "compare: { value: length, at-most: 0.1 m }\n"), ("always", "compare: { value: length, at-most: 1 km }\n"), ("unknown", "compare: { value: neutral_csa * length / length, at-most: 1 mm2 }\n"));
+            "12 m", ("never", "compare: { value: length, at-most: 0.1 m }\n"), ("always", "compare: { value: length, at-most: 1 km }\n"),
+            ("unknown", "compare: { value: neutral_csa * length / length, at-most: 1 mm2 }\n"));
 
         Assert.Equal(
             ["always NoLimit", "never AlwaysFails", "unknown Undetermined"], limit.Rules.Select(rule => $"{rule.At.Rule.Id} {rule.Kind}"));

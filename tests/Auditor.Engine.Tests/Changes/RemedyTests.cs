@@ -51,7 +51,9 @@ public class RemedyTests
         var found = Find(Runs.Design("80 m"), Runs.Set([Thin], Length, Size));
         var twice = Find(Runs.Design("45 m"), Runs.Set([Thin], Size, other));
 
-        Assert.Equal(["4 mm²", "40.5 m"], Assert.Single(found.Remedies).Changes.Select(change => ValueText.Show(change.Value, change.Place.Adjustment.Slot.Unit)).Order(StringComparer.Ordinal));
+        Assert.Equal(
+            ["4 mm²", "40.5 m"],
+            Assert.Single(found.Remedies).Changes.Select(change => ValueText.Show(change.Value, change.Place.Adjustment.Slot.Unit)).Order(StringComparer.Ordinal));
         Assert.Equal(3, found.Tried);
         Assert.Empty(twice.Remedies);
         Assert.Equal(2, twice.Tried);
@@ -62,7 +64,8 @@ public class RemedyTests
     {
         var rules = Runs.Set(
             [
-                Thin, ("also", "compare: { value: csa, at-least: 2 mm2 }\n"), ("a-little", "compare: { value: csa, at-most: 60 mm2 }\n"), ("b-much", "compare: { value: csa, at-most: 6 mm2 }\n"),
+                Thin, ("also", "compare: { value: csa, at-least: 2 mm2 }\n"), ("a-little", "compare: { value: csa, at-most: 60 mm2 }\n"),
+                ("b-much", "compare: { value: csa, at-most: 6 mm2 }\n"),
                 ("same", "compare: { value: \"choose(csa > (1 mm2), 5 m, 6 m)\", at-most: 6 m }\n"),
             ],
             Size);

@@ -29,10 +29,12 @@ internal static class Runs
         using var made = new TemporaryRules().With("set.yaml", "set: set\ntitle: Set\nuses: { provisions: [rules], adjustments: [adjustments] }\n");
         foreach (var (id, text) in rules)
         {
-            var body = (text.Contains("provision:", StringComparison.Ordinal) ? "" : "provision: requirement\n") + (text.StartsWith("of:", StringComparison.Ordinal) ? "" : "of: leg\n") + text;
+            var body = (text.Contains("provision:", StringComparison.Ordinal) ? "" : "provision: requirement\n")
+                + (text.StartsWith("of:", StringComparison.Ordinal) ? "" : "of: leg\n") + text;
             made.With(
                 $"rules/{id}.yaml",
-                $"rule: {id}\ntitle: A rule\nclause: {{ type: plausibility }}\nstatus: {{ since: 1.0 }}\n{body}says: Made.\nwhy: Made.\ndepartures: allowed\ncases: [{{ name: one, verdict: undetermined }}]\n");
+                $"rule: {id}\ntitle: A rule\nclause: {{ type: plausibility }}\nstatus: {{ since: 1.0 }}\n{body}"
+                + "says: Made.\nwhy: Made.\ndepartures: allowed\ncases: [{ name: one, verdict: undetermined }]\n");
         }
 
         foreach (var (id, text) in adjustments)

@@ -42,6 +42,66 @@ public class RemedyTests
         Assert.Equal("15.5 m", Shown(Assert.Single(Find(Runs.Design("12 m"), rules).Remedies)));
     }
 
+    [Theory]
+    [InlineData("100 m", "18 m")]
+    [InlineData("17.5 m", null)]
+    [InlineData("16 m", null)]
+    public void A_range_goes_no_further_than_its_share_and_its_end(string end, string? longer)
+    {
+        var up = Runs.Length.Replace("way: down", "way: up", StringComparison.Ordinal).Replace("100 m", end, StringComparison.Ordinal);
+        var rules = Runs.Set([("long", "compare: { value: length, at-least: 17.6 m }\n")], ("run", up));
+
+        Assert.Equal(longer is null ? [] : [longer], Find(Runs.Design("12 m"), rules).Remedies.Select(Shown));
+    }
+
+    [Fact]
+    public void A_change_that_leaves_no_margin_is_enough() =>
+        Assert.Equal("2.5 mm²", Shown(Assert.Single(Find(Runs.Design("12 m"), Runs.Set([("thick", "compare: { value: csa, at-least: 2.5 mm2 }\n")], Size)).Remedies)));
+
+    [Theory]
+    [InlineData("25.5 m", "10.2 m", "2.5 mm²")]
+    [InlineData("40.8 m", "10.2 m", "4 mm²")]
+    [InlineData("28.75 m", "11.5 m", "2.5 mm²")]
+    [InlineData("45.2 m", "11.3 m", "4 mm²")]
+    [InlineData("27.25 m", "10.9 m", "2.5 mm²")]
+    public void A_change_to_just_the_limit_is_enough_whatever_the_last_bits_say(string length, string limit, string size) =>
+        Assert.Equal(size, Shown(Assert.Single(Find(Runs.Design(length), Runs.Set([("thin", Runs.Thin.Replace("10.2 m", limit, StringComparison.Ordinal))], Size)).Remedies)));
+
+    [Fact]
+    public void Of_two_ranges_the_first_goes_by_thirds_and_the_second_as_far_as_it_must()
+    {
+        // 30 m at 10 A are 300 m; half of either leaves 150 m. Two thirds of the way to 5 A are 6.667 A, with which 15.75 m make 105 m.
+        var rules = Runs.Set(
+            [("load", "of: circuit\ncompare: { value: \"sum_of(legs, length) * load.current / (1 A)\", at-most: 105 m }\n")], Length,
+            ("current", "of: circuit\ninput: load.current\nrange: { from: 1 A, to: 100 A }\nremedy: { effort: 4, way: down, share: 50 %, round: 1 mA }\n"));
+        var remedy = Assert.Single(Find(Runs.Design("30 m").Replace("9 A", "10 A", StringComparison.Ordinal), rules).Remedies);
+
+        Assert.Equal(["15.5 m", "6.666 A"], remedy.Changes.Select(change => ValueText.Show(change.Value, change.Place.Adjustment.Slot.Unit)).Order(StringComparer.Ordinal));
+    }
+
+    [Fact]
+    public void A_word_that_is_none_of_the_steps_is_not_changed()
+    {
+        var rules = Runs.Set(
+            [("quick", "of: circuit\nrequire: device.curve == 'B'\n")], ("curve", "of: circuit\ninput: device.curve\nsteps: [B, C]\nremedy: { effort: 2, way: either }\n"));
+        static string With(string curve) => Runs.Design("10 m").Replace("load:", $"device: {{ curve: {curve} }}, load:", StringComparison.Ordinal);
+
+        Assert.Equal("B", Shown(Assert.Single(Find(With("C"), rules).Remedies)));
+        Assert.Empty(Find(With("D"), rules).Remedies);
+        Assert.Equal(0, Find(With("D"), rules).Tried);
+    }
+
+    [Theory]
+    [InlineData("of: circuit\ncompare: { value: \"sum_of(legs, length / csa * (1 mm2))\", at-most: 10.2 m }\nput-right-by: [cable.csa]\n")]
+    [InlineData("of: leg\ncompare: { value: length / csa * (1 mm2), at-most: 10.2 m }\nput-right-by: [csa]\n")]
+    public void Of_two_changes_as_great_the_one_that_the_rule_names_comes_first(string rule)
+    {
+        var thin = ("thin", rule);
+        var shorter = ("nearer", "of: leg\ninput: length\nsteps: [10 m, 20 m]\nremedy: { effort: 3, way: down }\n");
+
+        Assert.Equal(["2.5 mm²", "10 m"], Find(Runs.Design("20 m"), Runs.Set([thin], Size, shorter)).Remedies.Select(Shown));
+    }
+
     [Fact]
     public void Two_changes_do_together_what_neither_does_alone_and_never_change_one_input_twice()
     {

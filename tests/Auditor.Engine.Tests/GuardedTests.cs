@@ -83,6 +83,31 @@ public class GuardedTests
     }
 
     [Theory]
+    [InlineData("(1 - readings.r1 / (9 ohm)) * (readings.r2 / (9 ohm) - 1) + 0 * readings.zs / (1 ohm)", "3.9 %", "r1 7.2, r2 10.8")]
+    [InlineData("1 - abs(readings.r1 - (9.37 ohm)) / (1 ohm)", "99.5 %", "r1 9.37")]
+    public void A_worst_case_that_no_reading_shows_by_itself_or_at_its_ends_is_found_and_told_without_the_others(string value, string limit, string corner)
+    {
+        using var rules = new TemporaryRules().With("set.yaml", "set: set\ntitle: Set\nuses: { provisions: [hidden.yaml] }\n")
+            .With("hidden.yaml", Rule("hidden", $"compare: {{ value: {value}, at-most: {limit.Replace("%", "percent", StringComparison.Ordinal)} }}\nsays: Made.\n"));
+        var text = Text("guarded", "r1: 9 ohm ± 20 %, r2: 9 ohm +1.8 ohm -0.9 ohm, zs: 1 ohm ± 20 %", "9 A");
+        var finding = Evaluation.Audit.Run(Small.Build(text, rules.LoadSound("set.yaml")), Small.Today, new Problems()).Find("hidden:A/1")!;
+
+        Assert.Equal(Verdict.Unproven, finding.Verdict);
+        Assert.Equal(corner, string.Join(", ", finding.WorstCase!.Corner.Select(each => $"{each.Input.Input.Slot.Path.Split('.')[1]} {Math.Round(each.Number, 3)}")));
+        Assert.True(finding.WorstCase.WasSearched);
+    }
+
+    [Fact]
+    public void A_worst_case_at_an_end_of_what_goes_both_ways_was_searched_for()
+    {
+        using var rules = new TemporaryRules().With("set.yaml", "set: set\ntitle: Set\nuses: { provisions: [away.yaml] }\n")
+            .With("away.yaml", Rule("away", "compare: { value: abs(readings.r1 - (9 ohm)), at-most: 5 ohm }\nsays: Made.\n"));
+        var worst = Evaluation.Audit.Run(Small.Build(Text("guarded", "r1: 9 ohm ± 20 %", "9 A"), rules.LoadSound("set.yaml")), Small.Today, new Problems()).Find("away:A/1")!.WorstCase!;
+
+        Assert.Equal((0.64, true), (Math.Round(worst.Margin!.Relative!.Value, 9), worst.WasSearched));
+    }
+
+    [Theory]
     [InlineData(10, 4, 0.4, 0.13674)]
     [InlineData(8, 8, 1.0, 0.09045)]
     public void A_share_has_the_standard_error_of_the_count_that_it_comes_from(int samples, int kept, double share, double error)

@@ -50,6 +50,16 @@ public class AdjustmentTests
     }
 
     [Fact]
+    public void A_key_of_a_series_that_is_no_such_key_is_refused()
+    {
+        using var rules = With("rating", "of: circuit\ninput: device.rating\nseries: { lookup: made-rating, keys: [device.rating] }\n")
+            .With("tables/lookup.yaml", "lookup: made-rating\nabout: Ratings.\nkeys: [{ name: standard }, { name: rating, unit: A }]\nvalue: { name: made, unit: 1 }\nwhen-missing: ask\n");
+        rules.Load("set.yaml", out var problems);
+
+        Assert.Equal("wrong-result", Assert.Single(problems.All).Code);
+    }
+
+    [Fact]
     public void Steps_are_read_with_what_follows_from_them_and_with_their_condition()
     {
         var curve = Read("curve", "of: circuit\ninput: device.curve\nsteps: [D, B]\nalso: { device.standard: \"'EN 60898'\" }\nexists: given(device.rating)\n");

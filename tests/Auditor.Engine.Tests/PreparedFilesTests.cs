@@ -59,6 +59,15 @@ public sealed class PreparedFilesTests : IDisposable
     }
 
     [Fact]
+    public void A_home_without_rule_files_prepares_nothing()
+    {
+        Array.ForEach(["sets/tiny.yaml", "tables/lookup.yaml", "tables/table.yaml"], path => File.Delete(Path.Combine(_home.Folder, path)));
+
+        Assert.Equal(0, PreparedRules.Write(_home));
+        Assert.Null(Find());
+    }
+
+    [Fact]
     public void What_is_not_whole_or_was_made_with_other_schemas_is_passed_over()
     {
         PreparedRules.Write(_home);

@@ -32,6 +32,8 @@ public class ValueTextTests
     [InlineData(-12.3456, "A", false, "-12.34 A")]
     [InlineData(98765, "V", true, "98760 V")]
     [InlineData(98765, "V", false, "98770 V")]
+    [InlineData(1.005, "Ω", true, "1.005 Ω")]
+    [InlineData(4.035, "Ω", false, "4.035 Ω")]
     [InlineData(0, "Ω", true, "0 Ω")]
     [InlineData(0, "Ω", false, "0 Ω")]
     public void A_bound_is_rounded_to_its_safe_side(double number, string unit, bool isMost, string shown) =>

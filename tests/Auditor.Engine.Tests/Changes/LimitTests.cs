@@ -13,6 +13,8 @@ public class LimitTests
     [InlineData("compare: { value: length, at-most: 99.9 m }\n", 99.9)]
     [InlineData("compare: { value: length, at-most: 0.6 m }\n", 0.6)]
     [InlineData("require: length <= 40 m\n", 40)]
+    [InlineData("require: length <= 99.9 m\n", 99.9)]
+    [InlineData("require: key == 'A/1/leg 1' && length <= 40 m\n", 40)]
     public void A_limit_is_found_to_the_last_digits_wherever_in_the_range_it_lies(string rule, double metres)
     {
         var around = Of("12 m", rule).Around!;
@@ -27,6 +29,7 @@ public class LimitTests
     [InlineData("7 m", 5.0, null)]
     [InlineData("3 m", 5.0, null)]
     [InlineData("20 m", 5.0, null)]
+    [InlineData("24 m", 5.0, null)]
     [InlineData("40 m", null, 50.0)]
     [InlineData("60 m", null, 50.0)]
     public void Of_two_stretches_the_one_with_the_stated_value_is_told_or_the_nearest(string length, double? most, double? least)
@@ -37,6 +40,41 @@ public class LimitTests
         Assert.Equal(2, limit.Required.Count);
         Assert.Equal(most, Rounded(limit.Around!.Most));
         Assert.Equal(least, Rounded(limit.Around.Least));
+    }
+
+    [Theory]
+    [InlineData("require: length <= 40 m || length >= 60 m\n", 40.0, 60.0)]
+    [InlineData("compare: { value: abs(length - (1.25 m)), at-least: 0.2 m }\n", 1.05, 1.45)]
+    [InlineData("compare: { value: abs(length - (37 m)), at-least: 0.5 m }\n", 36.5, 37.5)]
+    [InlineData("when: length <= 33.4 m\ncompare: { value: length, at-most: 33.3 m }\n", 33.3, 33.4)]
+    public void A_gap_between_the_values_tried_first_is_found(string rule, double most, double least)
+    {
+        var kept = Assert.Single(Of("12 m", rule).Rules).Kept;
+
+        Assert.Equal([most, least], new[] { kept[0].Most!.Value.Number, kept[1].Least!.Value.Number }.Select(number => Math.Round(number, 4)));
+        Assert.Equal(2, kept.Count);
+    }
+
+    [Theory]
+    [InlineData("compare: { value: abs(length - (37 m)), at-most: 0.5 m }\n", 36.5, 37.5)]
+    [InlineData("require: length >= 11.9 m && length <= 12.1 m\n", 11.9, 12.1)]
+    public void A_stretch_between_the_values_tried_first_is_found(string rule, double least, double most)
+    {
+        var kept = Assert.Single(Assert.Single(Of("12 m", rule).Rules).Kept);
+
+        Assert.Equal([least, most], new[] { kept.Least!.Value.Number, kept.Most!.Value.Number }.Select(number => Math.Round(number, 4)));
+    }
+
+    [Fact]
+    public void A_rule_that_would_bite_only_beyond_the_range_sets_no_limit() =>
+        Assert.Equal(LimitKind.NoLimit, Assert.Single(Of("12 m", "compare: { value: length, at-most: 101 m }\n").Rules).Kind);
+
+    [Fact]
+    public void Of_two_rules_with_one_limit_the_first_governs()
+    {
+        var limit = Of("12 m", ("b", "compare: { value: length, within: { from: 2 m, to: 60 m } }\n"), ("a", "compare: { value: length, within: { from: 2 m, to: 60 m } }\n"));
+
+        Assert.Equal(("a", "a"), (limit.Around!.Least!.Rule.At.Rule.Id, limit.Around.Most!.Rule.At.Rule.Id));
     }
 
     [Fact]
@@ -68,6 +106,17 @@ public class LimitTests
         var limit = Search(Runs.Design("12 m", more: "basis: { ambient: 20 °C }\n"), rules);
 
         Assert.Equal((-12.5, 31.5), (Rounded(limit.Around!.Least), Rounded(limit.Around.Most)));
+    }
+
+    [Fact]
+    public void A_gap_in_the_allowed_temperatures_is_found()
+    {
+        var rules = Runs.Set(
+            [("gap", "of: installation\nrequire: basis.ambient <= 40 degC || basis.ambient >= 46 degC\n")],
+            ("ambient", "of: installation\ninput: basis.ambient\nrange: { from: -20 °C, to: 90 °C }\n"));
+        var limit = Search(Runs.Design("12 m", more: "basis: { ambient: 20 °C }\n"), rules);
+
+        Assert.Equal((40.0, 46.0), (Rounded(limit.Required[0].Most), Rounded(limit.Required[1].Least)));
     }
 
     [Fact]

@@ -27,6 +27,34 @@ public class CauseTests
     }
 
     [Fact]
+    public void A_word_that_a_rule_allows_in_addition_takes_its_finding_away_by_the_rule_set()
+    {
+        static (string, string, string)[] Allowing(string words) =>
+            [
+                ("provisions/spare.yaml", "compare: { value: spare_ways, at-least: param.spare_limit }", $"compare: {{ value: id, one-of: [{words}] }}"),
+                ("provisions/spare.yaml", "given: { spare_ways: 3, param.spare_limit: 2 }", "given: { id: B }"),
+            ];
+        var (before, after) = (Revisions.Rules(Allowing("\"'B'\"")), Revisions.Rules(Allowing("\"'B'\", \"'A'\"")));
+
+        var change = Of(RevisionComparison.Of(Revisions.Of(Yard.Design, before), Revisions.Of(Yard.Design, after)), "spare:A");
+
+        Assert.Equal((FindingChangeKind.Gone, MovedBy.RuleSet), (change.Kind, change.MovedBy));
+    }
+
+    [Fact]
+    public void What_only_the_earlier_formula_read_is_a_cause_as_well()
+    {
+        var rules = Revisions.Rules(
+            ("provisions/spare.yaml", "value: spare_ways, at-least", "value: \"choose(name == 'Gatehouse', spare_ways, 5)\", at-least"),
+            ("provisions/spare.yaml", "given: { spare_ways: 3,", "given: { name: Gatehouse, spare_ways: 3,"));
+        var after = Yard.Design.With("name: Gatehouse\n    spare-ways: 1", "name: Lodge\n    spare-ways: 3");
+
+        var change = Of(RevisionComparison.Of(Revisions.Of(Yard.Design, rules), Revisions.Of(after, rules)), "spare:A");
+
+        Assert.Equal(["name", "spare-ways"], change.Causes.OfType<InputChange>().Select(input => input.Path));
+    }
+
+    [Fact]
     public void A_condition_that_a_rule_loses_lets_it_find_by_the_rule_set()
     {
         var before = Revisions.Of(Yard.Design, Revisions.Rules(("provisions/spare.yaml", "of: board\n", "of: board\nwhen: spare_ways > 5\n")));

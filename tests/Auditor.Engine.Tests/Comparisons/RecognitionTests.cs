@@ -45,11 +45,13 @@ public class RecognitionTests
     }
 
     [Fact]
-    public void A_removed_circuit_is_neither_renamed_nor_moved()
+    public void An_added_or_removed_circuit_is_neither_renamed_nor_moved()
     {
         var shed = Yard.Design[Yard.Design.IndexOf("      - id: 2\n        name: Lamps", StringComparison.Ordinal)..].With("id: 2", "id: 5").With("Lamps", "Shed");
         var change = Assert.Single(Revisions.Compare(Yard.Design + shed, Yard.Design).Subjects);
+        var added = Assert.Single(Revisions.Compare(Yard.Design, Yard.Design + shed).Subjects);
 
+        Assert.Equal(("B/5", true, false, false), (added.Subject.Key, added.IsAdded, added.IsRenamed, added.IsMoved));
         Assert.Equal(("B/5", true, false, false), (change.Subject.Key, change.IsRemoved, change.IsRenamed, change.IsMoved));
     }
 

@@ -30,6 +30,15 @@ public class CaseRunnerTests
     }
 
     [Fact]
+    public void What_feeds_a_board_is_a_circuit_or_the_origin_by_what_is_given_of_it()
+    {
+        var board = MadeRules.Quantity("Zx", "board", "unit: Ω", "Zdb", "{ name: it, given: { up.supply.loop_impedance: 0.35 ohm }, expect: 0.35 ohm }");
+
+        Assert.Null(Run(board, "Zx", out var problems).Failure);
+        Assert.Equal("", ProblemText.Render(problems.All));
+    }
+
+    [Fact]
     public void A_quantity_that_is_missing_says_why()
     {
         var result = Run(MadeRules.Loop("{ name: it, expect: 1 ohm }"), "Zt", out _);

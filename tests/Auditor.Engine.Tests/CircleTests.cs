@@ -57,6 +57,10 @@ public class CircleTests
     public void Chains_that_only_climb_or_only_descend_are_sound(string sheet) => Assert.Empty(Told(sheet));
 
     [Fact]
+    public void A_quantity_with_a_fault_of_its_own_is_told_once_whoever_needs_it() =>
+        Assert.StartsWith("unknown-symbol: ", Assert.Single(Told("circuit A 1 = qqqqqqqqqq; circuit B 1 = A; circuit C 1 = B + A")), StringComparison.Ordinal);
+
+    [Fact]
     public void A_circle_of_thousands_is_found_as_well()
     {
         var told = Told(string.Join("; ", Enumerable.Range(0, 5000).Select(n => $"circuit q{n} 1 = q{(n + 1) % 5000}")));

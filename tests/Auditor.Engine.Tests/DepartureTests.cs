@@ -28,6 +28,24 @@ public class DepartureTests
         Assert.Equal(state, Assert.Single(Audit(departure).Departures).State);
 
     [Fact]
+    public void A_rule_of_departures_may_ask_what_the_installation_states()
+    {
+        static string Rule(string id, string of, string require) =>
+            $"rule: {id}\ntitle: A rule\nclause: {{ type: plausibility }}\nprovision: requirement\nstatus: {{ since: 1.0 }}\nof: {of}\nrequire: {require}\nsays: Made.\nwhy: Made.\n"
+            + "departures: allowed\ncases: [{ name: one, verdict: undetermined }]\n";
+        using var rules = new TemporaryRules()
+            .With("set.yaml", "set: set\ntitle: Set\nuses: { provisions: [rules] }\n")
+            .With("rules/short.yaml", Rule("short", "leg", "length < 1 m"))
+            .With("rules/earthed.yaml", Rule("earthed", "departure", "up.supply.earthing == 'TN-C-S'"));
+        const string Departed = "departures: [{ rule: short, subject: DB1/2/leg 1, reason: Agreed., agreed-by: T. Example, date: 2026-09-01 }]\n";
+
+        var findings = Small.Audit(Small.DesignText("house") + Departed, rules: rules.LoadSound("set.yaml")).Findings;
+
+        Assert.Equal(Verdict.Conforms, Assert.Single(findings, finding => finding.Rule.Id == "earthed").Verdict);
+        Assert.Equal(Verdict.Departed, Assert.Single(findings, finding => finding.Key == "short:DB1/2/leg 1").Verdict);
+    }
+
+    [Fact]
     public void A_departure_in_force_turns_its_finding_and_no_other()
     {
         var plain = Small.Audit(Small.DesignText("house"));

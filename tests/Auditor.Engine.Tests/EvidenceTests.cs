@@ -44,11 +44,18 @@ public class EvidenceTests
     [Fact]
     public void A_quantity_is_unfolded_once_and_named_thereafter()
     {
-        var derivations = new EvidenceBuilder(House.Rules).Of(House.Find("zs-cold:DB1/1")!);
-        var all = derivations.SelectMany(AllSources).Where(source => source.Kind == EvidenceKind.Quantity).ToList();
+        using var rules = new TemporaryRules()
+            .With("set.yaml", "set: set\ntitle: Set\nuses: { sheets: [sheet.yaml], provisions: [twice.yaml] }\n")
+            .WithSheet("sheet.yaml", "board a A = 1 A", "board b A = a + 1 A", "board c A = a + b")
+            .With("twice.yaml", "rule: twice\ntitle: A rule\nclause: { type: plausibility }\nprovision: requirement\nstatus: { since: 1.0 }\nof: board\n"
+                + "compare: { value: c, at-most: 5 * b }\nsays: Made.\nwhy: Made.\ndepartures: allowed\ncases: [{ name: one, given: { c: 3 A, b: 2 A }, verdict: conforms }]\n");
+        var result = Small.Audit(Small.DesignText("house"), rules: rules.LoadSound("set.yaml"));
 
-        Assert.All(all.GroupBy(source => source.Label), group => Assert.Single(group, source => source.Derivation is not null));
-        Assert.All(all.Where(source => source.Derivation is null), source => Assert.Equal("told elsewhere", source.Remark));
+        var sources = new EvidenceBuilder(result.Rules).Of(result.Find("twice:DB1")!).SelectMany(AllSources);
+
+        Assert.Equal(
+            ["DB1 c: a + b", "DB1 a: 1 A", "DB1 b: a + 1 A", "DB1 a: told elsewhere", "DB1 b: told elsewhere"],
+            sources.Select(source => $"{source.Label}: {source.Derivation?.Formula ?? source.Remark}"));
     }
 
     private static IEnumerable<EvidenceSource> AllSources(Derivation derivation) =>

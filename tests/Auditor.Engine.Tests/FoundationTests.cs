@@ -27,6 +27,23 @@ public class FoundationTests
             .Select(each => $"{each.Kind} {each.Subject} {each.Name} {each.Text} {each.Span?.StartLocation.Line}"));
 
     [Fact]
+    public void A_finding_names_the_curve_from_memory_that_it_rests_on()
+    {
+        using var rules = new TemporaryRules()
+            .With("set.yaml", "set: set\ntitle: Set\nuses: { curves: [curve.yaml], provisions: [opens.yaml] }\n")
+            .With("curve.yaml", "curve: made\ntitle: A curve as remembered\nsource: from memory\ntrust: memory\nstandard: EN 60898\nof: rating\nslow: [{ ratings-up-to: 32 A, points: [[5, 0.1]] }]\n")
+            .With("opens.yaml", "rule: opens\ntitle: A rule\nclause: { type: plausibility }\nprovision: requirement\nstatus: { since: 1.0 }\nof: circuit\n"
+                + "compare: { value: \"trip_current('EN 60898', 'any', device.rating, 0.1 s)\", at-least: 100 A }\nsays: Made.\nwhy: Made.\ndepartures: allowed\n"
+                + "cases: [{ name: one, verdict: undetermined }]\n");
+        var audit = Small.Audit(Small.DesignText("house"), rules: rules.LoadSound("set.yaml"));
+        var finding = audit.Find("opens:DB1/1")!;
+
+        Assert.True(finding.FromMemory);
+        Assert.Equal(
+            new Foundation(FoundationKind.FigureFromMemory, null, "A curve as remembered", "", null), Assert.Single(new Foundations(audit).Of(finding)));
+    }
+
+    [Fact]
     public void Every_finding_marked_has_a_foundation_and_no_other_has()
     {
         var foundations = new Foundations(House);

@@ -1,3 +1,6 @@
+using Auditor.Documents;
+using Auditor.Engine.RuleSets;
+
 namespace Auditor.Engine.Tests;
 
 public class SetChainTests
@@ -27,6 +30,24 @@ public class SetChainTests
         Assert.Equal(["iec-base", "house"], set.Title.Chain);
         Assert.Equal("0.9", set.Parameters.Single(parameter => parameter.Id == "cmin").Text);
         Assert.True(set.Rules.Count > 100);
+    }
+
+    [Theory]
+    [InlineData("sets/house.yaml", "", "sets/house.yaml", "sets/base.yaml", "rules/kept.yaml")]
+    [InlineData("house", "sets", "house.yaml", "base.yaml", "rules/kept.yaml")]
+    [InlineData("../sets/house.yaml", "rules", "../sets/house.yaml", "../sets/base.yaml", "../rules/kept.yaml")]
+    public void Sets_beside_one_another_are_shown_by_the_path_on_which_they_were_found(string asked, string from, params string[] shown)
+    {
+        using var rules = new TemporaryRules()
+            .With("sets/house.yaml", "set: house\ntitle: House\nextends: base\n")
+            .With("sets/base.yaml", "set: base\ntitle: Base\nuses: { provisions: [rules/kept.yaml] }\n")
+            .With("rules/kept.yaml", Rule("kept", "requirement").Replace("limit > 5", "device.rating > 5", StringComparison.Ordinal));
+        var problems = new Problems();
+
+        var set = RuleSetLoader.Load(Small.Home, asked, Path.Combine(rules.Folder, from), null, problems);
+
+        Assert.Equal("", ProblemText.Render(problems.All));
+        Assert.Equal(shown.Order(StringComparer.Ordinal), set!.Files.Select(file => file.Path).Where(path => !path.Contains("record", StringComparison.Ordinal)).Order(StringComparer.Ordinal));
     }
 
     [Fact]

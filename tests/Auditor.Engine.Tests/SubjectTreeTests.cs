@@ -107,6 +107,17 @@ public class SubjectTreeTests
         Assert.Equal("not known", ValueText.Show(board.Quantity(board.Shape.Quantity("Zdb")!.Index), null));
     }
 
+    [Theory]
+    [InlineData("- { id: \"-\", fed-from: origin }", "-")]
+    [InlineData("- { id: bonding, fed-from: origin }", "bonding")]
+    public void No_board_may_be_called_what_findings_call_something_else(string board, string id)
+    {
+        Small.TryBuild(Boards("- { id: A, fed-from: origin }", board), Small.Rules, out var problems);
+
+        var problem = Assert.Single(problems.All);
+        Assert.Equal(("reserved-id", $"no board may be called `{id}`", 5), (problem.Code, problem.Message, problem.Span!.Value.StartLocation.Line));
+    }
+
     private static string Chain(int count) =>
         Boards([.. Enumerable.Range(1, count).Select(number => number < count ? $"- {{ id: {number}, circuits: [{{ id: x, feeds: {number + 1} }}] }}" : $"- {{ id: {count} }}")]);
 

@@ -69,6 +69,7 @@ internal static class Plant
 
         Parameters.Add("cmin", new ParameterSlot("cmin", 0, FormulaType.Number, Unit.One));
         Parameters.Add("limit", new ParameterSlot("limit", 1, Quantity("V"), UnitCatalog.Find("V")));
+        Parameters.Add("area", new ParameterSlot("area", 2, Quantity("mm²"), UnitCatalog.Find("mm²")));
     }
 
     private static FormulaType Quantity(string unit) => FormulaType.Of(UnitCatalog.Find(unit)!.Dimension);

@@ -5,35 +5,56 @@ namespace Auditor.Mutation;
 /// <param name="log">Where every outcome is noted as it comes.</param>
 internal sealed class Campaign(IReadOnlyList<Mutant> mutants, TextWriter log)
 {
-    /// <summary>What became of each mutant that some test came by: killed, timeout, crashed or survived.</summary>
+    /// <summary>What becomes of a mutant that tests come by only while something is made once.</summary>
+    public const string OnlyOnce = "met only once";
+
+    /// <summary>Tests that take longer are left out: a mutant that survives runs all that come by it.</summary>
+    private const int MostMilliseconds = 3_000;
+
+    /// <summary>What became of each mutant that some test came by: killed, timeout, crashed, survived or <see cref="OnlyOnce"/>.</summary>
     public Dictionary<int, string> Outcomes { get; } = [];
 
-    /// <summary>Mutants that tests come by only while something is made once.</summary>
-    public HashSet<int> OnlyOnce { get; } = [];
+    /// <summary>Takes over what an earlier campaign noted of the same mutants.</summary>
+    public void GoOnFrom(IEnumerable<string> lines)
+    {
+        foreach (var parts in lines.Select(line => line.Split('\t')))
+        {
+            if (int.TryParse(parts[0], out var id))
+            {
+                Outcomes[id] = parts[1];
+            }
+        }
+    }
 
     /// <summary>Tries what no earlier project noticed.</summary>
     public void Run(TestProject project, string work)
     {
-        var wanted = mutants.Where(mutant => Outcomes.GetValueOrDefault(mutant.Id, "survived") == "survived").Select(mutant => mutant.Id).ToHashSet();
+        var wanted = mutants.Where(mutant => Outcomes.GetValueOrDefault(mutant.Id, OnlyOnce) is "survived" or OnlyOnce).Select(mutant => mutant.Id).ToHashSet();
         var covering = wanted.ToDictionary(id => id, _ => new List<(int Test, int Milliseconds)>());
+        var once = new HashSet<int>();
         foreach (var test in project.Run("cover", $"{mutants.Max(mutant => mutant.Id)}"))
         {
-            if (test[1] != "passes")
+            var milliseconds = int.Parse(test[2]);
+            if (test[1] != "passes" || milliseconds > MostMilliseconds)
             {
-                log.WriteLine($"left out: {test[^1]}: {test[1]}");
+                log.WriteLine($"left out: {test[^1]}: {test[1]}, {milliseconds} ms");
                 continue;
             }
 
             foreach (var id in Numbers(test[3]).Where(wanted.Contains))
             {
-                covering[id].Add((int.Parse(test[0]), int.Parse(test[2])));
+                covering[id].Add((int.Parse(test[0]), milliseconds));
             }
 
-            OnlyOnce.UnionWith(Numbers(test[4]).Where(wanted.Contains));
+            once.UnionWith(Numbers(test[4]).Where(wanted.Contains));
         }
 
         var left = new Queue<int>(wanted.Where(id => covering[id].Count > 0).Order());
-        OnlyOnce.ExceptWith(left);
+        foreach (var id in once.Except(left).Where(id => !Outcomes.ContainsKey(id)).Order())
+        {
+            Note(id, OnlyOnce, "");
+        }
+
         var spoilt = new HashSet<int>();
         while (left.Count > 0)
         {

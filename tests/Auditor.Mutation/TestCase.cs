@@ -11,9 +11,11 @@ internal sealed record TestCase(string Name, MethodInfo Method, object?[] Argume
 {
     private const BindingFlags Static = BindingFlags.Static | BindingFlags.Public | BindingFlags.NonPublic | BindingFlags.FlattenHierarchy;
 
-    /// <summary>All tests of an assembly, in the order of their names.</summary>
-    public static IReadOnlyList<TestCase> In(Assembly assembly) =>
-        [.. assembly.GetTypes().Where(type => type is { IsAbstract: false, IsGenericTypeDefinition: false })
+    /// <summary>The tests of an assembly, in the order of their names.</summary>
+    /// <param name="assembly">The assembly.</param>
+    /// <param name="classes">The classes whose tests are wanted; none for all.</param>
+    public static IReadOnlyList<TestCase> In(Assembly assembly, string[] classes) =>
+        [.. assembly.GetTypes().Where(type => type is { IsAbstract: false, IsGenericTypeDefinition: false } && (classes.Length == 0 || classes.Contains(type.Name)))
             .SelectMany(type => type.GetMethods(BindingFlags.Instance | BindingFlags.Static | BindingFlags.Public))
             .Where(method => Attributes(method, "FactAttribute", "TheoryAttribute").Any())
             .SelectMany(method => Rows(method).Select((row, number) => new TestCase($"{method.DeclaringType!.Name}.{method.Name} {number}", method, Fitted(method, row))))

@@ -6,16 +6,18 @@ namespace Auditor.Mutation;
 internal sealed class TestProject
 {
     private readonly string _folder;
+    private readonly string _tests;
 
     /// <summary>Copies what was built.</summary>
     /// <param name="tests">Full path of the folder of all test projects.</param>
-    /// <param name="name">Name of the project.</param>
+    /// <param name="wanted">Name of the project; with a colon and the names of classes, only their tests.</param>
     /// <param name="work">Where the copy goes; within the checkout, since tests look for its root.</param>
-    public TestProject(string tests, string name, string work)
+    public TestProject(string tests, string wanted, string work)
     {
-        Name = name;
-        var built = FolderOf(tests, name);
-        _folder = Path.Combine(work, name);
+        _tests = wanted;
+        Name = wanted.Split(':')[0];
+        var built = FolderOf(tests, Name);
+        _folder = Path.Combine(work, Name);
         foreach (var file in Directory.EnumerateFiles(built, "*", SearchOption.AllDirectories).Where(file => !file.Contains("TestResults", StringComparison.Ordinal)))
         {
             var copy = Path.Combine(_folder, Path.GetRelativePath(built, file));
@@ -41,7 +43,7 @@ internal sealed class TestProject
         string[] line =
         [
             "exec", "--depsfile", Path.Combine(_folder, Name + ".deps.json"), "--runtimeconfig", Path.Combine(_folder, Name + ".runtimeconfig.json"),
-            Path.Combine(_folder, "Auditor.Mutation.dll"), "--within", Name, .. arguments,
+            Path.Combine(_folder, "Auditor.Mutation.dll"), "--within", _tests, .. arguments,
         ];
         Array.ForEach(line, start.ArgumentList.Add);
         using var process = Process.Start(start)!;

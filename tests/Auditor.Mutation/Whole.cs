@@ -1,3 +1,6 @@
+using System.Security.Cryptography;
+using System.Text;
+
 namespace Auditor.Mutation;
 
 /// <summary>The whole run: compile with all mutants, try a sample of them, tell the score and the survivors.</summary>
@@ -8,9 +11,13 @@ internal static class Whole
     private static readonly string[] Tests = ["Auditor.Formulas.Tests", "Auditor.Engine.Tests", "Auditor.Limits.Tests"];
 
     /// <summary>Runs.</summary>
-    /// <param name="args">How many mutants to draw at random (all by default), the seed of the draw, and the test projects.</param>
+    /// <param name="args">How many mutants to draw at random (all by default), the seed of the draw, and the test projects, each of them perhaps with
+    /// the classes that are wanted of it: <c>Auditor.Rules.Tests:CaseTests,CourseTests</c>. With <c>on</c> before all this, what an earlier run of the
+    /// same mutants noticed stands, and the rest is tried against these projects.</param>
     public static int Run(string[] args)
     {
+        var goesOn = args is ["on", ..];
+        args = goesOn ? args[1..] : args;
         var root = Root();
         var work = Path.Combine(root, "tests", "Auditor.Mutation", "bin", "mutated");
         Directory.CreateDirectory(work);
@@ -38,10 +45,25 @@ internal static class Whole
         var order = all.ToArray();
         new Random(seed).Shuffle(order);
         Mutant[] drawn = [.. order.Take(size).OrderBy(mutant => mutant.Id)];
-        Console.WriteLine($"{drawn.Length} of {all.Count} mutants, seed {seed}");
+        var title = $"{drawn.Length} of {all.Count} mutants, seed {seed}";
+        Console.WriteLine(title);
 
-        using var log = new StreamWriter(Path.Combine(work, "outcomes.tsv"));
+        title += $", {Convert.ToHexString(SHA256.HashData(Encoding.UTF8.GetBytes(string.Join('\n', all))))[..16]}";
+        var outcomes = Path.Combine(work, "outcomes.tsv");
+        string[] earlier = goesOn ? File.ReadAllLines(outcomes) : [title];
+        if (earlier.FirstOrDefault() != title)
+        {
+            throw new InvalidOperationException($"{outcomes} is not of these mutants: draw as then, from the same source");
+        }
+
+        using var log = new StreamWriter(outcomes, append: goesOn);
+        if (!goesOn)
+        {
+            log.WriteLine(title);
+        }
+
         var campaign = new Campaign(drawn, log);
+        campaign.GoOnFrom(earlier);
         Array.ForEach(projects, project => campaign.Run(project, work));
         Tell(drawn, campaign);
         return 0;
@@ -54,10 +76,10 @@ internal static class Whole
             var own = drawn.Where(mutant => mutant.Place.StartsWith(name, StringComparison.Ordinal)).ToArray();
             var counts = own.CountBy(mutant => Became(mutant, campaign)).ToDictionary();
             var found = Count("killed") + Count("timeout") + Count("crashed");
-            var judged = own.Length - Count("met only once");
+            var judged = own.Length - Count(Campaign.OnlyOnce);
             Console.WriteLine(
                 $"{(name.Length == 0 ? "all" : name),-18} {100.0 * found / Math.Max(judged, 1):0.0} % of {judged} noticed: {Count("killed")} killed, {Count("timeout")} timed out, "
-                + $"{Count("crashed")} crashed; {Count("survived")} survived, {Count("met by no test")} met by no test; {Count("met only once")} met only while something is made once, not counted");
+                + $"{Count("crashed")} crashed; {Count("survived")} survived, {Count("met by no test")} met by no test; {Count(Campaign.OnlyOnce)} met only while something is made once, not counted");
 
             int Count(string what) => counts.GetValueOrDefault(what);
         }
@@ -69,7 +91,7 @@ internal static class Whole
     }
 
     private static string Became(Mutant mutant, Campaign campaign) =>
-        campaign.Outcomes.GetValueOrDefault(mutant.Id, campaign.OnlyOnce.Contains(mutant.Id) ? "met only once" : "met by no test");
+        campaign.Outcomes.GetValueOrDefault(mutant.Id, "met by no test");
 
     private static string Root()
     {

@@ -6,7 +6,7 @@ namespace Auditor.Engine.Guarded;
 /// <summary>
 /// Finds the worst point within the tolerances for one rule. The sign of each input's effect tells the corner to begin with; from there
 /// each input is moved as long as that makes things worse, which confirms the corner or finds a worse one. Where signs do not settle
-/// it, the search begins again from random points.
+/// it, or there are none because inputs make a difference only together, the search begins again from random points.
 /// </summary>
 internal sealed class CornerSearch(Probe probe, RuleAt at, IReadOnlyList<InputEffect> effects, IReadOnlyList<int> inputs)
 {
@@ -27,7 +27,7 @@ internal sealed class CornerSearch(Probe probe, RuleAt at, IReadOnlyList<InputEf
 
         var sides = new[] { [.. corner], End(input => input.Low), End(input => input.High) };
         var best = Descend(corner);
-        var isSettled = effects.All(effect => effect.IsMonotone) && !best.HasMoved && best.Score.Standing != Score.Absent;
+        var isSettled = effects.All(effect => effect.IsMonotone) && effects.Any(effect => effect.Loss != 0) && !best.HasMoved && best.Score.Standing != Score.Absent;
         foreach (var start in isSettled ? others : others.Concat(sides.Select(new StraightWay(probe, at).Worst)).Concat(RandomStartsFrom()))
         {
             var found = Descend([.. start]);

@@ -5,9 +5,6 @@ namespace Auditor.Engine.Limits;
 /// <param name="Most">What bounds it above; null for nothing.</param>
 public sealed record AllowedRange(LimitBound? Least, LimitBound? Most)
 {
-    /// <summary>Whether a place lies in it.</summary>
-    internal bool Holds(double position) => (Least is null || position >= Least.Edge.Position) && (Most is null || position <= Most.Edge.Position);
-
     /// <summary>How far a place lies outside of it.</summary>
     internal double Distance(double position) =>
         Math.Max(0, Math.Max(Least is null ? 0 : Least.Edge.Position - position, Most is null ? 0 : position - Most.Edge.Position));

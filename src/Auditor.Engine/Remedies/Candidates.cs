@@ -39,7 +39,7 @@ internal static class Candidates
     }
 
     private static bool IsNamed(Finding finding, Adjustable place) =>
-        place.Subject == finding.Subject && place.Inputs.Any(input => finding.Rule.PutRightBy.Any(path => Names(path, Written(input))));
+        (place.Subject == finding.Subject || place.Holders.Contains(finding.Subject)) && place.Inputs.Any(input => finding.Rule.PutRightBy.Any(path => Names(path, Written(input))));
 
     private static string Written(SubjectInput input) => input.Subject.Shape.Name == "leg" ? CablePrefix + input.Slot.Path : input.Slot.Path;
 

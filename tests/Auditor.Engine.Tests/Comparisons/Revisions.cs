@@ -25,6 +25,21 @@ internal static class Revisions
     /// <summary>The revision of a design, audited with a rule set.</summary>
     public static Revision Of(string yaml, RuleSet? rules = null) => Revision.Of("site.design.yaml", Audited(yaml, rules ?? Plain.Value));
 
+    /// <summary>The plain set as edited.</summary>
+    public static RuleSet Rules(params (string File, string Old, string New)[] edits) => Edited(edits);
+
+    /// <summary>What a findings file tells of a revision: neither the audit nor what the design states.</summary>
+    public static Revision FromFile(Revision revision) => new()
+    {
+        Name = "findings.json",
+        Mark = revision.Mark,
+        Inputs = revision.Inputs,
+        Rules = revision.Rules,
+        Subjects = [.. revision.Subjects.Select(subject => new RevisionSubject(subject.Key, subject.Kind, subject.Name, subject.Parent))],
+        Findings = revision.Findings,
+        Departures = revision.Departures,
+    };
+
     /// <summary>A text with one part of it replaced; fails where the part is not there.</summary>
     public static string With(this string text, string old, string replacement)
     {

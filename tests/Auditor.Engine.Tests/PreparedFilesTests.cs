@@ -34,10 +34,9 @@ public sealed class PreparedFilesTests : IDisposable
 
         foreach (var text in new[] { Set, Lookup, Table })
         {
-            var source = new SourceText("any.yaml", text);
-            var problems = new Problems();
+            var source = FileOf(text);
 
-            Assert.Equal(Told(YamlReader.Read(source, problems)), Told(prepared.Find(source, HashOf(text))));
+            Assert.Equal(Told(YamlReader.Read(source.Text, new Problems())), Told(prepared.Find(source)));
         }
     }
 
@@ -45,9 +44,8 @@ public sealed class PreparedFilesTests : IDisposable
     public void A_text_that_was_not_prepared_is_not_found()
     {
         PreparedRules.Write(_home);
-        var edited = Set + "edition: second\n";
 
-        Assert.Null(PreparedRules.Open(_home).Find(new SourceText("any.yaml", edited), HashOf(edited)));
+        Assert.Null(PreparedRules.Open(_home).Find(FileOf(Set + "edition: second\n")));
     }
 
     [Fact]
@@ -98,9 +96,13 @@ public sealed class PreparedFilesTests : IDisposable
 
     public void Dispose() => _rules.Dispose();
 
-    private Node? Find() => PreparedRules.Open(_home).Find(new SourceText("any.yaml", Table), HashOf(Table));
+    private Node? Find() => PreparedRules.Open(_home).Find(FileOf(Table));
 
-    private static string HashOf(string text) => Convert.ToHexStringLower(SHA256.HashData(Encoding.UTF8.GetBytes(text)));
+    private static SourceFile FileOf(string text)
+    {
+        var bytes = Encoding.UTF8.GetBytes(text);
+        return new SourceFile(new SourceText("any.yaml", text), bytes.Length, Convert.ToHexStringLower(SHA256.HashData(bytes)));
+    }
 
     private static string Told(Node? node) => $"{node?.Span.Start}-{node?.Span.End} " + node switch
     {

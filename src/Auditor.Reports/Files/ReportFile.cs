@@ -53,8 +53,9 @@ public static class ReportFile
         stream.Flush(flushToDisk: true);
     }
 
-    /// <summary>Whether the system takes no file of that length, which the library tells as if it were the fault of an argument; native code does not say whose.</summary>
-    private static bool IsTooLarge(Exception fault) => fault is ArgumentOutOfRangeException { ParamName: "value", Source: null or "System.Private.CoreLib" };
+    /// <summary>Whether the system takes no file of that length, which the library tells as if it were the fault of an argument.</summary>
+    private static bool IsTooLarge(Exception fault) =>
+        fault is ArgumentOutOfRangeException { ParamName: "value" } && fault.Message.StartsWith("Specified file length", StringComparison.Ordinal);
 
     /// <summary>The reason without the paths of the machine that the system's message ends with.</summary>
     private static string Reason(Exception fault) =>

@@ -59,12 +59,11 @@ internal static class HeadJson
 
     private static void Counts(JsonOutput output, AuditResult result) => output.Object("counts", () =>
     {
-        var counts = result.Findings.CountBy(finding => finding.Verdict).ToDictionary();
-        output.Whole("conforms", counts.GetValueOrDefault(Verdict.Conforms));
-        output.Whole("nonconforming", counts.GetValueOrDefault(Verdict.Nonconforming));
-        output.Whole("unproven", counts.GetValueOrDefault(Verdict.Unproven));
-        output.Whole("undetermined", counts.GetValueOrDefault(Verdict.Undetermined));
-        output.Whole("departed", counts.GetValueOrDefault(Verdict.Departed));
+        output.Whole("conforms", result.Count(Verdict.Conforms));
+        output.Whole("nonconforming", result.Count(Verdict.Nonconforming));
+        output.Whole("unproven", result.Count(Verdict.Unproven));
+        output.Whole("undetermined", result.Count(Verdict.Undetermined));
+        output.Whole("departed", result.Count(Verdict.Departed));
         output.Whole("onAssumption", result.Findings.Count(finding => finding.Verdict == Verdict.Conforms && finding.OnAssumption));
     });
 
